@@ -1,0 +1,53 @@
+import type { z } from 'zod/mini';
+import type { OrganisationAction, SiteAction } from '../policy/policy.ts';
+
+/**
+ * Who may call a route, stated with it. `site` names where the site is found: the path parameter that holds a site,
+ * building, survey, limit or export id. A person without any role there gets 404, one whose role is too small 403.
+ */
+export type RoutePolicy =
+  | { readonly kind: 'public'; readonly why: string }
+  | { readonly kind: 'signed-in' }
+  | { readonly kind: 'organisation'; readonly action: OrganisationAction }
+  | {
+      readonly kind: 'site';
+      readonly action: SiteAction;
+      readonly of: 'site' | 'building' | 'survey' | 'limit' | 'export';
+      readonly param: string;
+    };
+
+type Schema = z.ZodMiniType;
+
+/** One operation of the API: the API validates with it, the web client calls and parses with it, OpenAPI is made of it. */
+export interface Contract<
+  P extends Schema | undefined = Schema | undefined,
+  Q extends Schema | undefined = Schema | undefined,
+  B extends Schema | undefined = Schema | undefined,
+  R extends Schema | undefined = Schema | undefined,
+> {
+  /** Noun and verb, as `sites.create`. */
+  readonly id: string;
+  readonly method: 'GET' | 'POST' | 'PATCH' | 'PUT' | 'DELETE';
+  /** Express form: `/api/sites/:siteId`. */
+  readonly path: string;
+  readonly summary: string;
+  readonly policy: RoutePolicy;
+  readonly params?: P;
+  readonly query?: Q;
+  readonly body?: B;
+  readonly response?: R;
+  readonly status: 200 | 201 | 202 | 204;
+  /** Mutable resource: the caller must send `If-Match` with the strong ETag it read. */
+  readonly ifMatch?: true;
+  /** Answers that are not JSON (PDF, event stream) are named by media type and have no response schema. */
+  readonly media?: 'application/pdf' | 'text/event-stream';
+}
+
+export function defineContract<
+  P extends Schema | undefined = undefined,
+  Q extends Schema | undefined = undefined,
+  B extends Schema | undefined = undefined,
+  R extends Schema | undefined = undefined,
+>(contract: Contract<P, Q, B, R>): Contract<P, Q, B, R> {
+  return contract;
+}

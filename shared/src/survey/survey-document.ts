@@ -1,0 +1,39 @@
+import type { SurveyDocumentV1 } from './versions/v1.ts';
+
+/**
+ * The survey document as commands, geometry and the tally see it: flat maps by id, relations by id, lengths in metres.
+ * The stored and sent form is {@link SurveyDocumentV1}; `fromStored` / `toStored` convert.
+ */
+export type {
+  Corner,
+  Enclosure,
+  Entry,
+  EntryPart,
+  Evidence,
+  Keeping,
+  Lining,
+  LiningLayer,
+  LiningSurface,
+  Opening,
+  OpeningState,
+  PlanPicture,
+  Protection,
+  Room,
+  Storey,
+} from './versions/v1.ts';
+
+export type EntityKind = 'storey' | 'corner' | 'room' | 'opening' | 'entry';
+export const ENTITY_KINDS: readonly EntityKind[] = ['storey', 'corner', 'room', 'opening', 'entry'];
+
+type Row<K extends keyof SurveyDocumentV1> = SurveyDocumentV1[K] extends readonly (infer R)[] ? R : never;
+
+export interface SurveyDocument {
+  readonly surveyId: string;
+  /** The number of the last change set this state contains. */
+  readonly sequence: number;
+  readonly storeys: ReadonlyMap<string, Row<'storeys'>>;
+  readonly corners: ReadonlyMap<string, Row<'corners'>>;
+  readonly rooms: ReadonlyMap<string, Row<'rooms'>>;
+  readonly openings: ReadonlyMap<string, Row<'openings'>>;
+  readonly entries: ReadonlyMap<string, Row<'entries'>>;
+}
