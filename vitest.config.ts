@@ -3,7 +3,6 @@ import { defineConfig } from 'vitest/config';
 /** One project per kind of test, so that `npm test` can add the runs up and a developer can run one kind alone. */
 export default defineConfig({
   test: {
-    globalSetup: ['./tests/support/global-setup.ts'],
     projects: [
       {
         test: {
@@ -25,6 +24,7 @@ export default defineConfig({
         oxc: { decorator: { legacy: true } },
         test: {
           name: 'api',
+          globalSetup: ['./tests/support/global-setup.ts'],
           include: ['tests/api/**/*.test.ts', 'tests/reference/real-rooms.test.ts'],
           environment: 'node',
           testTimeout: 30_000,
@@ -35,6 +35,7 @@ export default defineConfig({
         oxc: { decorator: { legacy: true } },
         test: {
           name: 'e2e',
+          globalSetup: ['./tests/support/global-setup.ts'],
           include: ['tests/e2e/**/*.test.ts'],
           environment: 'node',
           testTimeout: 180_000,
