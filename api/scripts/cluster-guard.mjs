@@ -1,3 +1,4 @@
+import { once } from 'node:events';
 import { setTimeout as wait } from 'node:timers/promises';
 import { stopCluster } from './postgres.mjs';
 
@@ -5,6 +6,7 @@ import { stopCluster } from './postgres.mjs';
 const GRACE_MS = 2_000;
 process.on('SIGINT', () => {});
 process.on('SIGTERM', () => {});
-for await (const _ of process.stdin);
+process.stdin.resume();
+await once(process.stdin, 'close');
 await wait(GRACE_MS);
 stopCluster(process.argv[2]);

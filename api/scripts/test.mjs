@@ -1,4 +1,4 @@
-import { spawn, spawnSync } from 'node:child_process';
+import { spawn } from 'node:child_process';
 import { existsSync, mkdirSync, readFileSync, rmSync } from 'node:fs';
 import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
@@ -73,7 +73,7 @@ async function main() {
   const results = [
     await check(
       'types',
-      ['shared', 'api', 'web', 'tests'].map((workspace) => [bin('tsc'), ['-p', workspace]]),
+      ['.', 'shared', 'api', 'web', 'tests'].map((workspace) => [bin('tsc'), ['-p', workspace]]),
     ),
     await check('lint', [
       [bin('eslint'), ['.', '--max-warnings', '0']],
