@@ -1,12 +1,11 @@
 import { spawn } from 'node:child_process';
-import { randomBytes } from 'node:crypto';
-import { existsSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs';
+import { existsSync, readFileSync } from 'node:fs';
 import { createServer } from 'node:net';
 import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { buildWebWhenStale } from './build-web-when-stale.mjs';
+import { database } from './database.mjs';
 import { checkNode, ensurePackages } from './packages.mjs';
-import { clusterFolder, ensureDatabase, ensurePostgres, serverUrl, startCluster } from './postgres.mjs';
 import { Stop, command, say } from './say.mjs';
 
 const root = join(dirname(fileURLToPath(import.meta.url)), '..', '..');
@@ -37,56 +36,6 @@ async function checkPortFree(number, host) {
   await new Promise((done) => server.close(done));
 }
 
-/** Secrets are made once and stay in the data folder, readable by their owner only. */
-function secrets() {
-  mkdirSync(dataFolder, { recursive: true });
-  const file = join(dataFolder, 'secrets.json');
-  if (!existsSync(file)) {
-    const made = {
-      ownerPassword: randomBytes(24).toString('base64url'),
-      appPassword: randomBytes(24).toString('base64url'),
-    };
-    writeFileSync(file, `${JSON.stringify(made, null, 2)}\n`, { mode: 0o600 });
-  }
-  return JSON.parse(readFileSync(file, 'utf8'));
-}
-
-/** A private cluster on loopback, or the server of DATABASE_URL. Says how to reach it and how to stop what was started. */
-async function database() {
-  if (process.env.DATABASE_URL) {
-    const url = process.env.DATABASE_URL;
-    return {
-      env: { DATABASE_URL: url, MIGRATION_DATABASE_URL: process.env.MIGRATION_DATABASE_URL ?? url },
-      ours: false,
-      stop: () => {},
-    };
-  }
-  ensurePostgres();
-  const cluster = await startCluster({
-    folder: clusterFolder(root),
-    passwordFile: join(dataFolder, 'postgres-password'),
-  });
-  const { ownerPassword, appPassword } = secrets();
-  await ensureDatabase({ ...cluster, database: 'embertally', ownerPassword, appPassword });
-  if (cluster.started) guard(cluster.folder);
-  return {
-    env: {
-      DATABASE_URL: serverUrl('embertally_app', appPassword, cluster.port, 'embertally'),
-      MIGRATION_DATABASE_URL: serverUrl('embertally_owner', ownerPassword, cluster.port, 'embertally'),
-    },
-    ours: true,
-    stop: cluster.stop,
-  };
-}
-
-/** Stops the cluster even when this process is killed: the guard's input ends with us, however we end. */
-function guard(folder) {
-  spawn(process.execPath, [join(root, 'api', 'scripts', 'cluster-guard.mjs'), folder], {
-    stdio: ['pipe', 'ignore', 'ignore'],
-    detached: true,
-  }).unref();
-}
-
 function printDemo() {
   const file = join(dataFolder, 'demo.json');
   if (!existsSync(file)) return;
@@ -105,7 +54,7 @@ async function main() {
   await checkPortFree(listenOn, host);
   ensurePackages(root);
   await buildWebWhenStale(root);
-  const server = await database();
+  const server = await database(root, dataFolder);
   const demo = process.env.DEMO ?? (server.ours ? '1' : '0');
   const address = process.env.BASE_URL ?? `http://127.0.0.1:${listenOn}`;
 

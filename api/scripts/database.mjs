@@ -1,0 +1,55 @@
+import { spawn } from 'node:child_process';
+import { randomBytes } from 'node:crypto';
+import { existsSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs';
+import { join } from 'node:path';
+import { clusterFolder, ensureDatabase, ensurePostgres, serverUrl, startCluster } from './postgres.mjs';
+
+/** Secrets are made once and stay in the data folder, readable by their owner only. */
+function secrets(dataFolder) {
+  mkdirSync(dataFolder, { recursive: true });
+  const file = join(dataFolder, 'secrets.json');
+  if (!existsSync(file)) {
+    const made = {
+      ownerPassword: randomBytes(24).toString('base64url'),
+      appPassword: randomBytes(24).toString('base64url'),
+    };
+    writeFileSync(file, `${JSON.stringify(made, null, 2)}\n`, { mode: 0o600 });
+  }
+  return JSON.parse(readFileSync(file, 'utf8'));
+}
+
+/** A private cluster on loopback, or the server of DATABASE_URL. Says how to reach it and how to stop what was started. */
+export async function database(root, dataFolder) {
+  if (process.env.DATABASE_URL) {
+    const url = process.env.DATABASE_URL;
+    return {
+      env: { DATABASE_URL: url, MIGRATION_DATABASE_URL: process.env.MIGRATION_DATABASE_URL ?? url },
+      ours: false,
+      stop: () => {},
+    };
+  }
+  ensurePostgres();
+  const cluster = await startCluster({
+    folder: clusterFolder(root),
+    passwordFile: join(dataFolder, 'postgres-password'),
+  });
+  const { ownerPassword, appPassword } = secrets(dataFolder);
+  await ensureDatabase({ ...cluster, database: 'embertally', ownerPassword, appPassword });
+  if (cluster.started) guard(root, cluster.folder);
+  return {
+    env: {
+      DATABASE_URL: serverUrl('embertally_app', appPassword, cluster.port, 'embertally'),
+      MIGRATION_DATABASE_URL: serverUrl('embertally_owner', ownerPassword, cluster.port, 'embertally'),
+    },
+    ours: true,
+    stop: cluster.stop,
+  };
+}
+
+/** Stops the cluster even when this process is killed: the guard's input ends with us, however we end. */
+function guard(root, folder) {
+  spawn(process.execPath, [join(root, 'api', 'scripts', 'cluster-guard.mjs'), folder], {
+    stdio: ['pipe', 'ignore', 'ignore'],
+    detached: true,
+  }).unref();
+}
