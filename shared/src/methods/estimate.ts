@@ -1,38 +1,9 @@
-/** A flag that stands next to a number: outside a range, a default assumed, a caution. */
-export interface EstimateWarning {
-  readonly code: string;
-  readonly text: string;
-}
+import type { InputValues, Method, MethodInputs, MethodOutput } from './define-method.ts';
+import { figure } from './figure.ts';
+import { rangeFaults, rangeText } from './range-faults.ts';
+import type { EstimateWarning, InputOrigin, MethodSource, WorkingInput, WorkingStep } from './working.ts';
 
-/** Where the value of an input came from; shown in every working. */
-export type InputOrigin = 'given' | 'measured' | 'catalogue' | 'default' | 'computed';
-
-export interface WorkingInput {
-  readonly name: string;
-  readonly symbol: string;
-  readonly quantity: string;
-  readonly unit: string;
-  readonly value: number | string | null;
-  readonly origin: InputOrigin;
-  readonly note?: string;
-}
-
-/** One line of a derivation, in the source's own symbols and order. */
-export interface WorkingStep {
-  readonly text: string;
-  readonly equation?: string;
-  readonly value?: number | string | null;
-  readonly unit?: string;
-}
-
-export interface MethodSource {
-  readonly title: string;
-  readonly edition?: string;
-  /** Clause, equation, table or page. */
-  readonly locator: string;
-  /** True when the value was taken from memory of the source, not read again. */
-  readonly fromMemory?: boolean;
-}
+export type { EstimateWarning, InputOrigin, MethodSource, WorkingInput, WorkingStep } from './working.ts';
 
 /**
  * One number of the book with what is needed to defend it. `value: null` with `never` is an event that does not happen
@@ -45,7 +16,152 @@ export interface Estimate {
   readonly method: string;
   readonly warnings: readonly EstimateWarning[];
   readonly never?: string;
+  /** With workings only, from here on. */
+  readonly title?: string;
+  readonly symbol?: string;
+  readonly equation?: string;
   readonly inputs?: readonly WorkingInput[];
   readonly steps?: readonly WorkingStep[];
   readonly sources?: readonly MethodSource[];
+  readonly assumptions?: readonly string[];
+  /** Why this method and not another. */
+  readonly why?: string;
+}
+
+export type Origins<S extends MethodInputs> = {
+  readonly [K in keyof S]?: InputOrigin | { readonly origin: InputOrigin; readonly note: string };
+};
+
+export interface EstimateContext<S extends MethodInputs> {
+  readonly workings?: boolean;
+  /** Where each input came from; `computed` where nothing is said. */
+  readonly origins?: Origins<S>;
+  /** Flags that come from the situation and not from the method's own range. */
+  readonly warnings?: readonly EstimateWarning[];
+  /** Steps that only the caller knows: what was left out, which rule chose an input. */
+  readonly steps?: readonly WorkingStep[];
+  /** The event does not happen: the value is null and this is the reason. */
+  readonly never?: string;
+}
+
+export interface RunOutputs<R> {
+  readonly result: R;
+  of(output: keyof R & string): Estimate;
+}
+
+const NO_WARNINGS: readonly EstimateWarning[] = [];
+
+/** Thrown when a method that refuses to leave its range is asked to: callers look at `rangeFaults` first. */
+export class OutOfRangeError extends Error {
+  override readonly name = 'OutOfRangeError';
+}
+
+/**
+ * Runs a method of one result.
+ * @throws OutOfRangeError when an input is outside the range of a method that refuses, or the result is not finite.
+ */
+export function estimate<S extends MethodInputs>(
+  method: Method<S>,
+  inputs: InputValues<S>,
+  context: EstimateContext<S> = {},
+): Estimate {
+  const warnings = warningsOf(method, inputs, context);
+  const value = method.run(inputs);
+  return assemble(method, inputs, method, value, value, warnings, context);
+}
+
+/** Runs a method of several results once; each is read as an estimate by the name of its field. */
+export function estimateOutputs<S extends MethodInputs, R extends object>(
+  method: Method<S, R>,
+  inputs: InputValues<S>,
+  context: EstimateContext<S> = {},
+): RunOutputs<R> {
+  const warnings = warningsOf(method, inputs, context);
+  const result = method.run(inputs);
+  return {
+    result,
+    of(output) {
+      const spec = method.outputs?.[output];
+      const value: unknown = result[output];
+      if (!spec || typeof value !== 'number') throw new TypeError(`${method.ref} has no output ${output}.`);
+      return assemble(method, inputs, spec, value, result, warnings, context);
+    },
+  };
+}
+
+function warningsOf<S extends MethodInputs, R>(
+  method: Method<S, R>,
+  inputs: InputValues<S>,
+  context: EstimateContext<S>,
+): readonly EstimateWarning[] {
+  const faults = rangeFaults(method, inputs);
+  const extra = context.warnings ?? NO_WARNINGS;
+  if (faults.length === 0) return extra;
+  if (method.outOfRange === 'refuse') {
+    throw new OutOfRangeError(`${method.ref}: ${faults.map((fault) => fault.text).join(' ')}`);
+  }
+  return [...extra, ...faults.map((fault) => ({ code: 'OUT_OF_RANGE', text: fault.text }))];
+}
+
+function assemble<S extends MethodInputs, R>(
+  method: Method<S, R>,
+  inputs: InputValues<S>,
+  output: Pick<MethodOutput, 'symbol' | 'unit'>,
+  value: number,
+  result: R,
+  warnings: readonly EstimateWarning[],
+  context: EstimateContext<S>,
+): Estimate {
+  const never = context.never;
+  if (never === undefined && !Number.isFinite(value)) {
+    throw new OutOfRangeError(`${method.ref} has no finite result for these inputs.`);
+  }
+  const plain = { value: never === undefined ? value : null, unit: output.unit, method: method.ref, warnings };
+  const short = never === undefined ? plain : { ...plain, never };
+  if (!context.workings) return short;
+  return {
+    ...short,
+    title: method.title,
+    symbol: output.symbol,
+    equation: method.equation,
+    inputs: workingInputs(method, inputs, context.origins),
+    steps: [
+      { text: 'The relation', equation: method.equation },
+      ...(context.steps ?? []),
+      ...(method.explain?.(inputs, result) ?? []),
+      { text: never ?? `${output.symbol} =`, value: short.value, unit: output.unit },
+    ],
+    sources: method.sources,
+    assumptions: method.assumptions,
+    why: method.why,
+  };
+}
+
+function workingInputs<S extends MethodInputs, R>(
+  method: Method<S, R>,
+  inputs: InputValues<S>,
+  origins: Origins<S> | undefined,
+): WorkingInput[] {
+  return Object.entries(method.inputs).map(([name, spec]) => {
+    const origin = origins?.[name] ?? 'computed';
+    const value = inputs[name] as number | string | readonly number[];
+    return {
+      name,
+      symbol: spec.symbol,
+      quantity: spec.quantity,
+      unit: 'choices' in spec ? '' : spec.unit,
+      value: Array.isArray(value) ? listText(value as readonly number[]) : (value as number | string),
+      origin: typeof origin === 'string' ? origin : origin.origin,
+      ...(typeof origin === 'string' ? {} : { note: origin.note }),
+      ...('choices' in spec ? {} : { valid: rangeText(spec.valid) }),
+    };
+  });
+}
+
+/** A list in a working: the first few values, then how many more. */
+function listText(values: readonly number[]): string {
+  const SHOWN = 12;
+  if (values.length === 0) return 'none';
+  const first = values.slice(0, SHOWN).map(figure).join('; ');
+  return values.length <= SHOWN ? first : `${first}; … ${values.length - SHOWN} more`;
 }

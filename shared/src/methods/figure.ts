@@ -1,0 +1,10 @@
+/**
+ * A number as a working prints it: five significant figures, no trailing zeros, no exponent between 1e-4 and 1e9.
+ * Screens format the values of an estimate themselves; this is for sentences inside steps and warnings.
+ */
+export function figure(value: number): string {
+  if (value === 0) return '0';
+  const size = Math.abs(value);
+  if (size >= 1e9 || size < 1e-4) return value.toExponential(3);
+  return String(Number(value.toPrecision(5)));
+}
