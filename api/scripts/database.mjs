@@ -30,7 +30,7 @@ export async function database(root, dataFolder) {
   }
   ensurePostgres();
   const cluster = await startCluster({
-    folder: clusterFolder(root),
+    folder: clusterFolder(dataFolder),
     passwordFile: join(dataFolder, 'postgres-password'),
   });
   const { ownerPassword, appPassword } = secrets(dataFolder);

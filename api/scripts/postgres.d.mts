@@ -6,7 +6,7 @@ export interface Cluster {
   readonly stop: () => void;
 }
 export function ensurePostgres(): void;
-export function clusterFolder(root: string): string;
+export function clusterFolder(dataFolder: string): string;
 export function startCluster(options: { folder: string; passwordFile: string; throwaway?: boolean }): Promise<Cluster>;
 export function stopCluster(folder: string): void;
 export function serverUrl(user: string, password: string, port: number, database: string): string;

@@ -54,9 +54,9 @@ function ownFolder(folder) {
   chmodSync(folder, 0o700);
 }
 
-/** `.data/postgres` when the database user can reach it, otherwise a folder of its own under /var/lib/postgresql. */
-export function clusterFolder(root) {
-  const wanted = join(root, '.data', 'postgres');
+/** `postgres` in the data folder when the database user can reach it, otherwise a folder of its own under /var/lib/postgresql. */
+export function clusterFolder(dataFolder) {
+  const wanted = join(dataFolder, 'postgres');
   if (identity().uid === undefined) return wanted;
   mkdirSync(dirname(wanted), { recursive: true });
   let folder = dirname(wanted);
@@ -66,7 +66,7 @@ export function clusterFolder(root) {
     folder = dirname(folder);
   }
   if (reachable) return wanted;
-  return `/var/lib/postgresql/embertally-${createHash('sha256').update(resolve(root)).digest('hex').slice(0, 12)}`;
+  return `/var/lib/postgresql/embertally-${createHash('sha256').update(resolve(dataFolder)).digest('hex').slice(0, 12)}`;
 }
 
 async function freePort() {
