@@ -114,6 +114,7 @@ export interface Kind {
   readonly peak_kW: number | null;
   readonly radiative_fraction: number | null;
   readonly ignition_class: IgnitionClass;
+  /** How it is usually kept; a person can say otherwise for the entry. */
   readonly enclosure: Enclosure;
   readonly keeping: Keeping;
   readonly measure: KindMeasure;
