@@ -1,7 +1,8 @@
 import type { FontBook, Weight } from './font-book.ts';
 import { printableText } from './printable-text.ts';
 
-const WORD = /\s*[^\s\-–—/·,;]*[-–—/·,;]?/gu;
+/** A stretch that is not broken, with the spaces before it; no-break spaces are part of the word. */
+const WORD = /[ \u2000-\u200a\u3000]*[^ \u2000-\u200a\u3000\-–—/·,;]*[-–—/·,;]?/gu;
 const IDEOGRAPH = /[\u2e80-\u9fff\uac00-\ud7af\uf900-\ufaff\uff00-\uffef\u{20000}-\u{3ffff}]/u;
 const LETTER = /[\p{L}\p{N}]/u;
 

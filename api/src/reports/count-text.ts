@@ -1,0 +1,4 @@
+/** "1 room", "14 rooms", "no rooms". */
+export function countText(count: number, one: string, many = `${one}s`): string {
+  return `${count === 0 ? 'no' : count} ${count === 1 ? one : many}`;
+}
