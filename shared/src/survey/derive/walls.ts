@@ -23,7 +23,8 @@ export function wallsByKey(document: SurveyDocument, storeyId: string): Readonly
   let byCorners = known.get(document.rooms);
   if (byCorners === undefined) known.set(document.rooms, (byCorners = new WeakMap()));
   let byStorey = byCorners.get(document.corners);
-  if (byStorey === undefined) byCorners.set(document.corners, (byStorey = new Map()));
+  if (byStorey === undefined)
+    byCorners.set(document.corners, (byStorey = new Map<string, ReadonlyMap<string, Wall>>()));
   let found = byStorey.get(storeyId);
   if (found === undefined) byStorey.set(storeyId, (found = deriveWalls(document, storeyId)));
   return found;
