@@ -1,0 +1,152 @@
+import { useState, type SubmitEvent } from 'react';
+import { ContractError, OfflineError, ProblemError, UnprocessableError } from '../lib/api-errors.ts';
+import { draftOf } from '../lib/draft.ts';
+import { useErrorTitle } from '../lib/page-title.ts';
+import { ToldError } from '../lib/told-error.ts';
+import type { SummaryError } from './error-summary.tsx';
+
+type Texts<V> = { readonly [K in keyof V]: string };
+export type FieldErrors<V> = { readonly [K in keyof V]?: string };
+
+interface FormOptions<V extends Texts<V>> {
+  /** Names the form: ids of its fields, and its draft. */
+  readonly name: string;
+  readonly initial: V;
+  /** Everything wrong with what was typed, in words that say how to put it right. */
+  readonly validate: (values: V) => FieldErrors<V>;
+  readonly submit: (values: V) => Promise<void>;
+  /** Fields to keep through a reload until the form is sent. Never a password. */
+  readonly keep?: readonly (keyof V & string)[];
+}
+
+interface FieldTies {
+  readonly id: string;
+  readonly name: string;
+  readonly value: string;
+  readonly error: string | undefined;
+  readonly onChange: (value: string) => void;
+}
+
+export interface Form<V extends Texts<V>> {
+  readonly values: V;
+  readonly set: <K extends keyof V & string>(name: K, value: V[K]) => void;
+  /** What a text field needs, its error included. */
+  readonly field: (name: keyof V & string) => FieldTies;
+  readonly summary: { readonly errors: readonly SummaryError[]; readonly attempt: number };
+  readonly busy: boolean;
+  /** Empties the form back to how it began, for the next one. */
+  readonly reset: () => void;
+  readonly onSubmit: (event: SubmitEvent) => void;
+}
+
+function isForeseen(error: unknown): error is Error {
+  return error instanceof OfflineError || error instanceof ProblemError || error instanceof ToldError;
+}
+
+function pick<V extends object>(values: V, names: readonly (keyof V)[]): Partial<V> {
+  const picked: Partial<V> = {};
+  for (const name of names) picked[name] = values[name];
+  return picked;
+}
+
+/** The words for a failure that belongs to the whole form. */
+function wholeFormMessage(error: unknown): string {
+  if (isForeseen(error)) return error.message;
+  if (error instanceof ContractError) {
+    return 'The server answered unexpectedly, so it is not known whether this was saved. Reload the page to see.';
+  }
+  return 'Something went wrong on this page. What you typed is kept; try again.';
+}
+
+/**
+ * A form that is checked when it is sent, loses nothing that was typed, and shows every fault at its field and in the
+ * summary in the same words, whether found here or by the server. A fault at a field goes when the field is changed.
+ */
+export function useForm<V extends Texts<V>>(options: FormOptions<V>): Form<V> {
+  const [draft] = useState(() => draftOf<V>(options.name));
+  const [values, setValues] = useState<V>(() =>
+    options.keep ? { ...options.initial, ...draft.read() } : options.initial,
+  );
+  const [errors, setErrors] = useState<FieldErrors<V>>({});
+  const [whole, setWhole] = useState<readonly string[]>([]);
+  const [attempt, setAttempt] = useState(0);
+  const [busy, setBusy] = useState(false);
+  const fieldId = (name: string) => `${options.name}-${name}`;
+  const faults = Object.entries<string | undefined>(errors);
+  const summaryErrors: SummaryError[] = [
+    ...whole.map((message) => ({ fieldId: null, message })),
+    ...faults.flatMap(([name, message]) => (message === undefined ? [] : [{ fieldId: fieldId(name), message }])),
+  ];
+  useErrorTitle(summaryErrors.length > 0);
+
+  const set = <K extends keyof V & string>(name: K, value: V[K]) => {
+    const next = { ...values, [name]: value };
+    setValues(next);
+    setErrors(({ [name]: _gone, ...rest }) => rest as FieldErrors<V>);
+    if (options.keep) draft.keep(pick(next, options.keep));
+  };
+
+  const refuse = (fieldErrors: FieldErrors<V>, messages: readonly string[]) => {
+    setErrors(fieldErrors);
+    setWhole(messages);
+    setAttempt((count) => count + 1);
+  };
+
+  const refuseByServer = (error: unknown) => {
+    if (!(error instanceof UnprocessableError)) {
+      // A failure nobody foresaw is still reported, beside the words for the person.
+      if (!isForeseen(error)) reportError(error);
+      refuse({}, [wholeFormMessage(error)]);
+      return;
+    }
+    const byField: Record<string, string> = {};
+    const rest: string[] = [];
+    for (const fault of error.problem.errors ?? []) {
+      const name = fault.pointer.split('/')[1] ?? '';
+      if (name in values && byField[name] === undefined) byField[name] = fault.message;
+      else rest.push(fault.message);
+    }
+    refuse(byField, rest.length === 0 && Object.keys(byField).length === 0 ? [error.problem.detail] : rest);
+  };
+
+  const send = async () => {
+    setBusy(true);
+    setWhole([]);
+    try {
+      await options.submit(values);
+      draft.forget();
+    } catch (error) {
+      refuseByServer(error);
+    } finally {
+      setBusy(false);
+    }
+  };
+
+  return {
+    values,
+    set,
+    field: (name) => ({
+      id: fieldId(name),
+      name,
+      value: values[name],
+      error: errors[name],
+      onChange: (value) => {
+        set(name, value as V[typeof name]);
+      },
+    }),
+    summary: { errors: summaryErrors, attempt },
+    busy,
+    reset: () => {
+      setValues(options.initial);
+      setErrors({});
+      setWhole([]);
+    },
+    onSubmit: (event) => {
+      event.preventDefault();
+      if (busy) return;
+      const found = options.validate(values);
+      if (Object.values(found).some((message) => message !== undefined)) refuse(found, []);
+      else void send();
+    },
+  };
+}
