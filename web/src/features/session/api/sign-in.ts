@@ -1,0 +1,16 @@
+import { signIn as contract, type Me } from '@embertally/shared/contracts/sessions';
+import type { QueryClient } from '@tanstack/react-query';
+import { call } from '../../../lib/api-client.ts';
+import { sessionEnded } from '../../../lib/session-ended.ts';
+import { currentSessionQuery } from './current-session.ts';
+
+/** Begins a session and puts the person in place for every screen. */
+export async function signIn(
+  client: QueryClient,
+  input: { readonly email: string; readonly password: string },
+): Promise<Me> {
+  const me = await call(contract, { body: input });
+  client.setQueryData(currentSessionQuery().queryKey, me);
+  sessionEnded.set(false);
+  return me;
+}

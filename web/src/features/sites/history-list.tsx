@@ -1,0 +1,55 @@
+import { useInfiniteQuery } from '@tanstack/react-query';
+import { Button } from '../../components/button.tsx';
+import { LoadFailed } from '../../components/load-failed.tsx';
+import { Skeleton } from '../../components/skeleton.tsx';
+import { siteHistoryQuery } from './api/site-history.ts';
+import { historySentence } from './history-sentence.ts';
+
+interface HistoryListProps {
+  readonly siteId: string;
+  /** The site's own: its days and hours. */
+  readonly timeZone: string;
+}
+
+/** What was done on a site, newest first. */
+export function HistoryList({ siteId, timeZone }: HistoryListProps) {
+  const history = useInfiniteQuery(siteHistoryQuery(siteId));
+  if (history.isPending) return <Skeleton label="Reading what was done here" lines={4} />;
+  if (history.isError) {
+    return (
+      <div className="mt-4">
+        <LoadFailed
+          what="The history"
+          error={history.error}
+          retrying={history.isFetching}
+          onRetry={() => void history.refetch()}
+        />
+      </div>
+    );
+  }
+  const events = history.data.pages.flatMap((page) => page.items);
+  if (events.length === 0) return <p className="py-3 text-soft">Nothing has been done here yet.</p>;
+  const time = new Intl.DateTimeFormat(undefined, { dateStyle: 'medium', timeStyle: 'short', timeZone });
+  return (
+    <>
+      <ol>
+        {events.map((event) => (
+          <li key={event.position} className="border-b border-rule py-2.5">
+            <p>{historySentence(event)}</p>
+            <p className="text-small text-soft">
+              {event.by === null ? '' : `${event.by.organisation_name} · `}
+              <time dateTime={event.at}>{time.format(new Date(event.at))}</time>
+            </p>
+          </li>
+        ))}
+      </ol>
+      {history.hasNextPage ? (
+        <div className="pt-3">
+          <Button size="small" busy={history.isFetchingNextPage} onClick={() => void history.fetchNextPage()}>
+            Show earlier
+          </Button>
+        </div>
+      ) : null}
+    </>
+  );
+}
