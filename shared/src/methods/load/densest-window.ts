@@ -1,0 +1,174 @@
+import { footprint, type Footprint } from '../../geometry/footprint.ts';
+import type { Ring } from '../../geometry/point.ts';
+import { overlapArea } from './overlap-area.ts';
+
+export interface PlacedLoad {
+  /** MJ */
+  readonly heat: number;
+  readonly footprint: Footprint;
+}
+
+export interface DensestWindow {
+  /** MJ/m² */
+  readonly density: number;
+  /** Lower left corner, m. */
+  readonly x: number;
+  readonly y: number;
+}
+
+interface Box {
+  readonly heat: number;
+  readonly x0: number;
+  readonly x1: number;
+  readonly y0: number;
+  readonly y1: number;
+  readonly area: number;
+  /** For a footprint that is turned off the axes. */
+  readonly ring: Ring | undefined;
+}
+
+interface Position {
+  readonly heat: number;
+  readonly x: number;
+  readonly y: number;
+}
+
+const SIDE_M = 2;
+const REFINED = 8;
+const FINEST_STEP_M = 0.002;
+
+/**
+ * The window of 2 × 2 m with the most heat. For footprints along the axes the heat inside a window is piecewise
+ * bilinear in its position, so the maximum lies where a window edge meets a footprint edge from inside: every such
+ * column is swept exactly. Turned footprints take part in the sweep as their bounding boxes; the best columns are then
+ * measured exactly and improved step by step.
+ */
+export function densestWindow(loads: readonly PlacedLoad[]): DensestWindow {
+  const boxes = loads.filter(({ heat }) => heat > 0).map(boxOf);
+  const turned = boxes.some(({ ring }) => ring !== undefined);
+  const swept = sweep(boxes, turned ? REFINED : 1);
+  if (swept.length === 0) return { density: 0, x: 0, y: 0 };
+  const best = turned ? swept.map((position) => climb(boxes, position)).reduce(hotter) : swept.reduce(hotter);
+  return { density: best.heat / (SIDE_M * SIDE_M), x: best.x, y: best.y };
+}
+
+function hotter(a: Position, b: Position): Position {
+  return b.heat > a.heat ? b : a;
+}
+
+function boxOf({ heat, footprint: rectangle }: PlacedLoad): Box {
+  const corners = footprint(rectangle);
+  const xs = corners.map(({ x_m }) => x_m);
+  const ys = corners.map(({ y_m }) => y_m);
+  const quarter = Math.abs(((rectangle.rotation_deg % 90) + 90) % 90);
+  const turned = Math.min(quarter, 90 - quarter) > 1e-6;
+  return {
+    heat,
+    x0: Math.min(...xs),
+    x1: Math.max(...xs),
+    y0: Math.min(...ys),
+    y1: Math.max(...ys),
+    area: rectangle.width_m * rectangle.depth_m,
+    ring: turned ? corners : undefined,
+  };
+}
+
+/** The best position of every promising column, best columns first, a few at most. */
+function sweep(boxes: readonly Box[], keep: number): Position[] {
+  const columns = new Set<number>();
+  for (const { x0, x1 } of boxes) columns.add(x0).add(x1 - SIDE_M);
+  const events = yEvents(boxes);
+  const weights = new Float64Array(boxes.length);
+  let kept: Position[] = [];
+  for (const x of columns) {
+    let strip = 0;
+    for (let i = 0; i < boxes.length; i += 1) {
+      const { x0, x1, heat } = boxes[i]!;
+      const across = Math.min(x1, x + SIDE_M) - Math.max(x0, x);
+      const share = across > 0 ? (heat * across) / (x1 - x0) : 0;
+      weights[i] = share / (boxes[i]!.y1 - boxes[i]!.y0);
+      strip += share;
+    }
+    const worst = kept.length < keep ? 0 : kept[kept.length - 1]!.heat;
+    if (strip <= worst) continue;
+    const best = sweepColumn(x, events, weights);
+    if (best.heat > worst) kept = [...kept, best].sort((a, b) => b.heat - a.heat).slice(0, keep);
+  }
+  return kept;
+}
+
+interface Events {
+  readonly at: Float64Array;
+  readonly box: Int32Array;
+  readonly sign: Int8Array;
+}
+
+/** Where the slope of a box's share in a window changes as the window moves up: rises, flat, falls. */
+function yEvents(boxes: readonly Box[]): Events {
+  const raw = boxes.flatMap(({ y0, y1 }, box) => [
+    { at: y0 - SIDE_M, box, sign: 1 },
+    { at: Math.min(y0, y1 - SIDE_M), box, sign: -1 },
+    { at: Math.max(y0, y1 - SIDE_M), box, sign: -1 },
+    { at: y1, box, sign: 1 },
+  ]);
+  raw.sort((a, b) => a.at - b.at);
+  return {
+    at: Float64Array.from(raw, (event) => event.at),
+    box: Int32Array.from(raw, (event) => event.box),
+    sign: Int8Array.from(raw, (event) => event.sign),
+  };
+}
+
+function sweepColumn(x: number, { at, box, sign }: Events, weights: Float64Array): Position {
+  let best: Position = { heat: 0, x, y: at[0] ?? 0 };
+  let bestHeat = 0;
+  let bestAt = -1;
+  let heat = 0;
+  let slope = 0;
+  let previous = 0;
+  for (let i = 0; i < at.length; i += 1) {
+    const weight = weights[box[i]!]!;
+    if (weight === 0) continue;
+    const y = at[i]!;
+    if (slope !== 0) heat += slope * (y - previous);
+    previous = y;
+    slope += sign[i]! * weight;
+    if (heat > bestHeat) {
+      bestHeat = heat;
+      bestAt = i;
+    }
+  }
+  if (bestAt >= 0) best = { heat: bestHeat, x, y: at[bestAt]! };
+  return best;
+}
+
+/** Heat inside the window at a position, turned footprints by their true outline. */
+function heatInside(boxes: readonly Box[], x: number, y: number): number {
+  let sum = 0;
+  for (const { heat, x0, x1, y0, y1, area, ring } of boxes) {
+    const across = Math.min(x1, x + SIDE_M) - Math.max(x0, x);
+    const along = Math.min(y1, y + SIDE_M) - Math.max(y0, y);
+    if (across <= 0 || along <= 0) continue;
+    const inside = ring === undefined ? across * along : overlapArea(ring, x, y, x + SIDE_M, y + SIDE_M);
+    sum += heat * Math.min(1, inside / area);
+  }
+  return sum;
+}
+
+function climb(boxes: readonly Box[], start: Position): Position {
+  let best: Position = { ...start, heat: heatInside(boxes, start.x, start.y) };
+  for (let step = SIDE_M / 4; step > FINEST_STEP_M;) {
+    const next = [
+      [step, 0],
+      [-step, 0],
+      [0, step],
+      [0, -step],
+    ]
+      .map(([dx, dy]) => ({ x: best.x + dx!, y: best.y + dy! }))
+      .map(({ x, y }) => ({ x, y, heat: heatInside(boxes, x, y) }))
+      .reduce(hotter);
+    if (next.heat > best.heat) best = next;
+    else step /= 2;
+  }
+  return best;
+}
