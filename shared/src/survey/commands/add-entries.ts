@@ -3,6 +3,7 @@ import { finish } from '../draft/finish.ts';
 import { rounded } from '../draft/rounded.ts';
 import { SurveyDraft } from '../draft/survey-draft.ts';
 import { entryViolations } from '../invariants/entry-violations.ts';
+import { ENTRY_LENGTHS } from '../entry-lengths.ts';
 import { refuse } from '../refuse.ts';
 import { rowRefusal } from '../row-fault.ts';
 import type { Entry } from '../survey-document.ts';
@@ -12,9 +13,6 @@ export interface AddEntriesInput {
   /** As `newEntryFromKind` or `newEntryFromMaterial` makes them. */
   readonly entries: readonly Entry[];
 }
-
-/** The lengths of an entry, rounded when a command commits them. */
-export const ENTRY_LENGTHS = ['x_m', 'y_m', 'base_height_m', 'width_m', 'depth_m', 'height_m'] as const;
 
 /** Records contents. All of them or, when one cannot be, none. */
 export const addEntries: Command<AddEntriesInput> = (document, input) => {

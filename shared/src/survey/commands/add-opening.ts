@@ -5,6 +5,7 @@ import { finish } from '../draft/finish.ts';
 import { rounded } from '../draft/rounded.ts';
 import { SurveyDraft } from '../draft/survey-draft.ts';
 import { openingFits } from '../invariants/opening-violations.ts';
+import { OPENING_LENGTHS } from '../opening-lengths.ts';
 import { refuse } from '../refuse.ts';
 import { rowRefusal } from '../row-fault.ts';
 import type { Opening } from '../survey-document.ts';
@@ -13,9 +14,6 @@ export interface AddOpeningInput {
   /** As `newOpening` makes it. */
   readonly opening: Opening;
 }
-
-/** The lengths of an opening, rounded when a command commits them. */
-export const OPENING_LENGTHS = ['offset_m', 'width_m', 'height_m', 'sill_m'] as const;
 
 /** Puts an opening in a wall. */
 export const addOpening: Command<AddOpeningInput> = (document, input) => {
