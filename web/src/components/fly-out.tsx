@@ -1,7 +1,7 @@
 import { useId, type ReactNode } from 'react';
 
 interface FlyOutProps {
-  /** What the button shows. */
+  /** What the button shows; seen, not heard. */
   readonly button: ReactNode;
   /** What the button is called. */
   readonly label: string;
@@ -16,8 +16,9 @@ export function FlyOut({ button, label, children }: FlyOutProps) {
   const id = `fly-out-${useId().replaceAll(/[^\w-]/g, '')}`;
   return (
     <>
-      <button type="button" className="button" data-look="quiet" aria-label={label} popoverTarget={id}>
-        {button}
+      <button type="button" className="button" data-look="quiet" popoverTarget={id}>
+        <span aria-hidden="true">{button}</span>
+        <span className="unseen">{label}</span>
       </button>
       <div
         id={id}

@@ -31,13 +31,12 @@ export function PasswordField({ autoComplete, name, value, onChange, ...frame }:
           <button
             type="button"
             className="field-inside"
-            aria-pressed={shown}
-            aria-label="Show password"
             onClick={() => {
               setShown(!shown);
             }}
           >
             {shown ? 'Hide' : 'Show'}
+            <span className="unseen"> password</span>
           </button>
         </div>
       )}

@@ -72,7 +72,7 @@ export function Table<Row>(props: TableProps<Row>) {
                   data-align={column.numeric ? 'end' : undefined}
                   data-empty={column.emptyOnNarrow?.(row) ? 'yes' : undefined}
                 >
-                  {column.cell(row)}
+                  <div>{column.cell(row)}</div>
                 </td>
               ),
             )}

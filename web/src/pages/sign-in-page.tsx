@@ -26,9 +26,14 @@ export function SignInPage() {
         />
       ) : null}
       <SignInForm onSignedIn={() => void navigate(next, { replace: true })} />
-      <p className="border-t border-rule pt-4">
-        New here? <Link to={paths.signUp()}>Sign up and make an organisation</Link>
-      </p>
+      <div className="grid gap-1 border-t border-rule pt-4">
+        <p>
+          New here? <Link to={paths.signUp()}>Sign up and make an organisation</Link>
+        </p>
+        <p>
+          What results may be used for: <Link to={paths.cautions()}>the cautions</Link>
+        </p>
+      </div>
     </div>
   );
 }

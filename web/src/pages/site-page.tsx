@@ -69,7 +69,11 @@ export function SitePage() {
   const mayBuild = canOnSite(standing, 'building.create');
   const mayGive = canOnSite(standing, 'site-role.give');
   const newBuilding = (
-    <Button look={data.building_list.length === 0 ? 'primary' : 'secondary'} onClick={() => setMaking(true)}>
+    <Button
+      look={data.building_list.length === 0 ? 'primary' : 'secondary'}
+      size={data.building_list.length === 0 ? 'normal' : 'small'}
+      onClick={() => setMaking(true)}
+    >
       New building
     </Button>
   );

@@ -62,12 +62,15 @@ export function PeopleList({ siteId, people, mayTake }: PeopleListProps) {
               {mayTake ? (
                 <Button
                   look="quiet"
-                  aria-label={`Take the role ${person.role} from ${person.name}`}
                   onClick={() => {
                     setAsked(person);
                   }}
                 >
                   Take away
+                  <span className="unseen">
+                    {' '}
+                    the role {person.role} from {person.name}
+                  </span>
                 </Button>
               ) : null}
             </div>

@@ -10,7 +10,7 @@ interface StandingCountsProps {
 export function StandingCounts({ rooms, over, near }: StandingCountsProps) {
   if (over === 0 && near === 0) return <span className="text-soft">{rooms === 0 ? '–' : 'none near or over'}</span>;
   return (
-    <span className="inline-flex flex-wrap justify-end gap-1.5">
+    <span className="inline-flex flex-wrap items-center gap-1.5">
       {over > 0 ? <StandingMark standing="over" count={over} /> : null}
       {near > 0 ? <StandingMark standing="near" count={near} /> : null}
     </span>

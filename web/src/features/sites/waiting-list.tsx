@@ -26,7 +26,9 @@ export function WaitingList({ sites }: WaitingListProps) {
             <Link to={paths.site(site.id)} className="text-lead font-bold">
               {site.name}
             </Link>
-            <p className="text-soft">Rooms near or over a limit that somebody set · you are {site.my_role} here</p>
+            <p className="text-soft">
+              {site.rooms} rooms · you are {site.my_role} here
+            </p>
           </div>
           <StandingCounts rooms={site.rooms} over={site.rooms_over} near={site.rooms_near} />
         </li>

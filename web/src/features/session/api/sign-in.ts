@@ -2,6 +2,7 @@ import { signIn as contract, type Me } from '@embertally/shared/contracts/sessio
 import type { QueryClient } from '@tanstack/react-query';
 import { call } from '../../../lib/api-client.ts';
 import { sessionEnded } from '../../../lib/session-ended.ts';
+import { sessionHint } from '../../../lib/session-hint.ts';
 import { currentSessionQuery } from './current-session.ts';
 
 /** Begins a session and puts the person in place for every screen. */
@@ -11,6 +12,7 @@ export async function signIn(
 ): Promise<Me> {
   const me = await call(contract, { body: input });
   client.setQueryData(currentSessionQuery().queryKey, me);
+  sessionHint.set(true);
   sessionEnded.set(false);
   return me;
 }
