@@ -150,12 +150,18 @@ function workingInputs<S extends MethodInputs, R>(
       symbol: spec.symbol,
       quantity: spec.quantity,
       unit: 'choices' in spec ? '' : spec.unit,
-      value: Array.isArray(value) ? listText(value as readonly number[]) : (value as number | string),
+      value: shown(value),
       origin: typeof origin === 'string' ? origin : origin.origin,
       ...(typeof origin === 'string' ? {} : { note: origin.note }),
       ...('choices' in spec ? {} : { valid: rangeText(spec.valid) }),
     };
   });
+}
+
+/** A limit that is not there is infinite inside; JSON has no word for that. */
+function shown(value: number | string | readonly number[]): number | string {
+  if (typeof value === 'number') return Number.isFinite(value) ? value : 'none';
+  return typeof value === 'string' ? value : listText(value);
 }
 
 /** A list in a working: the first few values, then how many more. */

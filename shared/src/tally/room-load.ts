@@ -1,4 +1,4 @@
-import { estimate, type Estimate } from '../methods/estimate.ts';
+import { estimate, type Estimate, type EstimateWarning } from '../methods/estimate.ts';
 import { fireLoad } from '../methods/load/fire-load.ts';
 import type { EntryHeat, EntryPartHeat } from './entry-heats.ts';
 import type { EntryShare, MaterialShare } from './room-tally.ts';
@@ -10,7 +10,11 @@ interface CountedPart {
 }
 
 /** Σ count · mass · H · ψ over some parts, as an estimate. */
-export function sumOfParts(parts: readonly CountedPart[], context: TallyContext): Estimate {
+export function sumOfParts(
+  parts: readonly CountedPart[],
+  context: TallyContext,
+  warnings: readonly EstimateWarning[] = [],
+): Estimate {
   return estimate(
     fireLoad,
     {
@@ -21,6 +25,7 @@ export function sumOfParts(parts: readonly CountedPart[], context: TallyContext)
     },
     {
       workings: context.workings,
+      warnings,
       origins: {
         n: 'given',
         M: 'given',

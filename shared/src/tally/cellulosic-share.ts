@@ -1,0 +1,17 @@
+import type { EntryHeat } from './entry-heats.ts';
+
+/** Below this share of the heat the parametric curve is not used; our own threshold from common practice. */
+export const LEAST_CELLULOSIC = 0.8;
+
+/** Share of the heat that is cellulosic, 0 to 1; 1 while nothing burns. */
+export function cellulosicShare(heats: readonly EntryHeat[]): number {
+  let cellulosic = 0;
+  let all = 0;
+  for (const { parts } of heats) {
+    for (const part of parts) {
+      all += part.counted;
+      if (part.cellulosic) cellulosic += part.counted;
+    }
+  }
+  return all > 0 ? cellulosic / all : 1;
+}

@@ -1,0 +1,80 @@
+import type { RoomInput } from '@embertally/shared/tally/room-input';
+
+const slab = {
+  layers: [{ thickness_m: 0.2, conductivity_W_mK: 1.6, density_kg_m3: 2300, specific_heat_J_kgK: 1000 }],
+};
+
+/** A scenery dock of 12 × 8 m with one stack of timber flats; timber at 16.8 MJ/kg of the person's own. */
+export const SCENERY_DOCK: RoomInput = {
+  room: {
+    name: 'Scenery dock',
+    use: 'theatre',
+    ring_m: [
+      [0, 0],
+      [12, 0],
+      [12, 8],
+      [0, 8],
+    ],
+    holes_m: [],
+    height_m: 3.6,
+    lining: { walls: slab, ceiling: slab, floor: slab },
+    openings: [{ width_m: 2, height_m: 2.4, sill_m: 0, state: 'open', leads_to: 'outside' }],
+    roof_vents_m2: 0,
+    roof_vents_state: 'fails',
+    protection: {
+      sprinklers: { rti: 50, activation_C: 68, distance_m: 2.5 },
+      independent_water_supplies: 0,
+      detection: 'smoke',
+      alarm_to_brigade: true,
+      brigade: 'off-site',
+      access_routes: 'normal',
+      firefighting_devices: 'yes',
+      stair_smoke_exhaust: 'not-applicable',
+    },
+    danger_of_activation: 1,
+    rating_min: 60,
+  },
+  contents: [
+    {
+      id: 'a',
+      label: 'Timber flats',
+      count: 40,
+      keeping: 'stored',
+      enclosure: 'open',
+      evidence: 'counted',
+      parts: [
+        { material: 'timber', net_heat_MJ_kg: 16.8, mass_kg: 18 },
+        { net_heat_MJ_kg: 16.3, label: 'canvas', mass_kg: 2 },
+      ],
+      x_m: 2,
+      y_m: 3,
+      rotation_deg: 0,
+      base_height_m: 0,
+      width_m: 2.4,
+      depth_m: 1.2,
+      height_m: 2,
+      growth: 'fast',
+      peak_kW: 2500,
+      radiative_fraction: 0.35,
+      ignition_class: 'hard',
+    },
+  ],
+  limits: [{ quantity: 'load_per_floor_MJ_m2', bound: 900, set_by: 'permit 12/7' }],
+  options: {
+    growth: 'medium',
+    growth_convention: 'EN',
+    plateau_kW_m2: 250,
+    fire_area_m2: null,
+    combustion_factor: 0.8,
+    load_basis: 'as_surveyed',
+    protected_loads: '0.85',
+    exposure_s: 600,
+    kb: 'EN',
+    kc: 1,
+    ambient_C: 20,
+    samples: 0,
+    seed: 1,
+    time_limit_min: null,
+    first_entry: null,
+  },
+};
