@@ -1,0 +1,89 @@
+import 'konva/lib/Core';
+import { formatQuantity } from '@embertally/shared/units/format-quantity';
+import { useSyncExternalStore } from 'react';
+import { Stage } from 'react-konva/lib/ReactKonvaCore';
+import type { PlanHost } from '../interaction/plan-host.ts';
+import { useBook } from '../session/use-book.ts';
+import { paintCrosshair } from './paint-crosshair.ts';
+import { paintFurniture } from './paint-furniture.ts';
+import { paintGrid } from './paint-grid.ts';
+import { paintPreview } from './paint-preview.ts';
+import { paintSelection } from './paint-selection.ts';
+import { Painting } from './painting.tsx';
+import type { Palette } from './palette.ts';
+import { PlanLayer } from './plan-layer.tsx';
+import { usePalette } from './use-palette.ts';
+
+/** The plan as a picture: four layers, drawn and never asked. */
+export function PlanStage({ host }: { readonly host: PlanHost }) {
+  const view = useBook((state) => state.view);
+  const palette = usePalette();
+  if (view.width === 0 || view.height === 0) return null;
+  return (
+    <Stage width={view.width} height={view.height} listening={false}>
+      <Backdrop palette={palette} />
+      <PlanLayer host={host} palette={palette} />
+      <Active host={host} palette={palette} />
+      <Overlay palette={palette} />
+    </Stage>
+  );
+}
+
+function Backdrop({ palette }: { readonly palette: Palette }) {
+  const camera = useBook((state) => state.camera);
+  const view = useBook((state) => state.view);
+  return <Painting camera={camera} view={view} palette={palette} paint={paintGrid} />;
+}
+
+/** What is picked and what a gesture would do. */
+function Active({ host, palette }: { readonly host: PlanHost; readonly palette: Palette }) {
+  const camera = useBook((state) => state.camera);
+  const view = useBook((state) => state.view);
+  const document = useBook((state) => state.document);
+  const storeyId = useBook((state) => state.storeyId);
+  const selection = useBook((state) => state.selection);
+  const canEdit = useBook((state) => state.canEdit);
+  const units = useBook((state) => state.units);
+  const preview = useSyncExternalStore(host.preview.subscribe, host.preview.get);
+  const crosshair = useSyncExternalStore(host.crosshair.subscribe, host.crosshair.get);
+  const wallThickness_m = (storeyId === null ? null : document.storeys.get(storeyId)?.wall_thickness_m) ?? 0;
+  const lengthText = (length_m: number) => {
+    const { text, unit } = formatQuantity(length_m, 'm', units);
+    return `${text} ${unit}`;
+  };
+  // While things are being moved the handles would only be in the way.
+  const busy = preview.entries !== undefined || preview.changes !== undefined;
+  return (
+    <Painting
+      camera={camera}
+      view={view}
+      palette={palette}
+      paint={(pen) => {
+        if (storeyId !== null && !busy) paintSelection(pen, { document, storeyId, selection, lengthText, canEdit });
+        paintPreview(pen, preview, { wallThickness_m, lengthText });
+        if (crosshair !== null) paintCrosshair(pen, crosshair);
+      }}
+    />
+  );
+}
+
+/** Scale bar and north stand still over the plan. */
+function Overlay({ palette }: { readonly palette: Palette }) {
+  const camera = useBook((state) => state.camera);
+  const view = useBook((state) => state.view);
+  const units = useBook((state) => state.units);
+  const north = useBook((state) => state.document.storeys.get(state.storeyId ?? '')?.north_deg ?? null);
+  return (
+    <Painting
+      camera={camera}
+      view={view}
+      palette={palette}
+      paint={(pen) => {
+        paintFurniture(pen, north, (length_m) => {
+          const { text, unit } = formatQuantity(length_m, 'm', units, { figures: 'as entered' });
+          return `${text} ${unit}`;
+        });
+      }}
+    />
+  );
+}

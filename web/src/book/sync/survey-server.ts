@@ -1,0 +1,16 @@
+import { applyChangeSet, readChanges, type FedChangeSet } from '@embertally/shared/contracts/surveys';
+import type { ChangeSetBody, Changes } from '@embertally/shared/survey/change';
+import { call } from '../../lib/api-client.ts';
+
+/** One survey on the server, as saving sees it. */
+export interface SurveyServer {
+  send(set: ChangeSetBody): Promise<{ readonly sequence: number; readonly changes: Changes }>;
+  changesAfter(sequence: number): Promise<{ readonly items: readonly FedChangeSet[]; readonly more: boolean }>;
+}
+
+export function surveyServer(surveyId: string): SurveyServer {
+  return {
+    send: (body) => call(applyChangeSet, { params: { surveyId }, body }),
+    changesAfter: (after) => call(readChanges, { params: { surveyId }, query: { after } }),
+  };
+}
