@@ -24,6 +24,7 @@ export interface Contract<
   Q extends Schema | undefined = Schema | undefined,
   B extends Schema | undefined = Schema | undefined,
   R extends Schema | undefined = Schema | undefined,
+  K extends RoutePolicy = RoutePolicy,
 > {
   /** Noun and verb, as `sites.create`. */
   readonly id: string;
@@ -31,16 +32,22 @@ export interface Contract<
   /** Express form: `/api/sites/:siteId`. */
   readonly path: string;
   readonly summary: string;
-  readonly policy: RoutePolicy;
+  readonly policy: K;
   readonly params?: P;
   readonly query?: Q;
   readonly body?: B;
+  /** What the body looks like in the description, where the service lists the faults of a looser `body` itself. */
+  readonly bodyShape?: Schema;
+  /** Largest body taken; 64 KiB when nothing is said. */
+  readonly maxBodyBytes?: number;
+  /** Takes the server some work: one person may ask for it only so often. */
+  readonly costly?: true;
   readonly response?: R;
   readonly status: 200 | 201 | 202 | 204;
   /** Mutable resource: the caller must send `If-Match` with the strong ETag it read. */
   readonly ifMatch?: true;
   /** Answers that are not JSON (PDF, event stream) are named by media type and have no response schema. */
-  readonly media?: 'application/pdf' | 'text/event-stream';
+  readonly media?: 'application/pdf' | 'text/event-stream' | 'text/html';
 }
 
 export function defineContract<
@@ -48,6 +55,7 @@ export function defineContract<
   Q extends Schema | undefined = undefined,
   B extends Schema | undefined = undefined,
   R extends Schema | undefined = undefined,
->(contract: Contract<P, Q, B, R>): Contract<P, Q, B, R> {
+  const K extends RoutePolicy = RoutePolicy,
+>(contract: Contract<P, Q, B, R, K>): Contract<P, Q, B, R, K> {
   return contract;
 }

@@ -35,6 +35,7 @@ export const createExport = defineContract({
   }),
   response: exportSchema,
   status: 202,
+  costly: true,
 });
 
 export const readExport = defineContract({

@@ -49,6 +49,8 @@ export const sitePersonSchema = z.strictObject({
   role: siteRoleSchema,
 });
 
+export type SitePerson = z.infer<typeof sitePersonSchema>;
+
 export const siteSchema = z.strictObject({
   ...siteSummarySchema.shape,
   building_list: z.array(buildingSummarySchema),

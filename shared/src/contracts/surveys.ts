@@ -1,5 +1,5 @@
 import { z } from 'zod/mini';
-import { changeSchema, changeSetBodySchema } from '../survey/change.ts';
+import { MAX_CHANGE_SET_BYTES, changeSchema, changeSetBodySchema } from '../survey/change.ts';
 import { surveyDocumentV1 } from '../survey/versions/v1.ts';
 import { defineContract } from './contract.ts';
 import { siteRoleSchema } from './sites.ts';
@@ -78,6 +78,7 @@ export const applyChangeSet = defineContract({
   policy: { kind: 'site', action: 'survey.edit', of: 'survey', param: 'surveyId' },
   params: surveyId,
   body: changeSetBodySchema,
+  maxBodyBytes: MAX_CHANGE_SET_BYTES,
   response: z.strictObject({
     id: z.uuid(),
     sequence: z.int(),
