@@ -1,0 +1,67 @@
+import { createServer } from 'node:http';
+import { pino } from 'pino';
+import { EnvError, readEnv, type Env } from './env.ts';
+import { House } from './house.ts';
+import { migrate } from './migrate.ts';
+
+/** After this the process goes even when a request still hangs, ms. */
+const LAST_ms = 20_000;
+
+function settings(): Env | null {
+  try {
+    return readEnv(process.env);
+  } catch (error) {
+    if (!(error instanceof EnvError)) throw error;
+    process.stderr.write(`${error.message}\n`);
+    process.exitCode = 1;
+    return null;
+  }
+}
+
+async function main(env: Env): Promise<void> {
+  const log = pino({ level: env.logLevel });
+  if (env.migrationDatabaseUrl !== null) await migrate(env.migrationDatabaseUrl);
+  const house = new House(env, log);
+  await house.open();
+  const server = createServer(house.app);
+  server.requestTimeout = 60_000;
+  server.headersTimeout = 15_000;
+
+  let stopping = false;
+  const stop = (): void => {
+    if (stopping) {
+      process.exit(1);
+    }
+    stopping = true;
+    setTimeout(() => process.exit(1), LAST_ms).unref();
+    house.endStreams();
+    server.close(() => {
+      house.close().then(
+        () => process.exit(0),
+        (error: unknown) => {
+          log.error({ err: error }, 'stopping');
+          process.exit(1);
+        },
+      );
+    });
+    server.closeIdleConnections();
+  };
+  process.on('SIGTERM', stop);
+  process.on('SIGINT', stop);
+  process.on('disconnect', stop);
+
+  await new Promise<void>((done, failed) => {
+    server.once('error', failed);
+    server.listen(env.port, env.host, done);
+  });
+  log.info({ address: env.baseUrl.href }, 'listening');
+  process.send?.('ready');
+}
+
+const env = settings();
+if (env !== null) {
+  main(env).catch((error: unknown) => {
+    process.stderr.write(`Embertally could not start: ${error instanceof Error ? error.message : String(error)}\n`);
+    process.exit(1);
+  });
+}

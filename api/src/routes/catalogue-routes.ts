@@ -1,0 +1,22 @@
+import { KINDS } from '@embertally/shared/catalogue/kinds';
+import { LININGS } from '@embertally/shared/catalogue/linings';
+import { MATERIALS } from '@embertally/shared/catalogue/materials';
+import { USES } from '@embertally/shared/catalogue/uses';
+import { listKinds, listLinings, listMaterials, listUses } from '@embertally/shared/contracts/catalogue';
+import type { Contract } from '@embertally/shared/contracts/contract';
+import { defineRoute, type Route } from '../http/define-route.ts';
+
+/** Rows of the catalogue as plain JSON values. */
+function listRoute(contract: Contract, rows: readonly object[]): Route {
+  const text = JSON.stringify({ items: rows });
+  return defineRoute(contract, () => Promise.resolve({ kind: 'text', text }));
+}
+
+export function catalogueRoutes(): Route[] {
+  return [
+    listRoute(listMaterials, MATERIALS),
+    listRoute(listKinds, KINDS),
+    listRoute(listLinings, LININGS),
+    listRoute(listUses, USES),
+  ];
+}

@@ -1,0 +1,34 @@
+import type { SurveyDocumentV1 } from '@embertally/shared/survey/versions/v1';
+import type { EntityManager } from 'typeorm';
+import { DocumentRepository } from '../repositories/document-repository.ts';
+import type { ExportRow } from '../repositories/export-repository.ts';
+import { LimitRepository } from '../repositories/limit-repository.ts';
+import { SurveyRepository } from '../repositories/survey-repository.ts';
+import type { ReportInput } from '../reports/report-input.ts';
+
+/** Everything a report of an export is made from, read at one moment. */
+export async function reportInput(manager: EntityManager, row: ExportRow): Promise<ReportInput> {
+  const survey = await new SurveyRepository(manager).find(row.survey_id);
+  const text = await new DocumentRepository(manager).text(row.survey_id);
+  if (survey === null || text === null) throw new Error('The survey of the export is not there any more.');
+  const limits = await new LimitRepository(manager).ofBuilding(survey.building.id);
+  return {
+    kind: row.kind,
+    room_id: row.room_id,
+    site: survey.site.name,
+    building: survey.building.name,
+    made_by: row.person_name,
+    made_at: row.created_at.toISOString(),
+    time_zone: survey.site.time_zone,
+    units: row.units,
+    document: JSON.parse(text) as SurveyDocumentV1,
+    limits: limits.map(({ room_id, quantity, bound, source, set_by, since }) => ({
+      room_id,
+      quantity,
+      bound,
+      source,
+      set_by,
+      since,
+    })),
+  };
+}
