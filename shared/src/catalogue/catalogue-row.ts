@@ -76,7 +76,7 @@ export interface KindPart {
 
 /** How the quantity of a kind is asked. */
 export type MeasureBy =
-  'pieces' | 'shelf metres' | 'running metres' | 'stack height' | 'litres' | 'volume' | 'floor area' | 'kilowatt-hours';
+  'pieces' | 'shelf metres' | 'running metres' | 'stack height' | 'litres' | 'volume' | 'area' | 'kilowatt-hours';
 
 export interface KindMeasure {
   readonly by: MeasureBy;

@@ -40,6 +40,11 @@ export const source = {
     return { title, locator, fromMemory: true };
   },
 
+  /** Masses and sizes as surveyors meet them; nobody's table. */
+  practice(locator: string): CatalogueSource {
+    return { title: 'Common survey practice, no single source', locator, fromMemory: true };
+  },
+
   read(title: string, locator: string): CatalogueSource {
     return { title, locator, fromMemory: false };
   },

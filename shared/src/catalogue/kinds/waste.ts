@@ -1,0 +1,83 @@
+import { kindRows } from '../kind-row.ts';
+import { source } from '../source.ts';
+
+const nbs = source.memory('NFPA 921 and NBS tests of waste containers', 'small wastebaskets and 40 L bags');
+const bulk = (typical: number, low: number, high: number) => source.practice(`${typical} kg/m³ (${low} to ${high})`);
+
+/** Bins and waste. */
+export const WASTE = kindRows('waste', [
+  {
+    key: 'wastebasket',
+    label: 'Wastebasket',
+    synonyms: ['paper bin', 'office bin'],
+    parts: { 'loose-paper': 0.6, polyethylene: 0.2 },
+    mass_kg: [0.7, 1.4],
+    size_m: [0.3, 0.3, 0.35],
+    growth: 'medium',
+    peak_kW: 30,
+    ignition: 'easy',
+    source: nbs,
+  },
+  {
+    key: 'waste-bag',
+    label: 'Bag of waste, 40 L',
+    synonyms: ['bin bag', 'refuse sack', 'trash bag'],
+    parts: { 'loose-paper': 1.55, 'polyethylene-film': 0.15 },
+    mass_kg: [1.2, 3.5],
+    size_m: [0.4, 0.4, 0.5],
+    growth: 'fast',
+    peak_kW: 280,
+    ignition: 'normal',
+    source: nbs,
+  },
+  {
+    key: 'wheeled-bin',
+    label: 'Wheeled bin, 240 L, full',
+    synonyms: ['dustbin', 'waste container'],
+    parts: { 'household-waste': 36, polyethylene: 12 },
+    mass_kg: [36, 85],
+    size_m: [0.6, 0.75, 1.05],
+    growth: 'medium',
+    radiative: 0.42,
+    ignition: 'normal',
+    hazards: ['smouldering'],
+    source: bulk(150, 100, 300),
+  },
+  {
+    key: 'waste-container',
+    label: 'Waste container, 1100 L, full',
+    synonyms: ['four-wheeled bin', 'dumpster'],
+    parts: { 'household-waste': 165, polyethylene: 45 },
+    mass_kg: [150, 380],
+    size_m: [1.35, 1, 1.35],
+    growth: 'fast',
+    radiative: 0.42,
+    ignition: 'normal',
+    hazards: ['smouldering'],
+    source: bulk(150, 100, 300),
+  },
+  {
+    key: 'cardboard-cage',
+    label: 'Cage of waste cardboard',
+    synonyms: ['recycling', 'roll cage'],
+    parts: { cardboard: 45, 'polyethylene-film': 2 },
+    mass_kg: [25, 90],
+    size_m: [0.8, 0.7, 1.7],
+    growth: 'fast',
+    ignition: 'normal',
+    source: bulk(50, 25, 95),
+  },
+  {
+    key: 'oily-rag-bin',
+    label: 'Bin of oily rags',
+    synonyms: ['solvent rags', 'wiping cloths'],
+    parts: { cotton: 4, 'linseed-oil': 1 },
+    mass_kg: [2, 9],
+    size_m: [0.4, 0.4, 0.5],
+    growth: 'medium',
+    ignition: 'easy',
+    enclosure: 'cabinet',
+    hazards: ['smouldering'],
+    source: source.practice('a lidded steel bin of 40 L; rags with drying oil can light by themselves'),
+  },
+]);
