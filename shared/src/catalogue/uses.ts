@@ -7,7 +7,7 @@ const practice = source.memory(
   'growth class by what is usually kept there; no distribution of loads is claimed',
 );
 const shopSurvey = source.read(
-  'Zalok et al. (2009), fire loads of Canadian shops and restaurants',
+  'Zalok et al. (2009), survey of fire loads in Canadian shops',
   'abstract: mean 747, standard deviation 833 MJ/m², lognormal',
 );
 
@@ -46,7 +46,7 @@ export const USES: readonly Use[] = [
   use(
     'shop',
     'Shop',
-    ['retail', 'restaurant', 'boutique'],
+    ['retail', 'store front', 'boutique'],
     'fast',
     250,
     { kind: 'lognormal', mean_MJ_m2: 747, cov: 833 / 747, source: shopSurvey },

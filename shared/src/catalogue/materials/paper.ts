@@ -93,6 +93,6 @@ export const PAPER = materialRows({ group: 'paper', cellulosic: true, radiative:
     ignition: 'normal',
     moisture_pct_dry: 5,
     hazards: ['smouldering'],
-    source: source.read('Phyllis2 database of biomass', 'cellulose 17.2 to 17.5 MJ/kg dry, brought to 5 % moisture'),
+    source: source.read('Published biomass fuel data', 'cellulose 17.2 to 17.5 MJ/kg dry, brought to 5 % moisture'),
   },
 ]);

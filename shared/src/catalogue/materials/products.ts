@@ -94,7 +94,7 @@ export const PRODUCTS = materialRows({ group: 'products', cellulosic: false, rad
     heat_MJ_kg: [10, 7, 14],
     ignition: 'normal',
     density_kg_m3: [150, 100, 300],
-    moisture_pct_dry: 45,
+    moisture_pct_dry: 35,
     hazards: ['smouldering'],
     source: handbook,
   },
