@@ -5,6 +5,8 @@ import { HAIRLINE, INK, PAGE, RULE, SIZE, SOFT } from './theme.ts';
 
 export interface ChartSeries {
   readonly label: string;
+  /** Where the label stands: beside the falling half of the line, or at its end; default end. */
+  readonly side?: 'left' | 'right' | 'end';
   readonly points: readonly Point[];
   readonly colour: Colour;
   readonly width?: number;
@@ -154,15 +156,24 @@ function labelLines(
   for (const { label, value, colour } of [...thresholds].sort((a, b) => b.value - a.value)) {
     put(label, colour, plot.right - 2, plot.atY(value));
   }
-  for (const { label, points, colour } of series) {
-    if (label === '') continue;
-    const highest = points.reduce<Point | undefined>(
-      (best, one) => (best === undefined || one[1] > best[1] ? one : best),
-      undefined,
-    );
-    if (highest === undefined) continue;
+  for (const { label, points, colour, side = 'end' } of series) {
+    const at = side === 'end' ? points.at(-1) : halfway(points);
+    if (label === '' || at === undefined) continue;
     const wide = book.width(label, LABEL, 'regular');
-    const right = Math.min(plot.right - 2, Math.max(plot.left + wide + 4, plot.atX(highest[0]) + wide / 2));
-    put(label, colour, right, plot.atY(highest[1]));
+    const [x, y] = [plot.atX(at[0]), plot.atY(at[1])];
+    if (side === 'end') put(label, colour, Math.min(plot.right - 2, Math.max(x, plot.left + wide + 4)), y);
+    else if (side === 'left') sheet.text(label, x - 6, y, { size: LABEL, colour, align: 'right' });
+    else sheet.text(label, Math.min(x + 6, plot.right - wide), y, { size: LABEL, colour });
   }
+}
+
+/** The place on the falling side of a line where it has come down to half its highest value. */
+function halfway(points: readonly Point[]): Point | undefined {
+  const most = points.reduce((highest, [, y]) => Math.max(highest, y), 0);
+  const top = points.findIndex(([, y]) => y === most);
+  const below = points.findIndex(([, y], index) => index > top && y <= most / 2);
+  const [a, b] = [points[below - 1], points[below]];
+  if (a === undefined || b === undefined || a[1] === b[1]) return points.at(-1);
+  const share = (a[1] - most / 2) / (a[1] - b[1]);
+  return [a[0] + (b[0] - a[0]) * share, most / 2];
 }

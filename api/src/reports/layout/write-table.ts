@@ -1,6 +1,7 @@
 import { wrapText } from '../pdf/wrap-text.ts';
 import type { Weight } from '../pdf/font-book.ts';
 import type { Colour, Sheet } from '../pdf/sheet.ts';
+import { drawStandingEdge } from './draw-standing.ts';
 import type { Flow } from './flow.ts';
 import { HAIRLINE, INK, RULE, SIZE, SOFT, VERDIGRIS } from './theme.ts';
 
@@ -10,6 +11,8 @@ export interface Cell {
   readonly colour?: Colour;
   /** A dotted line under the words, as for amounts that were only estimated. */
   readonly dotted?: boolean;
+  /** The edge of a standing around the words. */
+  readonly edge?: 'near' | 'over';
   /** Number of the page to turn to, known once all pages are there; pressing it opens that page. */
   readonly page?: () => Sheet | undefined;
 }
@@ -56,6 +59,8 @@ export function writeTable(
   const { book } = flow.file;
   const placed = place(columns, flow.left, flow.width, options.gutter ?? 8);
   const titles = placed.map(({ column, width }) => wrapText(book, column.title, SIZE.note, 'regular', width));
+  /** A subheading takes the whole row. */
+  const whole: Placed = { column: { title: '', width: flow.width }, x: flow.left, width: flow.width };
   const headHeight = Math.max(1, ...titles.map((lines) => lines.length)) * SIZE.note * 1.28 + PADDING;
 
   const head = () => {
@@ -78,13 +83,7 @@ export function writeTable(
     const cells = row.cells.map((cell) => (typeof cell === 'string' ? { text: cell } : cell));
     const weight = row.kind === 'total' || row.kind === 'group' ? 'bold' : 'regular';
     const lines = cells.map((cell, at) =>
-      wrapText(
-        book,
-        cell.text,
-        size,
-        cell.weight ?? weight,
-        row.kind === 'group' ? flow.width : (placed[at]?.width ?? 0),
-      ),
+      wrapText(book, cell.text, size, cell.weight ?? weight, (row.kind === 'group' ? whole : placed[at])?.width ?? 0),
     );
     const tall = Math.max(1, ...lines.map((list) => list.length));
     const keep = row.kind === 'group' ? leading * 2 : 0;
@@ -100,7 +99,7 @@ export function writeTable(
       const count = Math.min(tall - from, room);
       for (const [at, list] of lines.entries()) {
         const cell = cells[at];
-        const where = placed[at];
+        const where = row.kind === 'group' ? whole : placed[at];
         if (cell === undefined || where === undefined) continue;
         for (const [line, text] of list.slice(from, from + count).entries()) {
           const y = flow.y + PADDING + line * leading + size * 0.86;
@@ -109,6 +108,9 @@ export function writeTable(
             colour: cell.colour ?? INK,
             weight: cell.weight ?? weight,
           });
+          if (cell.edge !== undefined) {
+            drawStandingEdge(flow.sheet, cell.edge, where.x - 4, y - size * 0.95, width + 8, size * 1.38);
+          }
           if (cell.dotted === true) dottedUnder(flow.sheet, where.x, y + 2, width);
         }
       }

@@ -1,6 +1,6 @@
 import { roomRegion } from '@embertally/shared/survey/derive/room-region';
 import type { Point as PlanPoint } from '@embertally/shared/geometry/point';
-import { LOAD_BAND_EDGES } from '@embertally/shared/tally/load-band';
+import { LOAD_BAND_EDGES } from '@embertally/shared/tally/density-band';
 import { countText } from '../count-text.ts';
 import type { Flow } from '../layout/flow.ts';
 import { INK, MARGIN, PAPER_LONG, PAPER_SHORT, SIZE, SOFT } from '../layout/theme.ts';
@@ -91,7 +91,6 @@ function drawLegend(flow: Flow, { figures }: ReportBook, frame: PlanFrame): void
     x += 30 + sheet.text(kind, x + 30, top + 41.5, label) + 12;
   }
   sheet.text('number in a box: line of the room’s ledger', x, top + 41.5, label);
-  const bar = drawScaleBar(sheet, figures, frame.scale, right, top + 14);
-  sheet.text(`1:${frame.scale.ratio} on A4 printed at 100 %`, right, top + 41.5, { ...label, align: 'right' });
-  sheet.text('Scale', right - bar, top, label);
+  drawScaleBar(sheet, figures, frame.scale, right, top + 8);
+  sheet.text(`Scale 1:${frame.scale.ratio}, on A4 printed at 100 %`, right, top, { ...label, align: 'right' });
 }

@@ -1,4 +1,4 @@
-import type { Estimate, EstimateWarning } from '@embertally/shared/methods/estimate';
+import type { Estimate } from '@embertally/shared/methods/estimate';
 
 const SUPERSCRIPTS = '⁰¹²³⁴⁵⁶⁷⁸⁹';
 
@@ -12,7 +12,12 @@ export class RoomNotes {
   /** The note marks of an estimate, to be set after its figure; empty when it has no flags. */
   marks(estimate: Estimate | undefined): string {
     if (estimate === undefined || estimate.warnings.length === 0) return '';
-    const numbers = estimate.warnings.map((warning) => this.numberOf(warning));
+    return this.marked(estimate.warnings.map(({ code, text }) => `${text} (${code})`));
+  }
+
+  /** The note marks of texts that explain a figure. */
+  marked(texts: readonly string[]): string {
+    const numbers = texts.map((text) => this.numberOf(text));
     return ` ${[...new Set(numbers)].map(superscript).join('˒')}`;
   }
 
@@ -21,8 +26,7 @@ export class RoomNotes {
     return this.texts;
   }
 
-  private numberOf({ code, text }: EstimateWarning): number {
-    const note = `${text} (${code})`;
+  private numberOf(note: string): number {
     const known = this.texts.indexOf(note);
     if (known >= 0) return known + 1;
     return this.texts.push(note);

@@ -22,7 +22,7 @@ type Plate = readonly PlateLine[];
 
 const SIZE = 6.6;
 const LEADING = 8.4;
-const PAD = 3.2;
+const PAD = 4.2;
 /** A name that needs more lines is left to the room table; its number stands on the plan. */
 const MOST_LINES = 4;
 

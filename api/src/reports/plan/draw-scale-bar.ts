@@ -9,10 +9,8 @@ const STEPS = [1, 2, 5];
 
 /**
  * A scale bar that ends at `right`: four equal parts of a round length in the reader's unit, alternately filled.
- *
- * @returns its length in points
  */
-export function drawScaleBar(sheet: Sheet, figures: Figures, scale: PlanScale, right: number, y: number): number {
+export function drawScaleBar(sheet: Sheet, figures: Figures, scale: PlanScale, right: number, y: number): void {
   const unit = figures.unit('m');
   const pointsPerUnit = scale.pointsPerMetre * (unit === 'ft' ? METRES_PER_FOOT : 1);
   const most = LONGEST / 4 / pointsPerUnit;
@@ -33,5 +31,4 @@ export function drawScaleBar(sheet: Sheet, figures: Figures, scale: PlanScale, r
       align: index === 4 ? 'right' : 'left',
     });
   }
-  return length;
 }

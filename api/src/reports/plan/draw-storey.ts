@@ -3,7 +3,7 @@ import { openingsOfStorey } from '@embertally/shared/survey/derive/openings-of-s
 import { roomRegion } from '@embertally/shared/survey/derive/room-region';
 import { walls } from '@embertally/shared/survey/derive/walls';
 import type { SurveyDocument } from '@embertally/shared/survey/survey-document';
-import { loadBand } from '@embertally/shared/tally/load-band';
+import { loadBand } from '@embertally/shared/tally/density-band';
 import { INK, PAGE } from '../layout/theme.ts';
 import type { FontBook } from '../pdf/font-book.ts';
 import type { Point, Sheet } from '../pdf/sheet.ts';
