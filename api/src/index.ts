@@ -1,5 +1,7 @@
 import { createServer } from 'node:http';
 import { pino } from 'pino';
+import { seedDemo } from '../scripts/seed.ts';
+import { systemClock } from './clock.ts';
 import { EnvError, readEnv, type Env } from './env.ts';
 import { House } from './house.ts';
 import { migrate } from './migrate.ts';
@@ -23,6 +25,9 @@ async function main(env: Env): Promise<void> {
   if (env.migrationDatabaseUrl !== null) await migrate(env.migrationDatabaseUrl);
   const house = new House(env, log);
   await house.open();
+  if (env.demo) {
+    await seedDemo({ services: house.services, database: house.database, clock: systemClock, dataDir: env.dataDir });
+  }
   const server = createServer(house.app);
   server.requestTimeout = 60_000;
   server.headersTimeout = 15_000;

@@ -1,0 +1,160 @@
+import type { SiteRoleName } from '@embertally/shared/policy/policy';
+import { createHash, randomBytes } from 'node:crypto';
+import { existsSync, mkdirSync, readFileSync, renameSync, writeFileSync } from 'node:fs';
+import { join } from 'node:path';
+import type { DataSource } from 'typeorm';
+import type { Actor, Trail } from '../src/actor.ts';
+import type { Clock } from '../src/clock.ts';
+import type { Services } from '../src/services/services.ts';
+import { demoChanges } from './demo/demo-changes.ts';
+import { DEMO_LIMITS } from './demo/demo-limits.ts';
+import { DEMO_BUILDING, DEMO_PEOPLE, DEMO_SITE, type DemoPerson } from './demo/demo-people.ts';
+
+const TRAIL: Trail = { requestId: 'demo-book', ip: '127.0.0.1' };
+
+interface DemoFile {
+  /** Every id of the demo is made of this and a name. */
+  readonly seed: string;
+  readonly at: string;
+  readonly complete: boolean;
+  readonly people: readonly (DemoPerson & { readonly password: string })[];
+}
+
+export interface SeedParts {
+  readonly services: Services;
+  readonly database: DataSource;
+  readonly clock: Clock;
+  /** Where `demo.json`, with the passwords of the demo's people, is kept. */
+  readonly dataDir: string;
+}
+
+/**
+ * Fills an empty database with the demo book, through the services people use. A run that was cut short is finished by
+ * the next one: every step carries the id it had the first time, and a step already done changes nothing.
+ */
+export async function seedDemo(parts: SeedParts): Promise<void> {
+  const file = join(parts.dataDir, 'demo.json');
+  const demo = readDemo(file);
+  if (demo?.complete === true) return;
+  if (demo === null && !(await isEmpty(parts.database))) return;
+  const begun = demo ?? beginDemo(file, parts.clock);
+  await fill(parts.services, begun);
+  writeDemo(file, { ...begun, complete: true });
+}
+
+async function isEmpty(database: DataSource): Promise<boolean> {
+  const rows: unknown[] = await database.query('SELECT 1 FROM organisation LIMIT 1');
+  return rows.length === 0;
+}
+
+function readDemo(file: string): DemoFile | null {
+  return existsSync(file) ? (JSON.parse(readFileSync(file, 'utf8')) as DemoFile) : null;
+}
+
+function writeDemo(file: string, demo: DemoFile): void {
+  writeFileSync(`${file}.new`, `${JSON.stringify(demo, null, 2)}\n`, { mode: 0o600 });
+  renameSync(`${file}.new`, file);
+}
+
+function beginDemo(file: string, clock: Clock): DemoFile {
+  mkdirSync(join(file, '..'), { recursive: true });
+  const people = DEMO_PEOPLE.map((person) => ({ ...person, password: randomBytes(12).toString('base64url') }));
+  const demo = { seed: randomBytes(16).toString('hex'), at: clock.now().toISOString(), complete: false, people };
+  writeDemo(file, demo);
+  return demo;
+}
+
+/** A UUID that is always the same for the same seed and name (the layout of version 8: made by us). */
+function idFrom(seed: string, name: string): string {
+  const hex = createHash('sha256').update(`${seed} ${name}`).digest('hex');
+  const variant = ((parseInt(hex[16] ?? '0', 16) & 0x3) | 0x8).toString(16);
+  return [
+    hex.slice(0, 8),
+    hex.slice(8, 12),
+    `8${hex.slice(13, 16)}`,
+    `${variant}${hex.slice(17, 20)}`,
+    hex.slice(20, 32),
+  ].join('-');
+}
+
+async function fill(services: Services, demo: DemoFile): Promise<void> {
+  const id = (name: string): string => idFrom(demo.seed, name);
+  const actors = new Map<SiteRoleName, Actor>();
+  for (const person of demo.people)
+    actors.set(person.role, await signInAs(services, person, id(`organisation ${person.organisation}`)));
+  const as = (role: SiteRoleName): Actor => {
+    const actor = actors.get(role);
+    if (actor === undefined) throw new Error(`The demo has no ${role}.`);
+    return actor;
+  };
+
+  const siteId = id('site');
+  await services.sites.create(as('manager'), { id: siteId, ...DEMO_SITE }, TRAIL);
+  for (const person of demo.people.filter(({ role }) => role !== 'manager')) {
+    const role = { id: id(`role ${person.email}`), email: person.email, role: person.role };
+    await services.siteRoles.give(as('manager'), siteId, role, TRAIL);
+  }
+  const access = async (role: SiteRoleName) => {
+    const found = await services.access.find(as(role), 'site', siteId);
+    if (found === null) throw new Error(`The demo's ${role} has no way to the site.`);
+    return found;
+  };
+  const buildingId = id('building');
+  const survey = {
+    survey_id: id('survey'),
+    storey_id: id('storey'),
+    idOf: id,
+    recorded_by: as('inspector').name,
+    recorded_at: demo.at,
+  };
+  const building = {
+    id: buildingId,
+    survey_id: survey.survey_id,
+    storey_id: survey.storey_id,
+    name: DEMO_BUILDING,
+    storey_name: 'Ground floor',
+  };
+  await services.buildings.create(as('manager'), await access('manager'), building, TRAIL);
+
+  const { steps } = demoChanges(survey);
+  for (const [index, { label, changes }] of steps.entries()) {
+    await services.changeSets.apply(as('inspector'), survey.survey_id, {
+      id: id(`change set ${index}`),
+      label,
+      changes: [...changes],
+    });
+  }
+  for (const { room, as: role, ...limit } of DEMO_LIMITS) {
+    const input = { id: id(`limit ${room} ${limit.quantity}`), room_id: id(`room ${room}`), ...limit };
+    await services.limits.create(as(role), await access(role), buildingId, input, TRAIL);
+  }
+}
+
+/** Signs a person up (an address already there changes nothing) and in; says who is acting. */
+async function signInAs(
+  services: Services,
+  person: DemoFile['people'][number],
+  organisationId: string,
+): Promise<Actor> {
+  await services.accounts.signUp(
+    {
+      id: organisationId,
+      organisation_name: person.organisation,
+      name: person.name,
+      email: person.email,
+      password: person.password,
+    },
+    TRAIL,
+  );
+  const { me } = await services.accounts.signIn({ email: person.email, password: person.password }, null, TRAIL);
+  const member = me.members.find((one) => one.id === me.member_id);
+  if (member === undefined) throw new Error(`${person.name} has no organisation.`);
+  return {
+    personId: me.person.id,
+    name: me.person.name,
+    memberId: member.id,
+    organisationId: member.organisation_id,
+    organisationName: member.organisation_name,
+    organisationRole: member.role,
+  };
+}
