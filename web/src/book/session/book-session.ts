@@ -6,7 +6,7 @@ import type { Command, Done, Refusal } from '@embertally/shared/survey/command';
 import type { SurveyDocument } from '@embertally/shared/survey/survey-document';
 import type { RoomInput } from '@embertally/shared/tally/room-input';
 import type { RoomTally } from '@embertally/shared/tally/room-tally';
-import type { BookMessage, BookState, Camera, Placing, Selected, ToolName, Units } from './book-state.ts';
+import type { BookMessage, BookPageName, BookState, Camera, Placing, Selected, ToolName, Units } from './book-state.ts';
 import { createHistory, type History } from './history.ts';
 import { roomTallyMemo, type RoomTallyMemo } from './room-tally-memo.ts';
 import { NOTHING_TO_SAVE, type SavingStatus } from './saving-status.ts';
@@ -60,6 +60,8 @@ export class BookSession {
       storeyId,
       roomInHand: firstRoom(start.document, storeyId),
       selection: [],
+      page: 'plan',
+      tables: false,
       tool: 'select',
       placing: { entry: null, openingKind: 'door' },
       camera: { x_m: 6, y_m: 4, pxPerM: 50 },
@@ -159,6 +161,16 @@ export class BookSession {
 
   setTool(tool: ToolName, placing: Partial<Placing> = {}): void {
     this.#set({ tool, placing: { ...this.#state.placing, ...placing }, message: null });
+  }
+
+  /** Turns to a page; on a wide screen plan and tally both lie open already. */
+  turnTo(page: BookPageName): void {
+    this.#set({ page });
+  }
+
+  /** Shows the tables on the left page, or the plan again. */
+  showTables(tables: boolean): void {
+    this.#set({ tables, page: 'plan' });
   }
 
   setCamera(camera: Camera): void {

@@ -7,6 +7,9 @@ import type { SavingStatus } from './saving-status.ts';
 /** The units the person reads in; inside everything is SI. */
 export type Units = 'SI' | 'US';
 
+/** The three pages of the Book on a narrow screen. */
+export type BookPageName = 'plan' | 'tally' | 'rooms';
+
 export type ToolName = 'select' | 'draw-room' | 'opening' | 'contents' | 'measure';
 
 /** Something on the plan a person can pick. A wall has no row of its own: its id is `cornerId|cornerId` in ring order. */
@@ -49,6 +52,10 @@ export interface BookState {
   /** The room whose tally is read; null when the storey has none. */
   readonly roomInHand: string | null;
   readonly selection: readonly Selected[];
+  /** Which page lies open where only one has room. */
+  readonly page: BookPageName;
+  /** The left page shows the tables of rooms, openings and contents instead of the plan. */
+  readonly tables: boolean;
   readonly tool: ToolName;
   readonly placing: Placing;
   readonly camera: Camera;

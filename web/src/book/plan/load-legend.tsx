@@ -1,0 +1,20 @@
+import { LOAD_BAND_EDGES } from '../tally/load-band.ts';
+
+/** What the shading of rooms means: bands of fire load density, pale to deep, with their hatch. */
+export function LoadLegend() {
+  return (
+    <figure className="load-legend" aria-label="Shading of rooms by fire load density">
+      <figcaption>
+        Load density, MJ/m<sup>2</sup>
+      </figcaption>
+      <ol>
+        {LOAD_BAND_EDGES.map((edge, band) => (
+          <li key={edge}>
+            <span className="load-swatch" data-band={band} aria-hidden="true" />
+            <span className="figure">{edge}</span>
+          </li>
+        ))}
+      </ol>
+    </figure>
+  );
+}

@@ -1,0 +1,36 @@
+import { Key } from '../../components/key.tsx';
+import type { Action, ActionWorld } from '../actions/action.ts';
+import { keyLabel } from '../actions/key-name.ts';
+import { useBook } from '../session/use-book.ts';
+
+/** The row of verbs above the plan: what can be done next, each with its key. */
+export function PlanVerbs({ actions, world }: { readonly actions: readonly Action[]; readonly world: ActionWorld }) {
+  return (
+    <>
+      {actions.map((action) => (
+        <Verb key={action.id} action={action} world={world} />
+      ))}
+    </>
+  );
+}
+
+function Verb({ action, world }: { readonly action: Action; readonly world: ActionWorld }) {
+  const on = useBook((state) => action.isOn?.(state) ?? false);
+  const available = useBook(action.isAvailable);
+  const [key] = action.keys;
+  return (
+    <button
+      type="button"
+      className="verb"
+      aria-pressed={action.isOn === undefined ? undefined : on}
+      aria-disabled={available ? undefined : true}
+      aria-keyshortcuts={action.keys.join(' ')}
+      onClick={() => {
+        if (available) action.run(world);
+      }}
+    >
+      {action.label}
+      {key === undefined ? null : <Key>{keyLabel(key)}</Key>}
+    </button>
+  );
+}
