@@ -1,7 +1,16 @@
-import type { Enclosure, Entry, Keeping, LiningLayer } from '../survey/versions/v1.ts';
+/** The words of an entry and a lining, as the survey document has them; a test holds the two together. */
+export type GrowthClass = 'slow' | 'medium' | 'fast' | 'ultra-fast';
+export type IgnitionClass = 'easy' | 'normal' | 'hard' | 'resistant';
+export type Enclosure = 'open' | 'cabinet' | 'sealed';
+export type Keeping = 'fixed' | 'stored' | 'passing';
 
-export type GrowthClass = NonNullable<Entry['growth']>;
-export type IgnitionClass = NonNullable<Entry['ignition_class']>;
+export interface LiningLayer {
+  readonly thickness_m: number;
+  readonly conductivity_W_mK: number;
+  readonly density_kg_m3: number;
+  readonly specific_heat_J_kgK: number;
+  readonly label: string;
+}
 
 /** Where a row's numbers were taken from. `fromMemory`: the named source was not read again when the row was written. */
 export interface CatalogueSource {
