@@ -35,8 +35,7 @@ export function PasswordField({ autoComplete, name, value, onChange, ...frame }:
               setShown(!shown);
             }}
           >
-            {shown ? 'Hide' : 'Show'}
-            <span className="unseen"> password</span>
+            {shown ? 'Hide' : 'Show'} <span className="unseen">password</span>
           </button>
         </div>
       )}

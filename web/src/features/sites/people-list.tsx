@@ -66,9 +66,8 @@ export function PeopleList({ siteId, people, mayTake }: PeopleListProps) {
                     setAsked(person);
                   }}
                 >
-                  Take away
+                  Take away{' '}
                   <span className="unseen">
-                    {' '}
                     the role {person.role} from {person.name}
                   </span>
                 </Button>
