@@ -24,6 +24,8 @@ type Given = {
 };
 
 const AFTER_PLATEAU = ['governedBy', 'growthEnd', 'decayStart', 'end', 'peak', 'curve'] as const;
+/** Below this many MJ or kW there is nothing to draw a curve of. */
+const LEAST = 1e-9;
 const NO_OPENING: EstimateWarning = {
   code: 'NO_OPENING',
   text: 'The room has no opening: the curve runs on the fuel alone, and the air in the room would end the fire sooner.',
@@ -111,9 +113,9 @@ function fireOf(
 ): Growth {
   const E = released.value ?? 0;
   const Q_max = plateau?.value ?? 0;
-  if (!(E > 0) || !(Q_max > 0)) {
+  if (!(E >= LEAST) || !(Q_max >= LEAST)) {
     const [input, why] =
-      E > 0
+      E >= LEAST
         ? (['options.plateau_kW_m2', 'The highest heat release rate of the room is not known.'] as const)
         : (['contents', 'Nothing that burns is recorded in the room.'] as const);
     for (const path of AFTER_PLATEAU) noteMissing(context, `growth.${path}`, input, why);

@@ -67,9 +67,7 @@ function schemaFaults(issue: z.core.$ZodIssue): RoomInputFault[] {
           code: 'wrong_type',
           message: 'This has none of the shapes that are understood here.',
         },
-        ...closestBranch(issue).flatMap((inner) =>
-          schemaFaults({ ...inner, path: [...issue.path, ...inner.path] } as z.core.$ZodIssue),
-        ),
+        ...closestBranch(issue).flatMap((inner) => schemaFaults({ ...inner, path: [...issue.path, ...inner.path] })),
       ];
     default:
       return [{ pointer: at(issue.path), code: 'wrong_value', message: 'This value is not understood here.' }];

@@ -18,11 +18,15 @@ export interface RoomAreas {
   readonly estimates: { readonly floorArea: Estimate; readonly enclosingArea: Estimate; readonly volume: Estimate };
 }
 
+/** A ring that encloses less is no room. */
+const LEAST_FLOOR_M2 = 1e-6;
+
 /** Areas of the room from its clear ring; a measured floor area replaces the ring's for floor and ceiling. */
 export function roomAreas(room: RoomInputRoom, context: TallyContext): RoomAreas {
   const ring = pointsOf(room.ring_m);
   const holes = (room.holes_m ?? []).map(pointsOf);
-  const drawn = Math.max(0, regionArea({ ring, holes }));
+  const region = regionArea({ ring, holes });
+  const drawn = region < LEAST_FLOOR_M2 ? 0 : region;
   const measured = room.measured_floor_area_m2 ?? null;
   const A_f = measured ?? drawn;
   const P = [ring, ...holes].reduce((sum, edge) => sum + perimeter(edge), 0);

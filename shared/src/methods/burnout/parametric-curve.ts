@@ -11,7 +11,7 @@ export interface ParametricCurve {
   readonly end: number;
   readonly fuelControlled: boolean;
   readonly gamma: number;
-  /** Γ_lim for a fuel controlled fire, else null. */
+  /** Γ_lim, k included, for a fuel controlled fire; else null. */
   readonly gammaLimit: number | null;
   readonly k: number;
   /** t*_max of the cooling phase, h: always from Γ and 0.2e-3 q/O. */
@@ -83,8 +83,8 @@ export function parametricFire(
     fuelControlled && O > 0.04 && q < 75 && b < 1160
       ? 1 + ((O - 0.04) / 0.04) * ((q - 75) / 75) * ((1160 - b) / 1160)
       : 1;
-  const gammaLimit = fuelControlled ? gammaOf((0.1e-3 * q) / tLimit, b) : null;
-  const peak = heating(tMax * (gammaLimit === null ? gamma : gammaLimit * k));
+  const gammaLimit = fuelControlled ? gammaOf((0.1e-3 * q) / tLimit, b) * k : null;
+  const peak = heating(tMax * (gammaLimit ?? gamma));
   const coolingTime = ventilationTime * gamma;
   const x = fuelControlled ? (tLimit * gamma) / coolingTime : 1;
   const perHour = coolingTime <= 0.5 ? 625 : coolingTime < 2 ? 250 * (3 - coolingTime) : 250;
@@ -106,7 +106,7 @@ export function parametricFire(
 /** Gas temperature at a time in minutes, °C; 20 °C after the end. */
 export function parametricTemperature(fire: ParametricCurve, minutes: number): number {
   if (minutes <= fire.timeOfPeak) {
-    return heating((minutes / 60) * (fire.gammaLimit === null ? fire.gamma : fire.gammaLimit * fire.k));
+    return heating((minutes / 60) * (fire.gammaLimit ?? fire.gamma));
   }
   return Math.max(AMBIENT_C, fire.peak - fire.coolingRate * (minutes - fire.timeOfPeak));
 }

@@ -1,4 +1,3 @@
-import { firstOrder } from '../../uncertainty/first-order.ts';
 import { defineMethod } from '../define-method.ts';
 import { gum } from '../sources.ts';
 
@@ -32,5 +31,18 @@ export const fireLoadUncertainty = defineMethod({
   ],
   why: 'Treating a shared heat value as independent would understate the uncertainty.',
   outOfRange: 'refuse',
-  run: ({ M, H, u_M, u_H, entry, material, u_psi }) => firstOrder({ M, H, u_M, u_H, entry, material, u_psi }),
+  run({ M, H, u_M, u_H, entry, material, u_psi }) {
+    // What is shared adds linearly before it is squared; everything else adds in quadrature.
+    const byEntry = new Map<number, number>();
+    const byMaterial = new Map<number, number>();
+    for (let i = 0; i < M.length; i += 1) {
+      byEntry.set(entry[i]!, (byEntry.get(entry[i]!) ?? 0) + H[i]! * u_M[i]!);
+      byMaterial.set(material[i]!, (byMaterial.get(material[i]!) ?? 0) + M[i]! * u_H[i]!);
+    }
+    let variance = 0;
+    for (const term of byEntry.values()) variance += term * term;
+    for (const term of byMaterial.values()) variance += term * term;
+    for (const term of u_psi) variance += term * term;
+    return Math.sqrt(variance);
+  },
 });

@@ -1,0 +1,138 @@
+import { asKept } from './load/as-kept.ts';
+import { characteristicLoad } from './load/characteristic-load.ts';
+import { combustionFactor } from './load/combustion-factor.ts';
+import { deltaN } from './load/delta-n.ts';
+import { deltaQ1 } from './load/delta-q1.ts';
+import { deltaQ2 } from './load/delta-q2.ts';
+import { designLoad } from './load/design-load.ts';
+import { enclosureFactor } from './load/enclosure-factor.ts';
+import { fireLoad } from './load/fire-load.ts';
+import { floorToEnclosure } from './load/floor-to-enclosure.ts';
+import { localPeak } from './load/local-peak.ts';
+import { perEnclosure } from './load/per-enclosure.ts';
+import { perFloor } from './load/per-floor.ts';
+import { protectedLoads } from './load/protected-loads.ts';
+import { grossAsReceived } from './heat/gross-as-received.ts';
+import { grossAshFree } from './heat/gross-ash-free.ts';
+import { moistureEn } from './heat/moisture-en.ts';
+import { moistureWetBasis } from './heat/moisture-wet-basis.ts';
+import { netAsReceived } from './heat/net-as-received.ts';
+import { netFromGross } from './heat/net-from-gross.ts';
+import { gumbelFractile } from './statistics/gumbel-fractile.ts';
+import { gumbelPlace } from './statistics/gumbel-place.ts';
+import { lognormalFractile } from './statistics/lognormal-fractile.ts';
+import { lognormalPlace } from './statistics/lognormal-place.ts';
+import { bandFractile } from './uncertainty/band-fractile.ts';
+import { fireLoadUncertainty } from './uncertainty/fire-load-uncertainty.ts';
+import { perFloorUncertainty } from './uncertainty/per-floor-uncertainty.ts';
+import { designFire } from './growth/design-fire.ts';
+import { fuelPlateau, sumOfPeaks } from './growth/fuel-plateau.ts';
+import { growthCoefficient } from './growth/growth-coefficient.ts';
+import { heatReleased } from './growth/heat-released.ts';
+import { openingsPlateau } from './growth/openings-plateau.ts';
+import { plateau } from './growth/plateau.ts';
+import { timeToReach } from './growth/time-to-reach.ts';
+import { enclosureAreas } from './room/enclosure-areas.ts';
+import { flashoverBabrauskas } from './room/flashover-babrauskas.ts';
+import { flashoverMqh } from './room/flashover-mqh.ts';
+import { flashoverThomas } from './room/flashover-thomas.ts';
+import { hotLayerMqh } from './room/hot-layer-mqh.ts';
+import { inverseOpeningFactor } from './room/inverse-opening-factor.ts';
+import { kawagoe } from './room/kawagoe.ts';
+import { liningHeatTransfer } from './room/lining-heat-transfer.ts';
+import { meanHeatTransfer } from './room/mean-heat-transfer.ts';
+import { openingFactor } from './room/opening-factor.ts';
+import { openings } from './room/openings.ts';
+import { roofVentEquivalent } from './room/roof-vent-equivalent.ts';
+import { ventilationLimit } from './room/ventilation-limit.ts';
+import { conversionFactor } from './burnout/conversion-factor.ts';
+import { equivalentTimeJcss } from './burnout/equivalent-time-jcss.ts';
+import { equivalentTimeLaw } from './burnout/equivalent-time-law.ts';
+import { equivalentTimePettersson } from './burnout/equivalent-time-pettersson.ts';
+import { equivalentTime } from './burnout/equivalent-time.ts';
+import { unprotectedSteelFactor } from './burnout/material-factor.ts';
+import { meanThermalInertia } from './burnout/mean-thermal-inertia.ts';
+import { standardCurve, externalCurve, hydrocarbonCurve } from './burnout/nominal-curves.ts';
+import { parametricCurve } from './burnout/parametric-curve.ts';
+import { smallRoomWeight } from './burnout/small-room-weight.ts';
+import { thermalInertia } from './burnout/thermal-inertia.ts';
+import { ventilationWeight } from './burnout/ventilation-weight.ts';
+import type { MethodSummary } from './define-method.ts';
+
+/** A method whose inputs and result are known only when it runs. */
+export interface AnyMethod extends MethodSummary {
+  run(inputs: Readonly<Record<string, number | string | readonly number[]>>): unknown;
+}
+
+/** Every method of the book, by topic. A method that is not listed here is not used. */
+export const METHODS: readonly AnyMethod[] = [
+  asKept,
+  characteristicLoad,
+  combustionFactor,
+  deltaN,
+  deltaQ1,
+  deltaQ2,
+  designLoad,
+  enclosureFactor,
+  fireLoad,
+  floorToEnclosure,
+  localPeak,
+  perEnclosure,
+  perFloor,
+  protectedLoads,
+  grossAsReceived,
+  grossAshFree,
+  moistureEn,
+  moistureWetBasis,
+  netAsReceived,
+  netFromGross,
+  gumbelFractile,
+  gumbelPlace,
+  lognormalFractile,
+  lognormalPlace,
+  bandFractile,
+  fireLoadUncertainty,
+  perFloorUncertainty,
+  designFire,
+  fuelPlateau,
+  sumOfPeaks,
+  growthCoefficient,
+  heatReleased,
+  openingsPlateau,
+  plateau,
+  timeToReach,
+  enclosureAreas,
+  flashoverBabrauskas,
+  flashoverMqh,
+  flashoverThomas,
+  hotLayerMqh,
+  inverseOpeningFactor,
+  kawagoe,
+  liningHeatTransfer,
+  meanHeatTransfer,
+  openingFactor,
+  openings,
+  roofVentEquivalent,
+  ventilationLimit,
+  conversionFactor,
+  equivalentTimeJcss,
+  equivalentTimeLaw,
+  equivalentTimePettersson,
+  equivalentTime,
+  unprotectedSteelFactor,
+  meanThermalInertia,
+  standardCurve,
+  externalCurve,
+  hydrocarbonCurve,
+  parametricCurve,
+  smallRoomWeight,
+  thermalInertia,
+  ventilationWeight,
+];
+
+const byRef = new Map(METHODS.map((method) => [method.ref, method]));
+
+/** The method an estimate names, as `load.per-floor@1`; undefined for a version this engine no longer has. */
+export function methodByRef(ref: string): AnyMethod | undefined {
+  return byRef.get(ref);
+}

@@ -1,0 +1,7 @@
+/** The part of jStat these tests use; the package brings no types. */
+declare module 'jstat' {
+  export const jStat: {
+    readonly lognormal: { inv(p: number, mu: number, sigma: number): number };
+    readonly normal: { cdf(x: number, mean: number, deviation: number): number };
+  };
+}
