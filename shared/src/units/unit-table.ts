@@ -129,11 +129,11 @@ export const UNIT_TABLE: readonly Unit[] = [
     ['lb/ft', 'lb/ft', POUND_KG / FOOT_M],
   ]),
   ...dimension('opening factor', [
-    ['m^½', 'm^½', 1],
+    ['m^½', 'm^½', 1, ['m1/2']],
     ['ft^½', 'ft^½', Math.sqrt(FOOT_M)],
   ]),
   ...dimension('ventilation factor', [
-    ['m^5/2', 'm^5/2', 1],
+    ['m^5/2', 'm^5/2', 1, ['m5/2']],
     ['ft^5/2', 'ft^5/2', FOOT_M ** 2.5],
   ]),
 ];

@@ -162,8 +162,8 @@ function labelLines(
     const wide = book.width(label, LABEL, 'regular');
     const [x, y] = [plot.atX(at[0]), plot.atY(at[1])];
     if (side === 'end') put(label, colour, Math.min(plot.right - 2, Math.max(x, plot.left + wide + 4)), y);
-    else if (side === 'left') sheet.text(label, x - 6, y, { size: LABEL, colour, align: 'right' });
-    else sheet.text(label, Math.min(x + 6, plot.right - wide), y, { size: LABEL, colour });
+    else if (side === 'left') sheet.text(label, x - 5, y + LABEL + 2, { size: LABEL, colour, align: 'right' });
+    else sheet.text(label, Math.min(x + 6, plot.right - wide), y - 2, { size: LABEL, colour });
   }
 }
 

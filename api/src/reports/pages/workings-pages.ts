@@ -38,16 +38,22 @@ function writeEntries(flow: Flow, { entries, tally }: RoomReport): void {
     { title: 'H, MJ/kg', width: 48, align: 'right' as const },
     { title: 'ψ', width: 28, align: 'right' as const },
     { title: 'Heat', width: 62, align: 'right' as const },
-    { title: 'Source of H', width: { share: 0.9 } },
+    { title: 'Source of H', width: 50, align: 'right' as const },
   ];
+  const sources = [...new Set(entries.flatMap(({ parts }) => parts.map(({ heat_source }) => heat_source)))];
   writeTable(flow, columns, rows(), { size: SIZE.note });
+  flow.gap(5);
+  for (const [index, source] of sources.entries()) {
+    const text = source === '' ? 'no source recorded' : source;
+    writeText(flow, `Source ${index + 1}: ${text}`, { size: SIZE.note, colour: SOFT });
+  }
 
   function* rows() {
     for (const [index, entry] of entries.entries()) {
       const heat = heats.get(entry.id);
       const input = (name: string) => workingFigure(heat?.inputs?.find((one) => one.name === name)?.value);
       const parts = entry.parts.map(({ label }) => label).join('; ');
-      const sources = [...new Set(entry.parts.map(({ heat_source }) => heat_source))].join('; ');
+      const numbers = [...new Set(entry.parts.map(({ heat_source }) => sources.indexOf(heat_source) + 1))];
       yield {
         cells: [
           String(index + 1),
@@ -57,7 +63,7 @@ function writeEntries(flow: Flow, { entries, tally }: RoomReport): void {
           input('H'),
           input('psi'),
           workingFigure(heat?.value, heat?.unit),
-          sources,
+          numbers.join('; '),
         ],
       };
     }

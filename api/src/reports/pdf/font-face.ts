@@ -2,6 +2,7 @@ import { readFile } from 'node:fs/promises';
 import { createRequire } from 'node:module';
 import fontkit from '@pdf-lib/fontkit';
 import { CustomFontSubsetEmbedder, type PDFContext, type PDFRef } from 'pdf-lib';
+import { unpackWoff } from './unpack-woff.ts';
 
 const packages = createRequire(import.meta.url);
 /** Figures of equal width, so that columns of numbers line up. */
@@ -15,8 +16,8 @@ export interface SetText {
 }
 
 /**
- * One font file, embedded as the subset of the glyphs that were set. Only `.woff` files embedded as subsets render; a
- * `.woff2` or a whole file gives a page that extracts as text but prints blank.
+ * One font file, embedded as the subset of the glyphs that were set. Only fonts from `.woff` files embedded as subsets
+ * render; a `.woff2` or a whole file gives a page that extracts as text but prints blank.
  */
 export class FontFace {
   readonly key: string;
@@ -33,7 +34,7 @@ export class FontFace {
   }
 
   static async load(key: string, file: string, name: string, context: PDFContext): Promise<FontFace> {
-    const bytes = await readFile(packages.resolve(file));
+    const bytes = unpackWoff(await readFile(packages.resolve(file)));
     return new FontFace(key, context.nextRef(), await CustomFontSubsetEmbedder.for(fontkit, bytes, name, FEATURES));
   }
 

@@ -23,6 +23,7 @@ type Plate = readonly PlateLine[];
 const SIZE = 6.6;
 const LEADING = 8.4;
 const PAD = 4.2;
+const PAD_ABOVE = 3.4;
 /** A name that needs more lines is left to the room table; its number stands on the plan. */
 const MOST_LINES = 4;
 
@@ -55,7 +56,7 @@ export function drawRoomLabels(
     sheet.rect(place.x, place.y, place.width, place.height, { fill: PAGE, stroke: { colour: SOFT, width: 0.4 } });
     drawStandingEdge(sheet, standing, place.x, place.y, place.width, place.height);
     for (const [line, { text, weight }] of plate.entries()) {
-      const y = place.y + PAD + SIZE * 0.82 + line * LEADING;
+      const y = place.y + PAD_ABOVE + SIZE * 0.82 + line * LEADING;
       const colour = weight === 'bold' ? INK : standing === 'no limit set' ? INK : STANDING_COLOURS[standing];
       sheet.text(text, place.x + place.width / 2, y, { size: SIZE, weight, colour, align: 'centre' });
     }
@@ -80,5 +81,8 @@ function platesOf(book: FontBook, figures: Figures, { number, room, tally, stand
 
 function sizeOf(book: FontBook, plate: Plate): { width: number; height: number } {
   const widest = Math.max(...plate.map(({ text, weight }) => book.width(text, SIZE, weight)));
-  return { width: Math.max(widest, 6) + PAD * 2 + 1, height: plate.length * LEADING + PAD * 2 - (LEADING - SIZE) };
+  return {
+    width: Math.max(widest, 6) + PAD * 2 + 1,
+    height: plate.length * LEADING + PAD_ABOVE * 2 - (LEADING - SIZE),
+  };
 }
