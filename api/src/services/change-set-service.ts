@@ -1,6 +1,6 @@
 import type { ChangeSetBody, Changes, Clash } from '@embertally/shared/survey/change';
-import { applyChanges } from '@embertally/shared/survey/apply-changes';
 import { mergeChangeSet } from '@embertally/shared/survey/merge-change-set';
+import { parseChanges } from '@embertally/shared/survey/parse-changes';
 import { fromStored } from '@embertally/shared/survey/stored';
 import { createHash } from 'node:crypto';
 import type { DataSource, EntityManager } from 'typeorm';
@@ -9,7 +9,6 @@ import type { Clock } from '../clock.ts';
 import { Fault } from '../fault.ts';
 import { ChangeSetRepository } from '../repositories/change-set-repository.ts';
 import { DocumentRepository } from '../repositories/document-repository.ts';
-import { changeFaults } from './change-faults.ts';
 import { loadTouched } from './load-touched.ts';
 import { normaliseTimes } from './normalise-times.ts';
 import { storeMerged } from './store-merged.ts';
@@ -48,14 +47,13 @@ export class ChangeSetService {
       if (survey === null) throw Fault.notFound();
       const stored = await answerKnown(sets, surveyId, body.id, bodyHash);
       if (stored !== null) return stored;
-      const faults = changeFaults(body.changes);
-      if (faults.length > 0) throw Fault.invalid(faults);
-      const sent = normaliseTimes(body.changes);
+      const parsed = parseChanges(body.changes);
+      if (!parsed.ok) throw Fault.invalid(parsed.errors);
+      const sent = normaliseTimes(parsed.value);
       const document = fromStored(await loadTouched(new DocumentRepository(manager), surveyId, sent));
       const merged = mergeChangeSet(document, sent);
       if (!merged.ok) throw await clashFault(manager, surveyId, merged.clashes);
-      const after = applyChanges(document, merged.changes);
-      await storeMerged(new DocumentRepository(manager), document, after, merged.changes);
+      await storeMerged(new DocumentRepository(manager), document, merged.document, merged.changes);
       const sequence = survey.sequence + 1;
       await sets.accept(
         {
@@ -68,7 +66,7 @@ export class ChangeSetService {
           personId: actor.personId,
           at: clock.now(),
         },
-        merged.touchedRoomIds.filter((id) => after.rooms.has(id)),
+        merged.touchedRoomIds.filter((id) => merged.document.rooms.has(id)),
       );
       return { id: body.id, sequence, changes: merged.changes };
     });
