@@ -45,7 +45,11 @@ export type MaterialGroup =
   | 'chemicals'
   | 'products';
 
-/** A substance that can burn, as usually found. Heats are net (water leaves as vapour), as received, in MJ/kg. */
+/**
+ * A substance that can burn, as usually found. Heats are net (water leaves as vapour), as received, in MJ/kg; the row's
+ * source is theirs. Radiative fractions and yields: Tewarson, SFPE Handbook of Fire Protection Engineering, well ventilated
+ * (from memory). Ignition classes, bulk densities and moistures: common practice.
+ */
 export interface Material {
   /** Lower-case words joined by hyphens; stored in surveys, never renamed. */
   readonly key: string;
@@ -106,7 +110,10 @@ export type KindGroup =
   | 'waste'
   | 'building';
 
-/** A template for an entry: what one piece is made of, its size, and how it burns. `peak_kW` is for the piece as placed. */
+/**
+ * A template for an entry: what one piece is made of, its size, and how it burns. `peak_kW` is for the piece as placed.
+ * Growth classes: EN 1991-1-2:2002 Table E.5 and the growth times of NFPA 92B (from memory), else common practice.
+ */
 export interface Kind {
   readonly key: string;
   readonly label: string;

@@ -26,10 +26,11 @@ export const source = {
     };
   },
 
-  /** Gross heat by oxygen consumption (± 4.4 %), net by the hydrogen of the repeat unit. */
+  /** The usual value, checked against the net heat of the repeat unit: gross by oxygen consumption, ± 4.4 %. */
   polymer(unit: string): CatalogueSource {
     return {
-      title: 'Walters, Hackbarth and Lyon, Heats of combustion of high temperature polymers',
+      title:
+        'Handbook value held against Walters, Hackbarth and Lyon, Heats of combustion of high temperature polymers',
       locator: `p. 10, repeat unit ${unit}; net from gross with 2.442 MJ per kg of water formed`,
       fromMemory: false,
     };

@@ -3,11 +3,11 @@ import { source } from '../source.ts';
 
 const wood = source.handbook(17.5);
 const dryWood = source.read(
-  'NIBIO, published fuel data of Norwegian wood species',
+  'NIBIO, published wood fuel data',
   'net heat dry and ash-free: softwood 19.1, hardwood 18.9 MJ/kg; a little less here for ash and spread of species',
 );
 const fromDryWood = source.read(
-  'NIBIO, published fuel data of Norwegian wood species',
+  'NIBIO, published wood fuel data',
   'the oven-dry row brought to 10 % moisture of dry mass with 2.442 MJ per kg of water',
 );
 
