@@ -38,9 +38,8 @@ export function makeReportInWorker(
       return;
     }
     const task: ReportTask = { input };
-    const worker = new Worker(new URL('./report-worker.ts', import.meta.url), {
+    const worker = new Worker(new URL('./report-worker.mjs', import.meta.url), {
       workerData: task,
-      execArgv: ['--import', 'tsx'],
       resourceLimits: { maxOldGenerationSizeMb: HEAP_MB },
     });
     const stop = () => {
@@ -63,18 +62,22 @@ export function makeReportInWorker(
           settle(() => resolve(message.bytes));
           break;
         case 'failed':
-          settle(() =>
-            reject(message.name === 'RoomGoneError' ? new RoomGoneError() : new ReportFailedError(message.message)),
-          );
+          settle(() => reject(message.name === 'RoomGoneError' ? new RoomGoneError() : failed(message.message)));
           break;
       }
     });
     worker.on('error', (error: unknown) => {
       const reason = error instanceof Error ? error.message : String(error);
-      settle(() => reject(new ReportFailedError(`The report could not be made: ${reason}`)));
+      settle(() => reject(failed(reason)));
     });
     worker.on('exit', () => {
-      settle(() => reject(new ReportFailedError('The report’s thread ended before the report was whole.')));
+      settle(() => reject(failed('its thread ended before it was whole')));
     });
   });
+}
+
+function failed(reason: string): ReportFailedError {
+  return new ReportFailedError(
+    `The report could not be made: ${reason}. The survey is unchanged. Ask for the report again; if it fails again, tell whoever runs this server.`,
+  );
 }

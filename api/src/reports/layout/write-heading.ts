@@ -2,13 +2,17 @@ import { wrapText } from '../pdf/wrap-text.ts';
 import type { Flow } from './flow.ts';
 import { HAIRLINE, INK, LEADING, RULE, SIZE, SOFT } from './theme.ts';
 
+/** A title of more characters than this is set small, so that it does not fill pages. */
+export const LONG_TITLE = 140;
+
 /** The title of a section at the top of its first page, with a soft line below it and a rule. */
 export function writeTitle(flow: Flow, title: string, below = ''): void {
   const { book } = flow.file;
-  for (const line of wrapText(book, title, SIZE.title, 'bold', flow.width)) {
-    flow.need(SIZE.title * LEADING);
-    flow.sheet.text(line, flow.left, flow.y + SIZE.title, { size: SIZE.title, weight: 'bold', colour: INK });
-    flow.y += SIZE.title * 1.22;
+  const size = title.length > LONG_TITLE ? SIZE.body : SIZE.title;
+  for (const line of wrapText(book, title, size, 'bold', flow.width)) {
+    flow.need(size * LEADING);
+    flow.sheet.text(line, flow.left, flow.y + size, { size, weight: 'bold', colour: INK });
+    flow.y += size * 1.22;
   }
   flow.gap(4);
   if (below !== '') {

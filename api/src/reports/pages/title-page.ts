@@ -6,7 +6,7 @@ import { drawMark } from '../layout/draw-mark.ts';
 import { drawStanding } from '../layout/draw-standing.ts';
 import type { Flow } from '../layout/flow.ts';
 import { INK, LEADING, OCHRE, SIZE, SOFT } from '../layout/theme.ts';
-import { writeHeading } from '../layout/write-heading.ts';
+import { LONG_TITLE, writeHeading } from '../layout/write-heading.ts';
 import { writeText } from '../layout/write-text.ts';
 import { wrapText } from '../pdf/wrap-text.ts';
 import type { ReportBook, RoomReport } from '../report-book.ts';
@@ -32,13 +32,15 @@ export function writeTitlePage(flow: Flow, report: ReportBook, contents: readonl
   flow.y += 46;
   const kind = input.kind === 'survey-report' ? 'Report of the working survey' : 'Tally of one room';
   writeText(flow, kind, { size: SIZE.lead, colour: SOFT, after: 2 });
-  for (const line of wrapText(book, input.building, SIZE.figure, 'bold', flow.width)) {
-    flow.need(SIZE.figure * 1.2);
-    flow.sheet.text(line, flow.left, flow.y + SIZE.figure, { size: SIZE.figure, weight: 'bold', colour: INK });
-    flow.y += SIZE.figure * 1.2;
+  const size = input.building.length > LONG_TITLE ? SIZE.body : SIZE.figure;
+  for (const line of wrapText(book, input.building, size, 'bold', flow.width)) {
+    flow.need(size * 1.2);
+    flow.sheet.text(line, flow.left, flow.y + size, { size, weight: 'bold', colour: INK });
+    flow.y += size * 1.2;
   }
   flow.gap(2);
-  writeText(flow, input.site, { size: SIZE.heading, colour: SOFT, after: 16 });
+  const siteSize = input.site.length > LONG_TITLE ? SIZE.body : SIZE.heading;
+  writeText(flow, input.site, { size: siteSize, colour: SOFT, after: 16 });
 
   const heat = rooms.reduce((sum, { tally }) => sum + (tally.load.total.value ?? 0), 0);
   const storeys = countText(report.storeys.length, 'storey');

@@ -1,6 +1,7 @@
 import { deflateSync } from 'node:zlib';
 import { PDFDocument, PDFHexString, PDFName, PDFNumber, PDFString, type PDFPage, type PDFRef } from 'pdf-lib';
 import { FontBook } from './font-book.ts';
+import { printableText } from './printable-text.ts';
 import { Sheet } from './sheet.ts';
 
 export interface PdfAbout {
@@ -54,9 +55,9 @@ export class PdfFile {
     for (const [sheet, page] of pages) this.write(sheet, page, pages);
     this.writeBookmarks(pages);
     await this.book.embed(this.document.context);
-    this.document.setTitle(about.title, { showInWindowTitleBar: true });
-    this.document.setAuthor(about.author);
-    this.document.setSubject(about.subject);
+    this.document.setTitle(aboutText(about.title), { showInWindowTitleBar: true });
+    this.document.setAuthor(aboutText(about.author));
+    this.document.setSubject(aboutText(about.subject));
     this.document.setCreator('Embertally');
     this.document.setProducer('Embertally');
     this.document.setCreationDate(about.made);
@@ -95,7 +96,7 @@ export class PdfFile {
         const page = pages.get(sheet);
         if (ref === undefined || page === undefined) continue;
         const item = context.obj({ Parent: parent, Dest: [page.ref, 'XYZ', null, null, null] });
-        item.set(PDFName.of('Title'), PDFHexString.fromText(title));
+        item.set(PDFName.of('Title'), PDFHexString.fromText(aboutText(title)));
         const [before, after] = [refs[at - 1], refs[at + 1]];
         if (before !== undefined) item.set(PDFName.of('Prev'), before);
         if (after !== undefined) item.set(PDFName.of('Next'), after);
@@ -119,4 +120,12 @@ export class PdfFile {
     catalog.set(PDFName.of('PageMode'), PDFName.of('UseOutlines'));
     catalog.set(PDFName.of('Lang'), PDFString.of('en'));
   }
+}
+
+const LONGEST_ABOUT = 300;
+
+/** Text that a reader shows outside the pages: without characters that act, and not endless. */
+function aboutText(text: string): string {
+  const whole = [...printableText(text)];
+  return whole.length <= LONGEST_ABOUT ? whole.join('') : `${whole.slice(0, LONGEST_ABOUT - 1).join('')}…`;
 }
