@@ -16,5 +16,20 @@ export default defineConfig({
     modulePreload: { polyfill: false },
     // Names every chunk and what it imports: the size figures are computed from it.
     manifest: true,
+    rolldownOptions: {
+      output: {
+        codeSplitting: {
+          groups: [
+            {
+              // The small parts nearly every screen uses travel together: one request instead of a dozen. What stands
+              // on the headless library (dialogs, tabs, menus) stays with the screens that open it.
+              name: 'kit',
+              test: /web\/src\/(components|lib)\/(?!combobox|confirm-dialog|dialog|menu|tabs|load-scale|quantity-field)|shared\/src\/(contracts\/(contract|problem|sessions|sites)|policy)/,
+              minShareCount: 2,
+            },
+          ],
+        },
+      },
+    },
   },
 });

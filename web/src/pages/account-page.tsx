@@ -57,7 +57,7 @@ export function AccountPage() {
           </Part>
           <Part title="Session">
             <p className="py-4">
-              You stay signed in on this device until {until.format(new Date(me.session.expires_at))} at the latest.
+              If the book is not used before then, this session ends on {until.format(new Date(me.session.expires_at))}.
             </p>
             <Button onClick={() => void signOut(client).then(() => navigate(paths.signIn(), { replace: true }))}>
               Sign out

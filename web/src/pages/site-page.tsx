@@ -106,7 +106,7 @@ export function SitePage() {
           </Part>
           {canOnSite(standing, 'history.read') ? (
             <Part title="History">
-              <HistoryList siteId={data.id} timeZone={data.time_zone} />
+              <HistoryList siteId={data.id} timeZone={data.time_zone} people={data.people} />
             </Part>
           ) : null}
         </>

@@ -4,10 +4,10 @@ import { Quantity } from '../../components/quantity.tsx';
 import { Skeleton } from '../../components/skeleton.tsx';
 import { StandingMark } from '../../components/standing-mark.tsx';
 import { Table, type Column } from '../../components/table.tsx';
+import { roomSummariesQuery } from '../../lib/room-summaries.ts';
 import { limitsQuery } from './api/limits.ts';
-import { roomSummariesQuery } from './api/room-summaries.ts';
 import { limitRows, type LimitRow } from './limit-rows.ts';
-import { LIMIT_QUANTITIES, LIMIT_SOURCES } from './limit-words.ts';
+import { LIMIT_QUANTITIES, LIMIT_SOURCES } from '../../lib/limit-words.ts';
 
 interface BuildingLimitsProps {
   readonly buildingId: string;
@@ -27,7 +27,9 @@ const COLUMNS: readonly Column<LimitRow>[] = [
     cell: (row) => (
       <>
         {row.roomName}
-        <span className="block text-small font-normal text-soft">{LIMIT_QUANTITIES[row.limit.quantity].label}</span>
+        <span className="block text-small font-normal text-soft wide:whitespace-nowrap">
+          {LIMIT_QUANTITIES[row.limit.quantity].label}
+        </span>
       </>
     ),
   },

@@ -1,7 +1,9 @@
+import type { Site } from '@embertally/shared/contracts/sites';
 import { useInfiniteQuery } from '@tanstack/react-query';
 import { Button } from '../../components/button.tsx';
 import { LoadFailed } from '../../components/load-failed.tsx';
 import { Skeleton } from '../../components/skeleton.tsx';
+import { useUnits } from '../../lib/units-context.ts';
 import { siteHistoryQuery } from './api/site-history.ts';
 import { historySentence } from './history-sentence.ts';
 
@@ -9,10 +11,12 @@ interface HistoryListProps {
   readonly siteId: string;
   /** The site's own: its days and hours. */
   readonly timeZone: string;
+  readonly people: Site['people'];
 }
 
 /** What was done on a site, newest first. */
-export function HistoryList({ siteId, timeZone }: HistoryListProps) {
+export function HistoryList({ siteId, timeZone, people }: HistoryListProps) {
+  const units = useUnits();
   const history = useInfiniteQuery(siteHistoryQuery(siteId));
   if (history.isPending) return <Skeleton label="Reading what was done here" lines={4} />;
   if (history.isError) {
@@ -29,13 +33,17 @@ export function HistoryList({ siteId, timeZone }: HistoryListProps) {
   }
   const events = history.data.pages.flatMap((page) => page.items);
   if (events.length === 0) return <p className="py-3 text-soft">Nothing has been done here yet.</p>;
+  const reader = {
+    units,
+    memberName: (id: string) => people.find((person) => person.member_id === id)?.name,
+  };
   const time = new Intl.DateTimeFormat(undefined, { dateStyle: 'medium', timeStyle: 'short', timeZone });
   return (
     <>
       <ol>
         {events.map((event) => (
           <li key={event.position} className="border-b border-rule py-2.5">
-            <p>{historySentence(event)}</p>
+            <p>{historySentence(event, reader)}</p>
             <p className="text-small text-soft">
               {event.by === null ? '' : `${event.by.organisation_name} · `}
               <time dateTime={event.at}>{time.format(new Date(event.at))}</time>

@@ -1,46 +1,58 @@
 import type { HistoryEvent } from '@embertally/shared/contracts/history';
+import { limitQuantitySchema } from '@embertally/shared/contracts/limits';
+import { formatQuantity } from '@embertally/shared/units/format-quantity';
+import type { UnitSystem } from '@embertally/shared/units/unit-system';
+import { LIMIT_QUANTITIES } from '../../lib/limit-words.ts';
 
-type Facts = HistoryEvent['facts'];
+type Event = Pick<HistoryEvent, 'action' | 'by' | 'facts' | 'object'>;
 
-function fact(facts: Facts, name: string): string {
-  const value = facts[name];
+export interface HistoryReader {
+  readonly units: UnitSystem;
+  /** The name of a member of the site; undefined for one who has no role there any more. */
+  readonly memberName: (memberId: string) => string | undefined;
+}
+
+function text(event: Event, name: string): string {
+  const value = event.facts[name];
   return value === undefined || value === null ? '' : String(value);
 }
 
-function named(facts: Facts, name = 'name'): string {
-  const value = fact(facts, name);
+function quoted(event: Event, name: string): string {
+  const value = text(event, name);
   return value === '' ? '' : ` “${value}”`;
 }
 
-const DID: Readonly<Record<string, (facts: Facts) => string>> = {
-  'site.created': (facts) => `made the site${named(facts)}`,
+function limit(event: Event, bound: 'bound' | 'before', reader: HistoryReader): string {
+  const quantity = limitQuantitySchema.safeParse(event.facts.quantity);
+  const value = event.facts[bound];
+  if (!quantity.success || typeof value !== 'number') return 'a room';
+  const words = LIMIT_QUANTITIES[quantity.data];
+  const shown = formatQuantity(value, words.unit, reader.units);
+  return `${words.label.toLowerCase()}, ${shown.text} ${shown.unit}`;
+}
+
+function member(event: Event, reader: HistoryReader): string {
+  return reader.memberName(event.object.id) ?? 'somebody who has no role here now';
+}
+
+const DID: Readonly<Record<string, (event: Event, reader: HistoryReader) => string>> = {
+  'site.made': (event) => `made the site${quoted(event, 'name')}`,
   'site.edited': () => 'changed the site’s name, address or time zone',
-  'site-role.given': (facts) => `gave the role ${fact(facts, 'role')}${to(facts)}`,
-  'site-role.taken': (facts) => `took the role ${fact(facts, 'role')} away${from(facts)}`,
-  'building.created': (facts) => `made the building${named(facts)}`,
-  'building.edited': (facts) => `renamed a building to${named(facts)}`,
-  'limit.set': (facts) => `set a limit${named(facts, 'set_by')}`,
-  'limit.created': (facts) => `set a limit${named(facts, 'set_by')}`,
-  'limit.edited': () => 'changed a limit',
-  'limit.deleted': () => 'took a limit away',
-  'change-set.applied': (facts) => `changed the survey${named(facts, 'label')}`,
-  'export.created': () => 'asked for a report',
+  'site-role.given': (event, reader) => `gave ${member(event, reader)} the role ${text(event, 'role')}`,
+  'site-role.taken': (event, reader) => `took the role ${text(event, 'role')} from ${member(event, reader)}`,
+  'building.made': (event) => `made the building${quoted(event, 'name')}`,
+  'building.renamed': (event) => `renamed a building to${quoted(event, 'name')}`,
+  'limit.set': (event, reader) => `set a limit on ${limit(event, 'bound', reader)}`,
+  'limit.edited': (event, reader) => `changed a limit to ${limit(event, 'bound', reader)}`,
+  'limit.taken-away': (event, reader) => `took a limit away: ${limit(event, 'bound', reader)}`,
+  'export.asked-for': () => 'asked for a report',
+  'export.stopped': () => 'stopped a report',
+  'access.refused': (event) => `was refused: ${text(event, 'wanted').replaceAll(/[.-]/g, ' ')}`,
 };
 
-function to(facts: Facts): string {
-  const who = fact(facts, 'to') || fact(facts, 'person') || fact(facts, 'name');
-  return who === '' ? '' : ` to ${who}`;
-}
-
-function from(facts: Facts): string {
-  const who = fact(facts, 'from') || fact(facts, 'person') || fact(facts, 'name');
-  return who === '' ? '' : ` from ${who}`;
-}
-
-/** One event of a history as a sentence: who did what. An action nobody has put into words yet is named as it stands. */
-export function historySentence(event: Pick<HistoryEvent, 'action' | 'by' | 'facts'>): string {
+/** One event of a site's history as a sentence: who did what. An action without words yet is named as it stands. */
+export function historySentence(event: Event, reader: HistoryReader): string {
   const who = event.by?.name ?? 'The system';
   const did = DID[event.action];
-  if (did !== undefined) return `${who} ${did(event.facts)}`.trim();
-  return `${who}: ${event.action.replaceAll(/[.-]/g, ' ')}`;
+  return did === undefined ? `${who}: ${event.action.replaceAll(/[.-]/g, ' ')}` : `${who} ${did(event, reader)}`;
 }

@@ -1,6 +1,6 @@
 import { listRoomSummaries } from '@embertally/shared/contracts/surveys';
 import { queryOptions } from '@tanstack/react-query';
-import { call } from '../../../lib/api-client.ts';
+import { call } from './api-client.ts';
 
 /** The headline of every room of one survey, as last computed. */
 export function roomSummariesQuery(surveyId: string) {
