@@ -2,6 +2,9 @@ import type { Change, Changes } from './change.ts';
 import { mapName, type MapName } from './rows.ts';
 import type { SurveyDocument } from './survey-document.ts';
 
+/** The last outcome of a set of changes: a command looks at it before the session does. */
+const known = new WeakMap<Changes, { readonly before: SurveyDocument; readonly after: SurveyDocument }>();
+
 /**
  * The document after the changes. Untouched maps and rows are the very same objects as before, so whatever was derived
  * from them stays valid. `sequence` is not raised: the change set's receiver does that.
@@ -9,6 +12,8 @@ import type { SurveyDocument } from './survey-document.ts';
  * @throws ChangesDoNotFit when an edit names a row the document does not have; merge first
  */
 export function applyChanges(document: SurveyDocument, changes: Changes): SurveyDocument {
+  const found = known.get(changes);
+  if (found?.before === document) return found.after;
   const copies = new Map<MapName, Map<string, object>>();
   for (const change of changes) {
     const name = mapName(change.kind);
@@ -20,7 +25,9 @@ export function applyChanges(document: SurveyDocument, changes: Changes): Survey
     applyOne(rows, change);
   }
   if (copies.size === 0) return document;
-  return { ...document, ...(Object.fromEntries(copies) as unknown as Partial<SurveyDocument>) };
+  const after = { ...document, ...(Object.fromEntries(copies) as unknown as Partial<SurveyDocument>) };
+  known.set(changes, { before: document, after });
+  return after;
 }
 
 function applyOne(rows: Map<string, object>, change: Change): void {

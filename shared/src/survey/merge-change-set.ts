@@ -35,16 +35,12 @@ export type MergeOutcome =
 export function mergeChangeSet(document: SurveyDocument, changes: Changes): MergeOutcome {
   const rows = mergeRows(document, changes);
   if (rows.clashes.length > 0) return { ok: false, clashes: rows.clashes };
-  const draft = new SurveyDraft(document);
-  for (const change of rows.changes) lay(draft, change);
-  const laid = touchedBy(document, applyChanges(document, rows.changes), rows.changes);
-  for (const storeyId of laid.storeyIds) {
-    keepUsedCorners(draft, storeyId);
-    const clash = hangOpenings(draft, storeyId, changes);
-    if (clash !== null) return { ok: false, clashes: [clash] };
-    sweepUnused(draft, storeyId);
-  }
-  const merged = draft.changes();
+  const planTouched = rows.changes.some(({ kind }) => kind !== 'entry');
+  const settled = planTouched
+    ? settlePlan(document, rows.changes, changes)
+    : { ok: true as const, changes: rows.changes };
+  if (!settled.ok) return settled;
+  const merged = settled.changes;
   const after = applyChanges(document, merged);
   const violations = violationsAfter(document, after, merged);
   if (violations.length > 0) {
@@ -52,6 +48,22 @@ export function mergeChangeSet(document: SurveyDocument, changes: Changes): Merg
   }
   const { roomIds, storeyIds } = touchedBy(document, after, merged);
   return { ok: true, changes: merged, document: after, touchedRoomIds: roomIds, touchedStoreyIds: storeyIds };
+}
+
+type Settled =
+  { readonly ok: true; readonly changes: Changes } | { readonly ok: false; readonly clashes: readonly Clash[] };
+
+/** Keeps what the others came to use, hangs openings and sweeps corners on the storeys the rows touch. */
+function settlePlan(document: SurveyDocument, rows: Changes, asked: Changes): Settled {
+  const draft = new SurveyDraft(document);
+  for (const change of rows) lay(draft, change);
+  for (const storeyId of touchedBy(document, applyChanges(document, rows), rows).storeyIds) {
+    keepUsedCorners(draft, storeyId);
+    const clash = hangOpenings(draft, storeyId, asked);
+    if (clash !== null) return { ok: false, clashes: [clash] };
+    sweepUnused(draft, storeyId);
+  }
+  return { ok: true, changes: draft.changes() };
 }
 
 function lay(draft: SurveyDraft, change: Change): void {

@@ -91,7 +91,7 @@ function unitOf(field: string): string {
 function sentence(issue: z.core.$ZodIssue, words: string, unit: string, found: unknown): string {
   const the = words === '' ? 'This' : `The ${words}`;
   if (issue.code === 'too_big' && issue.origin === 'string') {
-    return `${the} can have at most ${Number(issue.maximum)} characters; this one has ${String(found).length}.`;
+    return `${the} can have at most ${Number(issue.maximum)} characters; this one has ${String(found).length.toLocaleString('en-GB')}.`;
   }
   if (issue.code === 'too_small' && issue.origin === 'string') return `${the} must not be empty.`;
   if (issue.code === 'too_big' && issue.origin === 'array') {

@@ -5,6 +5,7 @@ import type { Done, Refusal } from '../command.ts';
 import type { Violation } from '../invariants/violation.ts';
 import { refuse } from '../refuse.ts';
 import type { SurveyDocument } from '../survey-document.ts';
+import { entryWords, listed } from '../words.ts';
 import type { SurveyDraft } from './survey-draft.ts';
 
 /** Above this many changes their size is measured as well. */
@@ -24,9 +25,20 @@ export function finish(
   if (changes.length === 0) return { refused: false, changes };
   const tooLarge = sizeRefusal(changes);
   if (tooLarge !== null) return tooLarge;
-  const [violation] = check(applyChanges(draft.base, changes));
-  if (violation === undefined) return { refused: false, changes };
-  const { code, message, field, ids } = violation;
+  const violations = check(applyChanges(draft.base, changes));
+  const [violation] = violations;
+  return violation === undefined ? { refused: false, changes } : refusalOf(violation, violations, draft);
+}
+
+/** The first broken rule; of entries left outside their room all are named, because a person has to move them all. */
+function refusalOf(first: Violation, all: readonly Violation[], draft: SurveyDraft): Refusal {
+  const { code, message, field, ids } = first;
+  const alike = all.filter((violation) => violation.code === code);
+  if (code === 'ENTRY_OUTSIDE_ROOM' && alike.length > 1) {
+    const entryIds = alike.flatMap((violation) => violation.ids.slice(0, 1));
+    const names = entryIds.flatMap((id) => draft.get('entry', id) ?? []).map(entryWords);
+    return refuse(code, `${listed(names)} would stand outside their rooms.`, { ids: entryIds });
+  }
   return refuse(code, message, field === undefined ? { ids } : { field, ids });
 }
 

@@ -1,5 +1,5 @@
 import { distance } from '../../geometry/distance.ts';
-import type { Ring } from '../../geometry/point.ts';
+import type { Region, Ring } from '../../geometry/point.ts';
 import { regionArea } from '../../geometry/region-area.ts';
 import { ringEdges } from '../../geometry/ring-edges.ts';
 import { selfCrossing } from '../../geometry/self-crossing.ts';
@@ -18,9 +18,17 @@ export const SHORTEST_WALL_M = 0.05;
 export const LEAST_AREA_M2 = 0.25;
 const LEAST = `the least is ${squareMetres(LEAST_AREA_M2)}`;
 
+/** Regions found to be in order, with the wall thickness they were held against, m. */
+const inOrder = new WeakMap<Region, number>();
+
 /** What is wrong with one room by itself, its walls' thickness included: the first fault, or null. */
 export function roomShapeViolation(document: SurveyDocument, room: Room): Violation | null {
-  return outlineViolation(document.corners, room) ?? floorViolation(document, room);
+  const region = roomRegion(document.corners, room);
+  const thickness_m = document.storeys.get(room.storey_id)?.wall_thickness_m;
+  if (region === null || thickness_m === undefined || inOrder.get(region) === thickness_m) return null;
+  const violation = outlineViolation(document.corners, room) ?? floorViolation(document, room);
+  if (violation === null) inOrder.set(region, thickness_m);
+  return violation;
 }
 
 /** What is wrong with the outline of one room on its walls' centre lines: the first fault, or null. */

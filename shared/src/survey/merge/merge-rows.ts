@@ -52,7 +52,10 @@ function mergeDelete(
     merged.push(change);
     return;
   }
-  const message = `${sentenceStart(rowWords(document, change.kind, change.id))} was changed while you deleted it.`;
+  const message =
+    change.kind === 'corner'
+      ? 'A wall of what you deleted was moved by someone else.'
+      : `${sentenceStart(rowWords(document, change.kind, change.id))} was changed while you deleted it.`;
   clashes.push(clashOf(change, 'edited', null, change.before, stored, null, message));
 }
 
