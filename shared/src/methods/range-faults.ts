@@ -25,8 +25,11 @@ export function rangeFaults<S extends MethodInputs, R>(method: Method<S, R>, inp
     if (typeof value === 'number') {
       if (!(value >= min && value <= max)) faults.push(fault(name, spec, value));
     } else {
-      const outside = value.find((one) => !(one >= min && one <= max));
-      if (outside !== undefined) faults.push(fault(name, spec, outside));
+      for (const one of value) {
+        if (one >= min && one <= max) continue;
+        faults.push(fault(name, spec, one));
+        break;
+      }
     }
   }
   return faults;

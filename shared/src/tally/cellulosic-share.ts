@@ -8,9 +8,9 @@ export function cellulosicShare(heats: readonly EntryHeat[]): number {
   let cellulosic = 0;
   let all = 0;
   for (const { parts } of heats) {
-    for (const part of parts) {
-      all += part.counted;
-      if (part.cellulosic) cellulosic += part.counted;
+    for (const { part, counted } of parts) {
+      all += counted;
+      if (part.cellulosic) cellulosic += counted;
     }
   }
   return all > 0 ? cellulosic / all : 1;

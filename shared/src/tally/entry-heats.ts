@@ -4,7 +4,10 @@ import { protectedLoads } from '../methods/load/protected-loads.ts';
 import { partHeat, type PartHeat } from './part-heat.ts';
 import type { RoomInput, RoomInputEntry } from './room-input.ts';
 
-export interface EntryPartHeat extends PartHeat {
+export interface CountedPart {
+  /** Pieces of the entry. */
+  readonly count: number;
+  readonly part: PartHeat;
   readonly psi: number;
   /** count · mass · H · ψ, MJ */
   readonly counted: number;
@@ -12,7 +15,7 @@ export interface EntryPartHeat extends PartHeat {
 
 export interface EntryHeat {
   readonly entry: RoomInputEntry;
-  readonly parts: readonly EntryPartHeat[];
+  readonly parts: readonly CountedPart[];
   /** All pieces, kg. */
   readonly mass: number;
   /** With ψ, MJ. */
@@ -28,15 +31,15 @@ export function entryHeats(input: RoomInput): readonly EntryHeat[] {
   return plain.map(({ entry, parts }) => {
     let mass = 0;
     let counted = 0;
-    const withFactor = parts.map((part) => {
+    const countedParts = parts.map((part) => {
       const inRule = shares !== undefined && isProtected(entry, part);
       const psi = inRule ? (shares.get(entry) ?? 0) : factorOf(entry, part);
       const heat = entry.count * part.mass * part.heat * psi;
       mass += entry.count * part.mass;
       counted += heat;
-      return { ...part, psi, counted: heat };
+      return { count: entry.count, part, psi, counted: heat };
     });
-    return { entry, parts: withFactor, mass, counted };
+    return { entry, parts: countedParts, mass, counted };
   });
 }
 

@@ -5,7 +5,8 @@ import { perFloorUncertainty } from '../methods/uncertainty/per-floor-uncertaint
 import { AREA_SPREAD, CABINET, MASS_SPREAD, MOISTURE_SPREAD, OVERLOOKED } from '../uncertainty/survey-spread.ts';
 import { triangularDeviation, triangularMean } from '../uncertainty/triangular.ts';
 import { HEAT_OF_VAPORISATION_MJ_KG } from '../methods/heat/water.ts';
-import type { EntryHeat, EntryPartHeat } from './entry-heats.ts';
+import type { EntryHeat } from './entry-heats.ts';
+import type { PartHeat } from './part-heat.ts';
 import type { RoomTally } from './room-tally.ts';
 import type { TallyContext } from './tally-context.ts';
 
@@ -55,8 +56,8 @@ function sumInputs(heats: readonly EntryHeat[]) {
   heats.forEach(({ entry, parts }, index) => {
     const spread = MASS_SPREAD[entry.evidence ?? 'estimated'];
     let inCabinet = 0;
-    for (const part of parts) {
-      const mass = entry.count * part.mass * part.psi;
+    for (const { count, part, psi } of parts) {
+      const mass = count * part.mass * psi;
       inputs.M.push(mass);
       inputs.H.push(part.heat);
       inputs.u_M.push(mass * spread);
@@ -64,7 +65,7 @@ function sumInputs(heats: readonly EntryHeat[]) {
       inputs.entry.push(index);
       if (!materials.has(part.key)) materials.set(part.key, materials.size);
       inputs.material.push(materials.get(part.key) ?? 0);
-      if (part.psi === CABINET.mode) inCabinet += entry.count * part.mass * part.heat;
+      if (psi === CABINET.mode) inCabinet += count * part.mass * part.heat;
     }
     if (inCabinet > 0) inputs.u_psi.push(inCabinet * cabinet);
   });
@@ -72,7 +73,7 @@ function sumInputs(heats: readonly EntryHeat[]) {
 }
 
 /** Spread of a heat between low and high, and of its moisture where that was stated. */
-function heatDeviation(part: EntryPartHeat): number {
+function heatDeviation(part: PartHeat): number {
   const value = triangularDeviation(part.low, part.heat, part.high);
   return part.moist ? Math.hypot(value, MOISTURE_SPREAD * (part.heatDry + HEAT_OF_VAPORISATION_MJ_KG)) : value;
 }

@@ -7,7 +7,7 @@ import { combustionFactor } from '../methods/load/combustion-factor.ts';
 import { perEnclosure } from '../methods/load/per-enclosure.ts';
 import { perFloor } from '../methods/load/per-floor.ts';
 import { designLoadOf } from './design-factors.ts';
-import type { EntryHeat } from './entry-heats.ts';
+import type { CountedPart, EntryHeat } from './entry-heats.ts';
 import { loadBand } from './load-band.ts';
 import { localPeakOf } from './local-peak-of.ts';
 import { placeAmongUse } from './place-among-use.ts';
@@ -44,14 +44,14 @@ export function loadSection(
   const kept = (keeping: 'fixed' | 'stored' | 'passing') =>
     sumOfParts(allParts(heats.filter(({ entry }) => (entry.keeping ?? 'stored') === keeping)), context);
   const fixed = kept('fixed');
-  const m = factorOfRoom(input, heats, context);
+  const m = factorOfRoom(input, parts, context);
   const base = {
     total,
     fixed,
     stored: kept('stored'),
     passing: kept('passing'),
     combustionFactor: m,
-    byMaterial: sharesByMaterial(heats, Q, context),
+    byMaterial: sharesByMaterial(parts, Q, context),
     byEntry: sharesByEntry(heats, Q, context),
   };
   if (!(areas.floor > 0 && areas.enclosing > 0)) {
@@ -83,13 +83,12 @@ function optional<K extends string, V>(key: K, value: V | undefined): { readonly
 }
 
 /** m of the room: a person's own factor for everything, else the materials' weighted by heat. */
-function factorOfRoom(input: RoomInput, heats: readonly EntryHeat[], context: TallyContext) {
+function factorOfRoom(input: RoomInput, parts: readonly CountedPart[], context: TallyContext) {
   const own = input.options?.combustion_factor ?? null;
-  const counted = allParts(heats).map(({ part }) => part);
-  const Q = counted.map((part) => part.counted);
+  const Q = parts.map(({ counted }) => counted);
   return estimate(
     combustionFactor,
-    { m: counted.map((part) => own ?? part.combustionFactor), Q },
+    { m: parts.map(({ part }) => own ?? part.combustionFactor), Q },
     {
       workings: context.workings,
       origins: { m: own === null ? 'catalogue' : { origin: 'given', note: 'one factor for all contents' } },

@@ -1,13 +1,8 @@
-import { estimate, type Estimate, type EstimateWarning } from '../methods/estimate.ts';
+import { estimate, type Estimate, type EstimateWarning, type Origins } from '../methods/estimate.ts';
 import { fireLoad } from '../methods/load/fire-load.ts';
-import type { EntryHeat, EntryPartHeat } from './entry-heats.ts';
+import type { CountedPart, EntryHeat } from './entry-heats.ts';
 import type { EntryShare, MaterialShare } from './room-tally.ts';
 import type { TallyContext } from './tally-context.ts';
-
-interface CountedPart {
-  readonly count: number;
-  readonly part: EntryPartHeat;
-}
 
 /** Σ count · mass · H · ψ over some parts, as an estimate. */
 export function sumOfParts(
@@ -21,25 +16,31 @@ export function sumOfParts(
       n: parts.map(({ count }) => count),
       M: parts.map(({ part }) => part.mass),
       H: parts.map(({ part }) => part.heat),
-      psi: parts.map(({ part }) => part.psi),
+      psi: parts.map(({ psi }) => psi),
     },
     {
       workings: context.workings,
       warnings,
-      origins: {
-        n: 'given',
-        M: 'given',
-        H: parts.every(({ part }) => part.ownHeat)
-          ? { origin: 'given', note: 'copied into the entry when it was placed' }
-          : 'catalogue',
-        psi: { origin: 'default', note: 'from how each entry is enclosed' },
-      },
+      ...(context.workings ? { origins: originsOf(parts) } : {}),
     },
   );
 }
 
+function originsOf(parts: readonly CountedPart[]): Origins<typeof fireLoad.inputs> {
+  return {
+    n: 'given',
+    M: 'given',
+    H: parts.every(({ part }) => part.ownHeat)
+      ? { origin: 'given', note: 'copied into the entry when it was placed' }
+      : 'catalogue',
+    psi: { origin: 'default', note: 'from how each entry is enclosed' },
+  };
+}
+
 export function allParts(heats: readonly EntryHeat[]): CountedPart[] {
-  return heats.flatMap(({ entry, parts }) => parts.map((part) => ({ count: entry.count, part })));
+  const all: CountedPart[] = [];
+  for (const { parts } of heats) for (const part of parts) all.push(part);
+  return all;
 }
 
 /** Each entry's heat and its share, in the order of the contents. */
@@ -47,31 +48,28 @@ export function sharesByEntry(heats: readonly EntryHeat[], total: number, contex
   return heats.map((heat) => ({
     id: heat.entry.id,
     label: heat.entry.label ?? heat.entry.id,
-    heat: sumOfParts(
-      heat.parts.map((part) => ({ count: heat.entry.count, part })),
-      context,
-    ),
+    heat: sumOfParts(heat.parts, context),
     mass_kg: heat.mass,
     share: shareOf(heat.counted, total),
   }));
 }
 
 /** Heat by material, largest first; parts with a heat of their own stand under their own label. */
-export function sharesByMaterial(heats: readonly EntryHeat[], total: number, context: TallyContext): MaterialShare[] {
+export function sharesByMaterial(parts: readonly CountedPart[], total: number, context: TallyContext): MaterialShare[] {
   const groups = new Map<string, CountedPart[]>();
-  for (const counted of allParts(heats)) {
+  for (const counted of parts) {
     const group = groups.get(counted.part.key);
     if (group) group.push(counted);
     else groups.set(counted.part.key, [counted]);
   }
   return [...groups]
-    .map(([key, parts]) => {
-      const heat = sumOfParts(parts, context);
+    .map(([key, group]) => {
+      const heat = sumOfParts(group, context);
       return {
         material: key,
-        label: parts[0]!.part.material?.label ?? parts[0]!.part.label,
+        label: group[0]!.part.material?.label ?? group[0]!.part.label,
         heat,
-        mass_kg: parts.reduce((sum, { count, part }) => sum + count * part.mass, 0),
+        mass_kg: group.reduce((sum, { count, part }) => sum + count * part.mass, 0),
         share: shareOf(heat.value ?? 0, total),
       };
     })

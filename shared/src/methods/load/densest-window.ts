@@ -1,6 +1,7 @@
 import { footprint, type Footprint } from '../../geometry/footprint.ts';
 import type { Ring } from '../../geometry/point.ts';
 import { overlapArea } from './overlap-area.ts';
+import { windowBounds, type HeatBox } from './window-bounds.ts';
 
 export interface PlacedLoad {
   /** MJ */
@@ -16,12 +17,7 @@ export interface DensestWindow {
   readonly y: number;
 }
 
-interface Box {
-  readonly heat: number;
-  readonly x0: number;
-  readonly x1: number;
-  readonly y0: number;
-  readonly y1: number;
+interface Box extends HeatBox {
   readonly area: number;
   /** For a footprint that is turned off the axes. */
   readonly ring: Ring | undefined;
@@ -34,8 +30,11 @@ interface Position {
 }
 
 const SIDE_M = 2;
-const REFINED = 8;
-const FINEST_STEP_M = 0.002;
+const REFINED = 3;
+const FIRST_STEP_M = 0.25;
+const FINEST_STEP_M = 0.004;
+/** How far the improvement of a start may wander. */
+const REACH_M = 1;
 
 /**
  * The window of 2 × 2 m with the most heat. For footprints along the axes the heat inside a window is piecewise
@@ -73,28 +72,37 @@ function boxOf({ heat, footprint: rectangle }: PlacedLoad): Box {
   };
 }
 
-/** The best position of every promising column, best columns first, a few at most. */
+/** The best position of the best columns, best first, a few at most. Columns that cannot win are left out. */
 function sweep(boxes: readonly Box[], keep: number): Position[] {
+  if (boxes.length === 0) return [];
+  const bounds = windowBounds(boxes, SIDE_M);
   const columns = new Set<number>();
   for (const { x0, x1 } of boxes) columns.add(x0).add(x1 - SIDE_M);
   const events = yEvents(boxes);
   const weights = new Float64Array(boxes.length);
-  let kept: Position[] = [];
-  for (const x of columns) {
-    let strip = 0;
-    for (let i = 0; i < boxes.length; i += 1) {
-      const { x0, x1, heat } = boxes[i]!;
-      const across = Math.min(x1, x + SIDE_M) - Math.max(x0, x);
-      const share = across > 0 ? (heat * across) / (x1 - x0) : 0;
-      weights[i] = share / (boxes[i]!.y1 - boxes[i]!.y0);
-      strip += share;
-    }
+  const weigh = weigher(boxes);
+  let kept: Position[] = [bounds.start];
+  for (const x of [...columns].sort((a, b) => bounds.most(b) - bounds.most(a))) {
     const worst = kept.length < keep ? 0 : kept[kept.length - 1]!.heat;
-    if (strip <= worst) continue;
+    if (bounds.most(x) <= worst) break;
+    weigh(x, weights);
     const best = sweepColumn(x, events, weights);
     if (best.heat > worst) kept = [...kept, best].sort((a, b) => b.heat - a.heat).slice(0, keep);
   }
   return kept;
+}
+
+/** Heat of each box per metre of height, as far as the column at x takes it in. */
+function weigher(boxes: readonly Box[]): (x: number, weights: Float64Array) => void {
+  const from = Float64Array.from(boxes, ({ x0 }) => x0);
+  const to = Float64Array.from(boxes, ({ x1 }) => x1);
+  const perArea = Float64Array.from(boxes, ({ heat, x0, x1, y0, y1 }) => heat / ((x1 - x0) * (y1 - y0)));
+  return (x, weights) => {
+    for (let i = 0; i < weights.length; i += 1) {
+      const across = Math.min(to[i]!, x + SIDE_M) - Math.max(from[i]!, x);
+      weights[i] = across > 0 ? across * perArea[i]! : 0;
+    }
+  };
 }
 
 interface Events {
@@ -105,17 +113,18 @@ interface Events {
 
 /** Where the slope of a box's share in a window changes as the window moves up: rises, flat, falls. */
 function yEvents(boxes: readonly Box[]): Events {
-  const raw = boxes.flatMap(({ y0, y1 }, box) => [
-    { at: y0 - SIDE_M, box, sign: 1 },
-    { at: Math.min(y0, y1 - SIDE_M), box, sign: -1 },
-    { at: Math.max(y0, y1 - SIDE_M), box, sign: -1 },
-    { at: y1, box, sign: 1 },
-  ]);
-  raw.sort((a, b) => a.at - b.at);
+  const at = new Float64Array(boxes.length * 4);
+  boxes.forEach(({ y0, y1 }, box) => {
+    at[4 * box] = y0 - SIDE_M;
+    at[4 * box + 1] = Math.min(y0, y1 - SIDE_M);
+    at[4 * box + 2] = Math.max(y0, y1 - SIDE_M);
+    at[4 * box + 3] = y1;
+  });
+  const order = Int32Array.from(at, (_, event) => event).sort((a, b) => at[a]! - at[b]!);
   return {
-    at: Float64Array.from(raw, (event) => event.at),
-    box: Int32Array.from(raw, (event) => event.box),
-    sign: Int8Array.from(raw, (event) => event.sign),
+    at: Float64Array.from(order, (event) => at[event]!),
+    box: Int32Array.from(order, (event) => event >> 2),
+    sign: Int8Array.from(order, (event) => (event % 4 === 0 || event % 4 === 3 ? 1 : -1)),
   };
 }
 
@@ -149,7 +158,8 @@ function heatInside(boxes: readonly Box[], x: number, y: number): number {
     const across = Math.min(x1, x + SIDE_M) - Math.max(x0, x);
     const along = Math.min(y1, y + SIDE_M) - Math.max(y0, y);
     if (across <= 0 || along <= 0) continue;
-    const inside = ring === undefined ? across * along : overlapArea(ring, x, y, x + SIDE_M, y + SIDE_M);
+    const whole = across >= x1 - x0 && along >= y1 - y0;
+    const inside = whole ? area : ring === undefined ? across * along : overlapArea(ring, x, y, x + SIDE_M, y + SIDE_M);
     sum += heat * Math.min(1, inside / area);
   }
   return sum;
@@ -167,7 +177,8 @@ function climb(boxes: readonly Box[], start: Position): Position {
       .map(([dx, dy]) => ({ x: best.x + dx!, y: best.y + dy! }))
       .map(({ x, y }) => ({ x, y, heat: heatInside(boxes, x, y) }))
       .reduce(hotter);
-    if (next.heat > best.heat) best = next;
+    const near = Math.abs(next.x - start.x) <= REACH_M && Math.abs(next.y - start.y) <= REACH_M;
+    if (near && next.heat > best.heat) best = next;
     else step /= 2;
   }
   return best;
