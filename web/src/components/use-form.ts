@@ -30,6 +30,8 @@ interface FieldTies {
 export interface Form<V extends Texts<V>> {
   readonly values: V;
   readonly set: <K extends keyof V & string>(name: K, value: V[K]) => void;
+  /** Sets several fields at once, as when one answer suggests others. */
+  readonly fill: (patch: Partial<V>) => void;
   /** What a text field needs, its error included. */
   readonly field: (name: keyof V & string) => FieldTies;
   readonly summary: { readonly errors: readonly SummaryError[]; readonly attempt: number };
@@ -79,11 +81,17 @@ export function useForm<V extends Texts<V>>(options: FormOptions<V>): Form<V> {
   ];
   useErrorTitle(summaryErrors.length > 0);
 
-  const set = <K extends keyof V & string>(name: K, value: V[K]) => {
-    const next = { ...values, [name]: value };
+  const fill = (patch: Partial<V>) => {
+    const next = { ...values, ...patch };
     setValues(next);
-    setErrors(({ [name]: _gone, ...rest }) => rest as FieldErrors<V>);
+    setErrors((current) => {
+      const still = Object.entries(current).filter(([name]) => !(name in patch));
+      return Object.fromEntries(still) as FieldErrors<V>;
+    });
     if (options.keep) draft.keep(pick(next, options.keep));
+  };
+  const set = <K extends keyof V & string>(name: K, value: V[K]) => {
+    fill({ [name]: value } as unknown as Partial<V>);
   };
 
   const refuse = (fieldErrors: FieldErrors<V>, messages: readonly string[]) => {
@@ -125,6 +133,7 @@ export function useForm<V extends Texts<V>>(options: FormOptions<V>): Form<V> {
   return {
     values,
     set,
+    fill,
     field: (name) => ({
       id: fieldId(name),
       name,

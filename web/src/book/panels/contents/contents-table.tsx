@@ -1,0 +1,131 @@
+import { editEntries } from '@embertally/shared/survey/commands/edit-entries';
+import type { Entry, Room } from '@embertally/shared/survey/survey-document';
+import { displayUnit } from '@embertally/shared/units/display-unit';
+import { useVirtualizer } from '@tanstack/react-virtual';
+import { lazy, Suspense, useCallback, useMemo, useRef, useState } from 'react';
+import { useUnits } from '../../../lib/units-context.ts';
+import { useBook } from '../../session/use-book.ts';
+import { useRoomTally } from '../../session/use-room-tally.ts';
+import { useRunBack } from '../run-back.ts';
+import { useRowFocus } from '../use-row-focus.ts';
+import { EntryRow } from './entry-row.tsx';
+
+const EntryDialog = lazy(() => import('./entry-dialog.tsx').then((module) => ({ default: module.EntryDialog })));
+
+/** From so many rows on only those in sight are in the page. */
+const LONG = 200;
+const ROW_PX = 46;
+
+interface ContentsTableProps {
+  readonly room: Room;
+  readonly entries: readonly Entry[];
+  readonly canEdit: boolean;
+}
+
+/** The contents of a room, changed where they stand. */
+export function ContentsTable({ room, entries, canEdit }: ContentsTableProps) {
+  const units = useUnits();
+  const runBack = useRunBack();
+  const tally = useRoomTally(room.id);
+  const picked = useBook((state) => state.selection);
+  const [open, setOpen] = useState<string | null>(null);
+  const { rootRef, focusAfter } = useRowFocus<HTMLDivElement>();
+  const scroll = useRef<HTMLDivElement | null>(null);
+  const long = entries.length > LONG;
+  const heats = useMemo(
+    () => new Map((tally?.load.byEntry ?? []).map((share) => [share.id, share.heat.value])),
+    [tally],
+  );
+  const pickedIds = useMemo(() => new Set(picked.map((one) => one.id)), [picked]);
+  const virtual = useVirtualizer({
+    count: entries.length,
+    getScrollElement: () => scroll.current,
+    estimateSize: () => ROW_PX,
+    overscan: 12,
+    enabled: long,
+  });
+  const edit = useCallback(
+    (entry: Entry, patch: Partial<Omit<Entry, 'id' | 'room_id'>>) =>
+      runBack(editEntries, { entry_ids: [entry.id], patch }, `Changed ${entry.label}`),
+    [runBack],
+  );
+  const items = virtual.getVirtualItems();
+  const before = long ? (items[0]?.start ?? 0) : 0;
+  const after = long ? virtual.getTotalSize() - (items.at(-1)?.end ?? 0) : 0;
+  const shown = long ? items.map((item) => item.index) : entries.map((_entry, index) => index);
+  const symbol = (unit: string): string => displayUnit(unit, units)?.symbol ?? unit;
+  const opened = open === null ? undefined : entries.find((entry) => entry.id === open);
+
+  return (
+    <div ref={rootRef} tabIndex={-1}>
+      <div
+        ref={scroll}
+        className="rows-scroll"
+        data-long={long ? 'yes' : 'no'}
+        role="region"
+        aria-label={`Contents of ${room.name}`}
+        tabIndex={0}
+      >
+        <table className="ledger" aria-rowcount={long ? entries.length + 1 : undefined}>
+          <caption>
+            {entries.length === 1 ? '1 entry' : `${entries.length} entries`} in {room.name}
+          </caption>
+          <thead>
+            <tr aria-rowindex={long ? 1 : undefined}>
+              <th scope="col">Entry</th>
+              <th scope="col">Count</th>
+              <th scope="col">Mass of one, {symbol('kg')}</th>
+              <th scope="col">Kept</th>
+              <th scope="col">How known</th>
+              <th scope="col" data-align="end">
+                Heat, {symbol('MJ')}
+              </th>
+              <th scope="col">{canEdit ? 'Change' : 'Read'}</th>
+            </tr>
+          </thead>
+          <tbody>
+            {before > 0 && (
+              <tr aria-hidden="true">
+                <td colSpan={7} style={{ height: before, padding: 0 }} />
+              </tr>
+            )}
+            {shown.map((index) => {
+              const entry = entries[index];
+              if (entry === undefined) return null;
+              return (
+                <EntryRow
+                  key={entry.id}
+                  entry={entry}
+                  heat_MJ={heats.get(entry.id) ?? null}
+                  canEdit={canEdit}
+                  picked={pickedIds.has(entry.id)}
+                  rowIndex={long ? index + 2 : undefined}
+                  edit={edit}
+                  onOpen={setOpen}
+                  onLeave={focusAfter}
+                />
+              );
+            })}
+            {after > 0 && (
+              <tr aria-hidden="true">
+                <td colSpan={7} style={{ height: after, padding: 0 }} />
+              </tr>
+            )}
+          </tbody>
+        </table>
+      </div>
+      {opened !== undefined && (
+        <Suspense fallback={null}>
+          <EntryDialog
+            entry={opened}
+            canEdit={canEdit}
+            edit={edit}
+            onClose={() => {
+              setOpen(null);
+            }}
+          />
+        </Suspense>
+      )}
+    </div>
+  );
+}

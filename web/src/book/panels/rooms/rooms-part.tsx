@@ -1,0 +1,171 @@
+import { deleteRoom } from '@embertally/shared/survey/commands/delete-room';
+import { roomHeight } from '@embertally/shared/survey/derive/room-height';
+import { displayUnit } from '@embertally/shared/units/display-unit';
+import { useState } from 'react';
+import { Button } from '../../../components/button.tsx';
+import { ConfirmDialog } from '../../../components/confirm-dialog.tsx';
+import { Disclosure } from '../../../components/disclosure.tsx';
+import type { Sort } from '../../../components/sort.ts';
+import { StandingMark } from '../../../components/standing-mark.tsx';
+import { type Column, Table } from '../../../components/table.tsx';
+import { useUnits } from '../../../lib/units-context.ts';
+import { useBook } from '../../session/use-book.ts';
+import { useBookSession } from '../../session/use-book-session.ts';
+import { useQuantity } from '../../tally/use-quantity.ts';
+import { type RoomRow, useRoomRows } from '../../tally/use-room-rows.ts';
+import { useOpenTables } from '../tables-context.ts';
+import { AddRoomForm } from './add-room-form.tsx';
+import { liningWords, protectionWords, wordsOfUse } from './room-words.ts';
+
+/** The rooms of the storey as a table, and a form to add one from typed lengths. */
+export function RoomsPart() {
+  const session = useBookSession();
+  const openTables = useOpenTables();
+  const units = useUnits();
+  const show = useQuantity();
+  const rows = useRoomRows('storey');
+  const document = useBook((state) => state.document);
+  const inHand = useBook((state) => state.roomInHand);
+  const canEdit = useBook((state) => state.canEdit);
+  const [sort, setSort] = useState<Sort | null>(null);
+  const [leaving, setLeaving] = useState<RoomRow | null>(null);
+  const symbol = (unit: string): string => displayUnit(unit, units)?.symbol ?? unit;
+
+  const columns: readonly Column<RoomRow>[] = [
+    {
+      key: 'name',
+      header: 'Room',
+      rowHeader: true,
+      sortBy: (row) => row.room.name,
+      cell: (row) => (
+        <button
+          type="button"
+          className="row-name"
+          aria-current={row.room.id === inHand ? 'true' : undefined}
+          onClick={() => {
+            session.takeRoom(row.room.id);
+          }}
+        >
+          {row.room.name}
+        </button>
+      ),
+    },
+    { key: 'use', header: 'Use', sortBy: (row) => row.room.use, cell: (row) => wordsOfUse(row.room.use) },
+    {
+      key: 'height',
+      header: `Height, ${symbol('m')}`,
+      numeric: true,
+      sortBy: (row) => roomHeight(document, row.room),
+      cell: (row) => show(roomHeight(document, row.room), 'm').text,
+    },
+    {
+      key: 'area',
+      header: `Area, ${symbol('m2')}`,
+      numeric: true,
+      sortBy: (row) => row.area_m2,
+      cell: (row) => (row.area_m2 === null ? '–' : show(row.area_m2, 'm2').text),
+    },
+    { key: 'lining', header: 'Linings', cell: (row) => liningWords(row.room.lining) },
+    { key: 'protection', header: 'Protection', cell: (row) => protectionWords(row.room.protection) },
+    {
+      key: 'rating',
+      header: 'Rating, min',
+      numeric: true,
+      sortBy: (row) => row.room.rating_min,
+      cell: (row) => row.room.rating_min ?? '–',
+    },
+    {
+      key: 'entries',
+      header: 'Entries',
+      numeric: true,
+      sortBy: (row) => row.entries,
+      cell: (row) => row.entries,
+    },
+    {
+      key: 'density',
+      header: `Load, ${symbol('MJ/m2')}`,
+      numeric: true,
+      sortBy: (row) => row.density_MJ_m2,
+      cell: (row) => (row.density_MJ_m2 === null ? '–' : show(row.density_MJ_m2, 'MJ/m2').text),
+    },
+    {
+      key: 'standing',
+      header: 'Standing',
+      sortBy: (row) => row.standing,
+      cell: (row) => <StandingMark standing={row.standing} />,
+    },
+    {
+      key: 'do',
+      header: canEdit ? 'Change' : 'Read',
+      cell: (row) => (
+        <span className="flex flex-wrap gap-x-3">
+          <Button
+            look="quiet"
+            size="small"
+            aria-label={canEdit ? `Edit ${row.room.name}` : `All of ${row.room.name}`}
+            onClick={() => {
+              session.takeRoom(row.room.id);
+              openTables('room');
+            }}
+          >
+            {canEdit ? 'Edit' : 'All of it'}
+          </Button>
+          {canEdit && (
+            <Button
+              look="quiet"
+              size="small"
+              aria-label={`Delete ${row.room.name}`}
+              onClick={() => {
+                setLeaving(row);
+              }}
+            >
+              Delete
+            </Button>
+          )}
+        </span>
+      ),
+    },
+  ];
+
+  return (
+    <div className="grid gap-4">
+      {canEdit && (
+        <Disclosure title="Add a room by its measures" open={rows.length === 0}>
+          <AddRoomForm />
+        </Disclosure>
+      )}
+      {rows.length === 0 ? (
+        <p className="text-soft">No room on this storey yet.</p>
+      ) : (
+        <Table
+          caption={rows.length === 1 ? '1 room on this storey' : `${rows.length} rooms on this storey`}
+          columns={columns}
+          rows={rows}
+          rowKey={(row) => row.room.id}
+          sort={sort}
+          onSort={setSort}
+          narrow="scroll"
+        />
+      )}
+      <ConfirmDialog
+        open={leaving !== null}
+        title={`Delete ${leaving?.room.name ?? 'the room'}`}
+        confirm="Delete the room"
+        onClose={() => {
+          setLeaving(null);
+        }}
+        onConfirm={() => {
+          if (leaving !== null) session.run(deleteRoom, { room_id: leaving.room.id }, `Deleted ${leaving.room.name}`);
+          setLeaving(null);
+        }}
+      >
+        <p>
+          {leaving?.entries === 0
+            ? 'It has no contents.'
+            : `Its ${leaving?.entries === 1 ? 'one entry goes' : `${leaving?.entries ?? 0} entries go`} with it.`}{' '}
+          Walls and openings shared with other rooms stay. Undo brings everything back.
+        </p>
+      </ConfirmDialog>
+    </div>
+  );
+}
