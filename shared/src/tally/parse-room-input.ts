@@ -1,7 +1,9 @@
 import type { z } from 'zod/mini';
+import { ringInRegion } from '../geometry/ring-in-region.ts';
 import { liningByKey } from '../catalogue/linings.ts';
 import { materialByKey } from '../catalogue/materials.ts';
 import { useByKey } from '../catalogue/uses.ts';
+import { pointsOf } from './points-of.ts';
 import { ringFault } from './ring-fault.ts';
 import { roomInputSchema, type RoomInput, type RoomInputEntry } from './room-input.ts';
 
@@ -25,7 +27,7 @@ const UUID = /^[0-9a-f]{8}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{12}$/i;
  * The rules that need whole fields run once the fields themselves are sound.
  */
 export function parseRoomInput(candidate: unknown): ParsedRoomInput {
-  const parsed = roomInputSchema.safeParse(candidate);
+  const parsed = roomInputSchema.safeParse(candidate, { reportInput: true });
   if (!parsed.success) return { ok: false, errors: parsed.error.issues.flatMap((issue) => schemaFaults(issue)) };
   const errors = [...roomFaults(parsed.data), ...contentsFaults(parsed.data)];
   return errors.length === 0 ? { ok: true, value: parsed.data } : { ok: false, errors };
@@ -107,6 +109,7 @@ function roomFaults({ room }: RoomInput): RoomInputFault[] {
     const fault = ringFault(ring);
     if (fault) add(pointer, fault.code, fault.message);
   }
+  if (faults.length === 0) faults.push(...holeFaults(room));
   if (room.use != null && !useByKey(room.use)) add('/room/use', 'unknown_key', unknownKey('use', room.use));
   for (const side of ['walls', 'ceiling', 'floor'] as const) {
     const surface = room.lining?.[side];
@@ -125,6 +128,23 @@ function roomFaults({ room }: RoomInput): RoomInputFault[] {
     }
   });
   return faults;
+}
+
+/** A hole lies in the room, so that floor is taken off once and never below nothing. */
+function holeFaults(room: RoomInput['room']): RoomInputFault[] {
+  const outer = pointsOf(room.ring_m);
+  const holes = (room.holes_m ?? []).map(pointsOf);
+  return holes.flatMap((hole, i) =>
+    ringInRegion(hole, { ring: outer, holes: holes.slice(0, i) })
+      ? []
+      : [
+          {
+            pointer: `/room/holes_m/${i}`,
+            code: 'hole_outside',
+            message: 'The hole reaches outside the room or over another hole.',
+          },
+        ],
+  );
 }
 
 function contentsFaults({ contents }: RoomInput): RoomInputFault[] {

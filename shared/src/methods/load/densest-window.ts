@@ -165,9 +165,12 @@ function heatInside(boxes: readonly Box[], x: number, y: number): number {
   return sum;
 }
 
-function climb(boxes: readonly Box[], start: Position): Position {
+function climb(all: readonly Box[], start: Position): Position {
+  const [x, y] = [start.x - REACH_M, start.y - REACH_M];
+  const span = SIDE_M + 2 * REACH_M;
+  const boxes = all.filter(({ x0, x1, y0, y1 }) => x1 > x && x0 < x + span && y1 > y && y0 < y + span);
   let best: Position = { ...start, heat: heatInside(boxes, start.x, start.y) };
-  for (let step = SIDE_M / 4; step > FINEST_STEP_M;) {
+  for (let step = FIRST_STEP_M; step > FINEST_STEP_M;) {
     const next = [
       [step, 0],
       [-step, 0],
