@@ -57,7 +57,7 @@ export class Fault extends Error {
 
   static invalid(errors: readonly InputFault[], detail?: string): Fault {
     const first = errors[0]?.message ?? 'Something in it does not fit.';
-    const rest = errors.length > 1 ? ` (and ${errors.length - 1} more)` : '';
+    const rest = errors.length > 1 ? ` It is one of ${errors.length} faults.` : '';
     return new Fault('invalid', 'invalid-input', detail ?? `Nothing was changed. ${first}${rest}`, { errors });
   }
 }

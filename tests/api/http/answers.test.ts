@@ -79,10 +79,10 @@ describe('every answer', () => {
   });
 
   it('names every fault of a body, where it is', async () => {
-    const { body } = await person.visitor
+    const answer = await person.visitor
       .post('/api/sites', { name: 5, address: 'x'.repeat(501), extra: true })
       .expect(422);
-    expect((body as { errors: object[] }).errors).toEqual(
+    expect((answer.body as { errors: object[] }).errors).toEqual(
       expect.arrayContaining([
         expect.objectContaining({ pointer: '/name', message: 'name must be text.' }),
         expect.objectContaining({ pointer: '/address', message: 'address must be at most 500 characters.' }),
@@ -150,8 +150,11 @@ describe('reading', () => {
 
 describe('the description', () => {
   it('is OpenAPI 3.1 with a policy at every operation', async () => {
-    const { body } = await app.visitor().get('/api/openapi.json').expect(200);
-    const described = body as { openapi: string; paths: Record<string, Record<string, Record<string, unknown>>> };
+    const answer = await app.visitor().get('/api/openapi.json').expect(200);
+    const described = answer.body as {
+      openapi: string;
+      paths: Record<string, Record<string, Record<string, unknown>>>;
+    };
     expect(described.openapi).toBe('3.1.0');
     const operations = Object.values(described.paths).flatMap((methods) => Object.values(methods));
     expect(operations.length).toBeGreaterThan(30);

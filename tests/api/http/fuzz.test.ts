@@ -11,14 +11,16 @@ beforeAll(async () => {
   app = await TestApp.open();
   person = await app.person();
   book = await app.book(person);
-  const { body } = await app.visitor().get('/api/openapi.json').expect(200);
-  operations = Object.entries((body as { paths: Record<string, object> }).paths).flatMap(([path, methods]) =>
+  const answer = await app.visitor().get('/api/openapi.json').expect(200);
+  operations = Object.entries((answer.body as { paths: Record<string, object> }).paths).flatMap(([path, methods]) =>
     Object.keys(methods)
       .filter(() => !/events|sessions\/current|file$/.test(path))
       .map((method) => ({ method: method as 'get', path })),
   );
 });
 afterAll(() => app.close());
+
+const encoded = (text: string): string => encodeURIComponent(text.replace(/\p{Surrogate}/gu, '?'));
 
 const odd = fc.oneof(
   fc.constantFrom<unknown>(
@@ -92,7 +94,7 @@ const query = fc.oneof(
       fc.constantFrom('after', 'limit', 'cursor', 'search', 'before', 'workings', 'sort', '__proto__'),
       fc.string({ unit: 'binary', maxLength: 30 }),
     )
-    .map(([name, value]) => `?${name}=${encodeURIComponent(value.toWellFormed())}`),
+    .map(([name, value]) => `?${name}=${encoded(value)}`),
   fc.constantFrom('?after=0&after=1', '?limit[]=1', '?cursor[a]=1', '?after=%00', '?limit=1e9', '?search=%25_%27'),
 );
 
@@ -109,7 +111,7 @@ describe('whatever is sent', () => {
         async (which, sent, asked, own, id) => {
           const operation = operations[which % operations.length];
           if (operation === undefined) return;
-          const text = typeof id === 'string' ? encodeURIComponent(id.toWellFormed().slice(0, 300)) || 'x' : 'nothing';
+          const text = typeof id === 'string' ? encoded(id.slice(0, 300)) || 'x' : 'nothing';
           const path = operation.path.replace(
             /\{(\w+)\}/g,
             (_match, name: string) => (own ? ids[name] : undefined) ?? text,
