@@ -8,7 +8,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { t: 15 },
     expected: { value: 738.56 },
     tolerance: { abs: 0.01 },
-    origin: 'published',
+    origin: 'independent',
     source: 'EN 1991-1-2 3.2.1 / CTE DB-SI B.1',
   },
   {
@@ -26,7 +26,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { t: 30 },
     expected: { value: 841.8 },
     tolerance: { abs: 0.01 },
-    origin: 'published',
+    origin: 'independent',
     source: 'EN 1991-1-2 3.2.1 / CTE DB-SI B.1',
   },
   {
@@ -44,7 +44,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { t: 45 },
     expected: { value: 902.34 },
     tolerance: { abs: 0.01 },
-    origin: 'published',
+    origin: 'independent',
     source: 'EN 1991-1-2 3.2.1 / CTE DB-SI B.1',
   },
   {
@@ -62,7 +62,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { t: 60 },
     expected: { value: 945.34 },
     tolerance: { abs: 0.01 },
-    origin: 'published',
+    origin: 'independent',
     source: 'EN 1991-1-2 3.2.1 / CTE DB-SI B.1',
   },
   {
@@ -80,7 +80,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { t: 90 },
     expected: { value: 1005.99 },
     tolerance: { abs: 0.01 },
-    origin: 'published',
+    origin: 'independent',
     source: 'EN 1991-1-2 3.2.1 / CTE DB-SI B.1',
   },
   {
@@ -98,7 +98,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { t: 120 },
     expected: { value: 1049.04 },
     tolerance: { abs: 0.01 },
-    origin: 'published',
+    origin: 'independent',
     source: 'EN 1991-1-2 3.2.1 / CTE DB-SI B.1',
   },
   {
@@ -116,7 +116,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { t: 180 },
     expected: { value: 1109.74 },
     tolerance: { abs: 0.01 },
-    origin: 'published',
+    origin: 'independent',
     source: 'EN 1991-1-2 3.2.1 / CTE DB-SI B.1',
   },
   {
@@ -134,7 +134,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { t: 240 },
     expected: { value: 1152.82 },
     tolerance: { abs: 0.01 },
-    origin: 'published',
+    origin: 'independent',
     source: 'EN 1991-1-2 3.2.1 / CTE DB-SI B.1',
   },
   {
@@ -152,7 +152,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { t: 5 },
     expected: { value: 588.46 },
     tolerance: { abs: 0.2 },
-    origin: 'published',
+    origin: 'independent',
     source: 'EN 1991-1-2 3.2.2; Steel Buildings in Europe pt 7 and DM 9/3/2007',
   },
   {
@@ -162,7 +162,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     expected: { value: 947.71 },
     tolerance: { abs: 0.2 },
     origin: 'independent',
-    source: 'EN 1991-1-2 3.2.3; same',
+    source: 'EN 1991-1-2 3.2.3',
   },
   {
     id: 'EXT-30',
@@ -170,7 +170,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { t: 30 },
     expected: { value: 679.97 },
     tolerance: { abs: 0.2 },
-    origin: 'published',
+    origin: 'independent',
     source: 'EN 1991-1-2 3.2.2; Steel Buildings in Europe pt 7 and DM 9/3/2007',
   },
   {
@@ -180,7 +180,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     expected: { value: 1097.66 },
     tolerance: { abs: 0.2 },
     origin: 'independent',
-    source: 'EN 1991-1-2 3.2.3; same',
+    source: 'EN 1991-1-2 3.2.3',
   },
   {
     id: 'EXT-60',
@@ -188,7 +188,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { t: 60 },
     expected: { value: 680 },
     tolerance: { abs: 0.2 },
-    origin: 'published',
+    origin: 'independent',
     source: 'EN 1991-1-2 3.2.2; Steel Buildings in Europe pt 7 and DM 9/3/2007',
   },
   {
@@ -198,7 +198,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     expected: { value: 1099.98 },
     tolerance: { abs: 0.2 },
     origin: 'independent',
-    source: 'EN 1991-1-2 3.2.3; same',
+    source: 'EN 1991-1-2 3.2.3',
   },
   {
     id: 'param-ref-ISO-like',
@@ -420,8 +420,8 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { H: 2.5, alpha_v: 0.05, alpha_h: 0 },
     expected: { w_f: 2.5624 },
     tolerance: { abs: 0.002 },
-    origin: 'published',
-    source: 'EN 1991-1-2 Annex F (F.3); CTE DB-SI B.3 with printed table (confirmed, all 20 table cells reproduced)',
+    origin: 'independent',
+    source: 'EN 1991-1-2 Annex F (F.3); CTE DB-SI B.3 (formula; its printed table is checked cell by cell)',
   },
   {
     id: 'wf-3.0-0.1',
@@ -429,8 +429,8 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { H: 3, alpha_v: 0.1, alpha_h: 0 },
     expected: { w_f: 1.6608 },
     tolerance: { abs: 0.002 },
-    origin: 'published',
-    source: 'EN 1991-1-2 Annex F (F.3); CTE DB-SI B.3 with printed table (confirmed, all 20 table cells reproduced)',
+    origin: 'independent',
+    source: 'EN 1991-1-2 Annex F (F.3); CTE DB-SI B.3 (formula; its printed table is checked cell by cell)',
   },
   {
     id: 'wf-3.5-0.15',
@@ -438,8 +438,8 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { H: 3.5, alpha_v: 0.15, alpha_h: 0 },
     expected: { w_f: 1.1421 },
     tolerance: { abs: 0.002 },
-    origin: 'published',
-    source: 'EN 1991-1-2 Annex F (F.3); CTE DB-SI B.3 with printed table (confirmed, all 20 table cells reproduced)',
+    origin: 'independent',
+    source: 'EN 1991-1-2 Annex F (F.3); CTE DB-SI B.3 (formula; its printed table is checked cell by cell)',
   },
   {
     id: 'wf-4.0-0.25',
@@ -447,8 +447,8 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { H: 4, alpha_v: 0.25, alpha_h: 0 },
     expected: { w_f: 0.7517 },
     tolerance: { abs: 0.002 },
-    origin: 'published',
-    source: 'EN 1991-1-2 Annex F (F.3); CTE DB-SI B.3 with printed table (confirmed, all 20 table cells reproduced)',
+    origin: 'independent',
+    source: 'EN 1991-1-2 Annex F (F.3); CTE DB-SI B.3 (formula; its printed table is checked cell by cell)',
   },
   {
     id: 'wf-roof-3.0-0.1-0.05',
@@ -456,7 +456,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { H: 3, alpha_v: 0.1, alpha_h: 0.05 },
     expected: { w_f: 1.1633, b_v: 24.875 },
     tolerance: { abs: 0.002 },
-    origin: 'published',
+    origin: 'independent',
     source: 'CTE DB-SI B.3/B.5',
   },
   {
@@ -465,7 +465,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { H: 4, alpha_v: 0.05, alpha_h: 0.1 },
     expected: { w_f: 1.2313, b_v: 18.7188 },
     tolerance: { abs: 0.002 },
-    origin: 'published',
+    origin: 'independent',
     source: 'CTE DB-SI B.3/B.5',
   },
   {
@@ -493,7 +493,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { H: 3, alpha_v: 0.15, alpha_h: 0 },
     expected: { w_f: 1.1961 },
     tolerance: { rel: 0.002 },
-    origin: 'published',
+    origin: 'independent',
     source: 'EN Annex F / DB-SI B.2',
   },
   {
@@ -502,7 +502,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { q_fd: 600, k_b: 0.07, w_f: 1.1961, k_c: 1 },
     expected: { value: 50.24 },
     tolerance: { rel: 0.002 },
-    origin: 'published',
+    origin: 'independent',
     source: 'EN Annex F / DB-SI B.2',
   },
   {
@@ -531,7 +531,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { O: 0.06 },
     expected: { value: 0.822 },
     tolerance: { rel: 0.002 },
-    origin: 'published',
+    origin: 'independent',
     source: 'EN Table F.1 / DB-SI Table B.1',
   },
   {
@@ -540,7 +540,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { q_fd: 400, k_b: 0.055, w_f: 1.2, k_c: 0.822 },
     expected: { value: 21.701 },
     tolerance: { rel: 0.002 },
-    origin: 'published',
+    origin: 'independent',
     source: 'EN Table F.1 / DB-SI Table B.1',
   },
   {
@@ -549,7 +549,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { O: 0.05, A_f: 36, A_t: 132 },
     expected: { value: 1.2197 },
     tolerance: { rel: 0.001 },
-    origin: 'published',
+    origin: 'independent',
     source: 'DB-SI B.6',
   },
   {
@@ -558,7 +558,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { q_0: 500, A_f: 36, A_t: 132, f: 0.05 },
     expected: { value: 2439.3 },
     tolerance: { rel: 0.001 },
-    origin: 'published',
+    origin: 'independent',
     source: 'JCSS PMC 2.20 eq.(10) & table',
   },
   {
@@ -567,7 +567,7 @@ export const BURNOUT_ROWS: readonly ReferenceRow[] = [
     inputs: { q_0: 600, A_f: 100, A_t: 320, f: 0.08 },
     expected: { value: 2651.7 },
     tolerance: { rel: 0.001 },
-    origin: 'published',
+    origin: 'independent',
     source: 'JCSS PMC 2.20',
   },
   {

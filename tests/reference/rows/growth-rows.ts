@@ -90,7 +90,7 @@ export const GROWTH_ROWS: readonly ReferenceRow[] = [
     expected: { plateauReached: true, growthEnd: 900, decayStart: 2030.8, peak: 9000, end: 3257.2 },
     tolerance: { rel: 0.001 },
     origin: 'independent',
-    source: 'EN 1991-1-2 E.4 closed form + numeric integration',
+    source: 'EN 1991-1-2 E.4; closed form checked by numerical integration',
     fromMemory: true,
   },
   {
@@ -100,7 +100,7 @@ export const GROWTH_ROWS: readonly ReferenceRow[] = [
     expected: { plateauReached: false, growthEnd: 751.99, decayStart: 751.99, peak: 25133.16, end: 966.85 },
     tolerance: { rel: 0.001 },
     origin: 'independent',
-    source: 'EN 1991-1-2 E.4 closed form + numeric integration',
+    source: 'EN 1991-1-2 E.4; closed form checked by numerical integration',
     fromMemory: true,
   },
   {
@@ -110,7 +110,7 @@ export const GROWTH_ROWS: readonly ReferenceRow[] = [
     expected: { plateauReached: true, growthEnd: 608.57, decayStart: 4437.17, peak: 4115.14, end: 7892.7 },
     tolerance: { rel: 0.001 },
     origin: 'independent',
-    source: 'EN 1991-1-2 E.4 closed form + numeric integration',
+    source: 'EN 1991-1-2 E.4; closed form checked by numerical integration',
     fromMemory: true,
   },
   {
@@ -120,7 +120,7 @@ export const GROWTH_ROWS: readonly ReferenceRow[] = [
     expected: { plateauReached: false, growthEnd: 286.94, decayStart: 286.94, peak: 14637.22, end: 368.92 },
     tolerance: { rel: 0.001 },
     origin: 'independent',
-    source: 'EN 1991-1-2 E.4 closed form + numeric integration',
+    source: 'EN 1991-1-2 E.4; closed form checked by numerical integration',
     fromMemory: true,
   },
   {

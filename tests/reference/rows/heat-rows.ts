@@ -54,7 +54,7 @@ export const HEAT_ROWS: readonly ReferenceRow[] = [
     expected: { value: 16.856 },
     tolerance: { abs: 0.01 },
     origin: 'independent',
-    source: 'definition; cf. C.F. Nielsen 2.44',
+    source: 'definition; cf. wood fuel tables with 2.44 MJ/kg',
   },
   {
     id: 'moisture-net-18.5-0.200',
@@ -63,7 +63,7 @@ export const HEAT_ROWS: readonly ReferenceRow[] = [
     expected: { value: 14.312 },
     tolerance: { abs: 0.01 },
     origin: 'independent',
-    source: 'definition; cf. C.F. Nielsen 2.44',
+    source: 'definition; cf. wood fuel tables with 2.44 MJ/kg',
   },
   {
     id: 'moisture-net-19.0-0.500',
@@ -72,7 +72,7 @@ export const HEAT_ROWS: readonly ReferenceRow[] = [
     expected: { value: 8.279 },
     tolerance: { abs: 0.01 },
     origin: 'independent',
-    source: 'definition; cf. C.F. Nielsen 2.44',
+    source: 'definition; cf. wood fuel tables with 2.44 MJ/kg',
   },
   {
     id: 'moisture-net-18.7-0.107',
@@ -81,7 +81,7 @@ export const HEAT_ROWS: readonly ReferenceRow[] = [
     expected: { value: 16.435 },
     tolerance: { abs: 0.01 },
     origin: 'independent',
-    source: 'definition; cf. C.F. Nielsen 2.44',
+    source: 'definition; cf. wood fuel tables with 2.44 MJ/kg',
   },
   {
     id: 'moisture-basis-0.12',

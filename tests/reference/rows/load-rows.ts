@@ -8,7 +8,7 @@ export const LOAD_ROWS: readonly ReferenceRow[] = [
     inputs: { q_fk: 511, m: 0.8, delta_q1: 1.5, delta_q2: 1, delta_n: 0.5307 },
     expected: { value: 325.43 },
     tolerance: { rel: 0.001 },
-    origin: 'published',
+    origin: 'independent',
     source: 'EN 1991-1-2 (E.1); factor form (CTE DB-SI B.7)',
   },
   {
@@ -27,8 +27,8 @@ export const LOAD_ROWS: readonly ReferenceRow[] = [
     inputs: { A_f: 25, reading: 'linear' },
     expected: { value: 1.1 },
     tolerance: { abs: 0.001 },
-    origin: 'published',
-    source: 'CTE DB-SI Table B.2 (interpolation stated,); EN Table E.1 same nodes',
+    origin: 'independent',
+    source: 'CTE DB-SI Table B.2 (linear interpolation is stated); EN Table E.1 same nodes',
   },
   {
     id: 'dq1-linear-100',
@@ -36,8 +36,8 @@ export const LOAD_ROWS: readonly ReferenceRow[] = [
     inputs: { A_f: 100, reading: 'linear' },
     expected: { value: 1.2333 },
     tolerance: { abs: 0.001 },
-    origin: 'published',
-    source: 'CTE DB-SI Table B.2 (interpolation stated,); EN Table E.1 same nodes',
+    origin: 'independent',
+    source: 'CTE DB-SI Table B.2 (linear interpolation is stated); EN Table E.1 same nodes',
   },
   {
     id: 'dq1-linear-500',
@@ -45,8 +45,8 @@ export const LOAD_ROWS: readonly ReferenceRow[] = [
     inputs: { A_f: 500, reading: 'linear' },
     expected: { value: 1.5444 },
     tolerance: { abs: 0.001 },
-    origin: 'published',
-    source: 'CTE DB-SI Table B.2 (interpolation stated,); EN Table E.1 same nodes',
+    origin: 'independent',
+    source: 'CTE DB-SI Table B.2 (linear interpolation is stated); EN Table E.1 same nodes',
   },
   {
     id: 'dq1-linear-1375',
@@ -54,8 +54,8 @@ export const LOAD_ROWS: readonly ReferenceRow[] = [
     inputs: { A_f: 1375, reading: 'linear' },
     expected: { value: 1.7 },
     tolerance: { abs: 0.001 },
-    origin: 'published',
-    source: 'CTE DB-SI Table B.2 (interpolation stated,); EN Table E.1 same nodes',
+    origin: 'independent',
+    source: 'CTE DB-SI Table B.2 (linear interpolation is stated); EN Table E.1 same nodes',
   },
   {
     id: 'dq1-linear-3750',
@@ -63,8 +63,8 @@ export const LOAD_ROWS: readonly ReferenceRow[] = [
     inputs: { A_f: 3750, reading: 'linear' },
     expected: { value: 1.95 },
     tolerance: { abs: 0.001 },
-    origin: 'published',
-    source: 'CTE DB-SI Table B.2 (interpolation stated,); EN Table E.1 same nodes',
+    origin: 'independent',
+    source: 'CTE DB-SI Table B.2 (linear interpolation is stated); EN Table E.1 same nodes',
   },
   {
     id: 'dq1-step-26',
@@ -142,7 +142,7 @@ export const LOAD_ROWS: readonly ReferenceRow[] = [
     inputs: { m: [0.8, 0.8, 1], Q: [21000, 8670, 6510] },
     expected: { value: 0.8359867330016584 },
     tolerance: { rel: 0.0001 },
-    origin: 'published',
+    origin: 'independent',
     source: 'DM 9/3/2007',
   },
   {
@@ -151,7 +151,7 @@ export const LOAD_ROWS: readonly ReferenceRow[] = [
     inputs: { m: 0.8359867330016584, q_fk: 301.5 },
     expected: { value: 252.05 },
     tolerance: { rel: 0.0001 },
-    origin: 'published',
+    origin: 'independent',
     source: 'DM 9/3/2007',
   },
   {

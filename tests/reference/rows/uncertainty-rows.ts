@@ -52,7 +52,7 @@ export const UNCERTAINTY_ROWS: readonly ReferenceRow[] = [
     expected: { value: 311.8 },
     tolerance: { rel: 0.01 },
     origin: 'independent',
-    source: 'numpy 2e6 samples; statistical tolerance',
+    source: 'two million random samples',
   },
   {
     id: 'per-floor-by-hand',
