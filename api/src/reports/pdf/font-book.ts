@@ -9,6 +9,8 @@ const ATKINSON = '@fontsource/atkinson-hyperlegible/files/atkinson-hyperlegible'
 const DEJAVU = '@fontsource/dejavu-sans/files/dejavu-sans';
 const UNIFONT = '@fontsource/unifontex/files/unifontex-latin-400-normal.woff';
 const REPLACEMENT = 0x203a;
+const PLAIN = /^[\x20-\x7e]*$/;
+const BEYOND_ASCII = /[^\x20-\x7e]/gu;
 
 /**
  * The fonts of a report and the choice among them for each character: Atkinson Hyperlegible, its extension for Central
@@ -47,6 +49,16 @@ export class FontBook {
       faces.bold.push(unifont);
     }
     return new FontBook(faces);
+  }
+
+  /** Text as it will be seen: {@link printableText}, and the number of every character that no font has. */
+  printable(text: string): string {
+    const line = printableText(text);
+    if (PLAIN.test(line)) return line;
+    return line.replace(BEYOND_ASCII, (character) => {
+      const codePoint = character.codePointAt(0) ?? 0;
+      return this.faces.regular.some((face) => face.has(codePoint)) ? character : characterNumber(codePoint);
+    });
   }
 
   /** The glyphs of one line in the order they are drawn. */

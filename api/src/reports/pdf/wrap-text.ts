@@ -1,5 +1,4 @@
 import type { FontBook, Weight } from './font-book.ts';
-import { printableText } from './printable-text.ts';
 
 /** A stretch that is not broken, with the spaces before it; no-break spaces are part of the word. */
 const WORD = /[ \u2000-\u200a\u3000]*[^ \u2000-\u200a\u3000\-–—/·,;]*[-–—/·,;]?/gu;
@@ -12,7 +11,7 @@ const LETTER = /[\p{L}\p{N}]/u;
  * spaces at a break are dropped. Always at least one line.
  */
 export function wrapText(book: FontBook, text: string, size: number, weight: Weight, width: number): string[] {
-  const line = printableText(text);
+  const line = book.printable(text);
   if (book.width(line, size, weight) <= width) return [line];
   const lines: string[] = [];
   let current = '';

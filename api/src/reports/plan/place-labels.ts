@@ -53,7 +53,7 @@ function placeInside(request: LabelRequest, placed: readonly PlacedLabel[]): Pla
     const [spanX, spanY] = [box.width - size.width, box.height - size.height];
     if (spanX < 0 || spanY < 0) continue;
     const step = Math.max(2, Math.sqrt((spanX * spanY) / MOST_CANDIDATES));
-    const candidates: { x: number; y: number; far: number }[] = [];
+    const candidates = [{ x: box.x + spanX / 2, y: box.y + spanY / 2, far: 0 }];
     const [columns, rows] = [Math.max(1, Math.floor(spanX / step)), Math.max(1, Math.floor(spanY / step))];
     for (let column = 0; column <= columns; column++) {
       for (let row = 0; row <= rows; row++) {
