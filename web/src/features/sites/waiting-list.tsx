@@ -85,7 +85,9 @@ function WaitingRooms({ building }: { readonly building: BuildingSummary }) {
             <Link to={paths.survey(building.survey_id)} className="text-ink decoration-rule hover:text-verdigris">
               {room.name}
             </Link>
-            <span className="text-small text-soft"> {building.name}</span>
+            <span className="block text-small text-soft tablet:inline tablet:before:content-['_']">
+              {building.name}
+            </span>
           </span>
           <span className="text-right">
             {room.load_per_floor_MJ_m2 === null ? '–' : <Quantity value={room.load_per_floor_MJ_m2} unit="MJ/m2" />}
