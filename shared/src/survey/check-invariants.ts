@@ -3,7 +3,6 @@ import { entriesOfRoom } from './derive/entries-of-room.ts';
 import { roomRegion } from './derive/room-region.ts';
 import { roomsOfStorey } from './derive/rooms-of-storey.ts';
 import { entryViolations } from './invariants/entry-violations.ts';
-import { holeViolation } from './invariants/hole-violations.ts';
 import { openingViolations } from './invariants/opening-violations.ts';
 import { planViolations } from './invariants/plan-violations.ts';
 import { referenceViolations } from './invariants/reference-violations.ts';
@@ -40,8 +39,6 @@ function checkStorey(document: SurveyDocument, storeyId: string): Violation[] {
   if (shapes.length > 0) return shapes;
   const plan = planViolations(document, storeyId);
   if (plan.length > 0) return plan;
-  const holes = rooms.flatMap((room) => holeViolation(document, room) ?? []);
-  if (holes.length > 0) return holes;
   return [...openingViolations(document, storeyId), ...rooms.flatMap((room) => contentsViolations(document, room))];
 }
 

@@ -1,8 +1,6 @@
-import type { Region } from '../../geometry/point.ts';
+import { holesFit } from '../../geometry/holes-fit.ts';
 import { insetRing } from '../../geometry/inset-ring.ts';
-import { ringEdges } from '../../geometry/ring-edges.ts';
-import { ringInRegion } from '../../geometry/ring-in-region.ts';
-import { segmentsCross } from '../../geometry/segments-cross.ts';
+import type { Region, Ring } from '../../geometry/point.ts';
 
 /**
  * What is left of a room on centre lines when half the wall thickness is taken off every wall, holes included.
@@ -13,15 +11,12 @@ import { segmentsCross } from '../../geometry/segments-cross.ts';
 export function clearRegion(region: Region, half_m: number): Region | null {
   const ring = insetRing(region.ring, half_m);
   if (ring === null) return null;
-  const holes: Region['holes'][number][] = [];
+  const holes: Ring[] = [];
   for (const hole of region.holes) {
     const grown = insetRing(hole, -half_m);
-    if (grown === null || !ringInRegion(grown, { ring, holes })) return null;
-    const crosses = [ring, ...holes].some((loop) =>
-      ringEdges(loop).some(([a, b]) => ringEdges(grown).some(([c, d]) => segmentsCross(a, b, c, d))),
-    );
-    if (crosses) return null;
+    if (grown === null) return null;
     holes.push(grown);
   }
-  return { ring, holes };
+  const clear = { ring, holes };
+  return half_m === 0 || holesFit(clear) ? clear : null;
 }

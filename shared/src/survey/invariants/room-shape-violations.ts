@@ -3,6 +3,7 @@ import type { Region, Ring } from '../../geometry/point.ts';
 import { regionArea } from '../../geometry/region-area.ts';
 import { ringEdges } from '../../geometry/ring-edges.ts';
 import { selfCrossing } from '../../geometry/self-crossing.ts';
+import { holesFit } from '../../geometry/holes-fit.ts';
 import { signedArea } from '../../geometry/signed-area.ts';
 import { ROUNDING_M } from '../../geometry/tolerance.ts';
 import { clearRing } from '../derive/clear-ring.ts';
@@ -61,6 +62,9 @@ export function outlineViolation(corners: Pick<SurveyDocument['corners'], 'get'>
   }
   if (region.holes.some((hole) => signedArea(hole) === 0)) {
     return at('ROOM_TOO_SMALL', `A part cut out of room ${nameOf(room)} would have no area.`);
+  }
+  if (!holesFit(region)) {
+    return at('HOLE_OUTSIDE_ROOM', `A part cut out of room ${nameOf(room)} would not lie wholly inside it.`);
   }
   const drawn_m2 = regionArea(region);
   if (drawn_m2 >= LEAST_AREA_M2 - ROUNDING_M) return null;
