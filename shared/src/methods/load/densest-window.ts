@@ -31,6 +31,8 @@ interface Position {
 
 const SIDE_M = 2;
 const REFINED = 3;
+/** A turn this close to a quarter, as a share of one, stands along the axes. */
+const ALONG_AXES = 1e-8;
 const FIRST_STEP_M = 0.25;
 const FINEST_STEP_M = 0.004;
 /** How far the improvement of a start may wander. */
@@ -56,20 +58,26 @@ function hotter(a: Position, b: Position): Position {
 }
 
 function boxOf({ heat, footprint: rectangle }: PlacedLoad): Box {
-  const corners = footprint(rectangle);
-  const xs = corners.map(({ x_m }) => x_m);
-  const ys = corners.map(({ y_m }) => y_m);
-  const quarter = Math.abs(((rectangle.rotation_deg % 90) + 90) % 90);
-  const turned = Math.min(quarter, 90 - quarter) > 1e-6;
-  return {
-    heat,
-    x0: Math.min(...xs),
-    x1: Math.max(...xs),
-    y0: Math.min(...ys),
-    y1: Math.max(...ys),
-    area: rectangle.width_m * rectangle.depth_m,
-    ring: turned ? corners : undefined,
-  };
+  const { x_m, y_m, width_m, depth_m, rotation_deg } = rectangle;
+  const area = width_m * depth_m;
+  const quarters = rotation_deg / 90;
+  if (Math.abs(quarters - Math.round(quarters)) < ALONG_AXES) {
+    const upright = Math.round(quarters) % 2 === 0;
+    const [halfWidth, halfDepth] = upright ? [width_m / 2, depth_m / 2] : [depth_m / 2, width_m / 2];
+    return {
+      heat,
+      x0: x_m - halfWidth,
+      x1: x_m + halfWidth,
+      y0: y_m - halfDepth,
+      y1: y_m + halfDepth,
+      area,
+      ring: undefined,
+    };
+  }
+  const ring = footprint(rectangle);
+  const xs = ring.map((corner) => corner.x_m);
+  const ys = ring.map((corner) => corner.y_m);
+  return { heat, x0: Math.min(...xs), x1: Math.max(...xs), y0: Math.min(...ys), y1: Math.max(...ys), area, ring };
 }
 
 /** The best position of the best columns, best first, a few at most. Columns that cannot win are left out. */
@@ -81,7 +89,7 @@ function sweep(boxes: readonly Box[], keep: number): Position[] {
   const events = yEvents(boxes);
   const weights = new Float64Array(boxes.length);
   const weigh = weigher(boxes);
-  let kept: Position[] = [bounds.start];
+  let kept: Position[] = bounds.start.heat > 0 ? [bounds.start] : [];
   for (const x of [...columns].sort((a, b) => bounds.most(b) - bounds.most(a))) {
     const worst = kept.length < keep ? 0 : kept[kept.length - 1]!.heat;
     if (bounds.most(x) <= worst) break;

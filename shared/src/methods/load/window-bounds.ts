@@ -14,12 +14,14 @@ export interface WindowBounds {
   most(x: number): number;
 }
 
-const CELLS_PER_SIDE = 16;
+const CELLS_PER_SIDE = 8;
 const LARGEST_GRID = 100_000;
+/** With so few boxes every column is swept sooner than the grid is filled. */
+const FEW_BOXES = 100;
 
 /**
- * Bounds for the search of the densest window: the heat is put on a grid of a sixteenth of the window's side, so a window
- * anywhere lies inside a block of 17 by 17 cells.
+ * Bounds for the search of the densest window: the heat is put on a grid of an eighth of the window's side, so a window
+ * anywhere lies inside a block of nine by nine cells.
  */
 export function windowBounds(boxes: readonly HeatBox[], side: number): WindowBounds {
   const left = boxes.reduce((least, { x0 }) => Math.min(least, x0), Infinity) - side;
@@ -28,21 +30,23 @@ export function windowBounds(boxes: readonly HeatBox[], side: number): WindowBou
   const top = boxes.reduce((most, { y1 }) => Math.max(most, y1), -Infinity);
   const cell = side / CELLS_PER_SIDE;
   const [columns, rows] = [Math.ceil((right - left) / cell) + 1, Math.ceil((top - low) / cell) + 1];
-  if (!(columns * rows <= LARGEST_GRID)) {
+  if (boxes.length <= FEW_BOXES || !(columns * rows <= LARGEST_GRID)) {
     return { start: { heat: 0, x: left, y: low }, most: () => Infinity };
   }
   const sums = summedHeat(boxes, left, low, cell, columns, rows);
-  const width = columns + 1;
-  const block = (i: number, j: number, cells: number) => {
-    const [to, up] = [Math.min(columns, i + cells), Math.min(rows, j + cells)];
-    return sums[up * width + to]! - sums[j * width + to]! - sums[up * width + i]! + sums[j * width + i]!;
-  };
   const bounds = new Float64Array(columns);
   let start = { heat: 0, x: left, y: low };
-  for (let i = 0; i < columns; i += 1) {
-    for (let j = 0; j < rows; j += 1) {
-      bounds[i] = Math.max(bounds[i]!, block(i, j, CELLS_PER_SIDE + 1));
-      const aligned = block(i, j, CELLS_PER_SIDE);
+  const width = columns + 1;
+  for (let j = 0; j < rows; j += 1) {
+    const below = j * width;
+    const above = Math.min(rows, j + CELLS_PER_SIDE) * width;
+    const further = Math.min(rows, j + CELLS_PER_SIDE + 1) * width;
+    for (let i = 0; i < columns; i += 1) {
+      const to = Math.min(columns, i + CELLS_PER_SIDE);
+      const beyond = Math.min(columns, to + 1);
+      const around = sums[further + beyond]! - sums[below + beyond]! - sums[further + i]! + sums[below + i]!;
+      if (around > bounds[i]!) bounds[i] = around;
+      const aligned = sums[above + to]! - sums[below + to]! - sums[above + i]! + sums[below + i]!;
       if (aligned > start.heat) start = { heat: aligned, x: left + i * cell, y: low + j * cell };
     }
   }
