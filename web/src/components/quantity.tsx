@@ -13,7 +13,8 @@ export function Quantity({ value, unit }: QuantityProps) {
   const shown = formatQuantity(value, unit, useUnits());
   return (
     <span className="whitespace-nowrap">
-      <span className="figure">{shown.text}</span> <span className="font-sans text-soft">{shown.unit}</span>
+      <span className="figure">{shown.text}</span>
+      <span className="font-sans text-soft"> {shown.unit}</span>
     </span>
   );
 }

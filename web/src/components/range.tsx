@@ -17,8 +17,8 @@ export function Range({ low, high, unit }: RangeProps) {
     <span className="whitespace-nowrap">
       <span className="figure">
         {from.text} – {to.text}
-      </span>{' '}
-      <span className="font-sans text-soft">{to.unit}</span>
+      </span>
+      <span className="font-sans text-soft"> {to.unit}</span>
     </span>
   );
 }

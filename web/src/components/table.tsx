@@ -82,7 +82,7 @@ export function Table<Row>(props: TableProps<Row>) {
       {foot === undefined ? null : <tfoot role="rowgroup">{foot}</tfoot>}
     </table>
   );
-  if (narrow === 'pairs') return table;
+  if (narrow === 'pairs') return <div className="ledger-frame">{table}</div>;
   return (
     <div role="region" aria-label={caption} tabIndex={0} className="overflow-x-auto">
       {table}
