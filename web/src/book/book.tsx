@@ -8,6 +8,7 @@ import { BookTrail } from './plan/book-trail.tsx';
 import { PlanPage } from './plan/plan-page.tsx';
 import { SavingLine } from './plan/saving-line.tsx';
 import { TallySheet } from './plan/tally-sheet.tsx';
+import { ReportButton } from './report/report-button.tsx';
 import { useBook } from './session/use-book.ts';
 import { useBookSession } from './session/use-book-session.ts';
 import type { SurveySync } from './sync/survey-sync.ts';
@@ -44,6 +45,7 @@ export function Book({ sync, tally, index, rooms, tables }: BookProps) {
       </HeaderSlot>
       <HeaderSlot name="actions">
         <SavingLine sync={sync} />
+        <ReportButton />
       </HeaderSlot>
       <h1 className="unseen" tabIndex={-1}>
         {name}: the Book
@@ -54,7 +56,7 @@ export function Book({ sync, tally, index, rooms, tables }: BookProps) {
       <TallySheet>{tally}</TallySheet>
       <div className="book-index">{index}</div>
       <section className="book-rooms" aria-label="Rooms">
-        {rooms}
+        <div className="book-page-body">{rooms}</div>
       </section>
       <BookTabs />
       <Announcer />

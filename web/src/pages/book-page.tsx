@@ -1,7 +1,7 @@
 import { useParams } from 'react-router-dom';
 import { LoadFailed } from '../components/load-failed.tsx';
 import { Skeleton } from '../components/skeleton.tsx';
-import { Book } from '../book/book.tsx';
+import { OpenPages } from '../book/open-pages.tsx';
 import { BookProvider } from '../book/session/book-provider.tsx';
 import { useOpenBook } from '../book/use-open-book.ts';
 import { usePageTitle } from '../lib/page-title.ts';
@@ -27,7 +27,7 @@ export function BookPage() {
     case 'open':
       return (
         <BookProvider session={opening.session}>
-          <Book sync={opening.sync} tally={null} index={null} rooms={null} tables={null} />
+          <OpenPages sync={opening.sync} />
         </BookProvider>
       );
   }

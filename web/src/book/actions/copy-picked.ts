@@ -1,5 +1,6 @@
 import { addEntries } from '@embertally/shared/survey/commands/add-entries';
 import { duplicateEntries } from '@embertally/shared/survey/commands/duplicate-entries';
+import { footprint } from '@embertally/shared/geometry/footprint';
 import { roomAt } from '@embertally/shared/survey/derive/room-at';
 import type { Entry } from '@embertally/shared/survey/survey-document';
 import type { BookSession } from '../session/book-session.ts';
@@ -20,7 +21,9 @@ export function duplicatePicked(session: BookSession): void {
     [0, -up],
   ] as const;
   const inOwnRoom = (entry: Entry, [dx, dy]: readonly [number, number]) =>
-    roomAt(document, storeyId, { x_m: entry.x_m + dx, y_m: entry.y_m + dy })?.id === entry.room_id;
+    footprint({ ...entry, x_m: entry.x_m + dx, y_m: entry.y_m + dy }).every(
+      (corner) => roomAt(document, storeyId, corner)?.id === entry.room_id,
+    );
   const [dx_m, dy_m] = ways.find((way) => entries.every((entry) => inOwnRoom(entry, way))) ?? [GAP_M, GAP_M];
   const copies = entries.map((entry) => ({ entry_id: entry.id, id: session.newId(), dx_m, dy_m }));
   const label =

@@ -76,6 +76,20 @@ export const HISTORY_ACTIONS: readonly Action[] = [
   },
 ];
 
+/** The way to everything without the plan. */
+export const TABLE_ACTIONS: readonly Action[] = [
+  {
+    id: 'tables',
+    label: 'Tables',
+    keys: ['T'],
+    group: 'look',
+    isAvailable: always,
+    run: ({ session }) => {
+      session.showTables(true);
+    },
+  },
+];
+
 export const FIT_ACTIONS: readonly Action[] = [
   {
     id: 'fit-room',
@@ -177,4 +191,10 @@ function zoom(id: string, label: string, keys: readonly string[], factor: number
 }
 
 /** Everything that has a key. */
-export const ALL_ACTIONS: readonly Action[] = [...TOOL_ACTIONS, ...HISTORY_ACTIONS, ...FIT_ACTIONS, ...OTHER_ACTIONS];
+export const ALL_ACTIONS: readonly Action[] = [
+  ...TOOL_ACTIONS,
+  ...HISTORY_ACTIONS,
+  ...TABLE_ACTIONS,
+  ...FIT_ACTIONS,
+  ...OTHER_ACTIONS,
+];

@@ -1,18 +1,22 @@
 import type { Entry } from '@embertally/shared/survey/survey-document';
 import { footprint, type Footprint } from '@embertally/shared/geometry/footprint';
+import { isCovering } from './is-covering.ts';
 import { at, CASING_PX, SANS, traceRing, type Pen } from './pen.ts';
 
 const LABEL_PX = 12;
 /** Smaller than this on screen an entry is only its outline, px. */
 const DIAGONAL_FROM_PX = 10;
 
+export type PaintedEntry = Footprint & Pick<Entry, 'label' | 'keeping' | 'height_m' | 'base_height_m'>;
+
 /** One entry: a pale rectangle with a casing, its diagonal, and its label when there is space for it. */
-export function paintEntry(pen: Pen, entry: Footprint & Pick<Entry, 'label' | 'keeping'>): void {
+export function paintEntry(pen: Pen, entry: PaintedEntry): void {
   const { context, palette, camera } = pen;
   const corners = footprint(entry);
   context.beginPath();
   traceRing(pen, corners);
-  context.globalAlpha = 0.9;
+  const covering = isCovering(entry);
+  context.globalAlpha = covering ? 0.3 : 0.9;
   context.fillStyle = palette.page;
   context.fill();
   context.globalAlpha = 1;
@@ -22,7 +26,7 @@ export function paintEntry(pen: Pen, entry: Footprint & Pick<Entry, 'label' | 'k
   context.stroke();
   const wide = entry.width_m * camera.pxPerM;
   const deep = entry.depth_m * camera.pxPerM;
-  if (Math.min(wide, deep) >= DIAGONAL_FROM_PX && !paintLabel(pen, entry, wide, deep)) {
+  if (!covering && Math.min(wide, deep) >= DIAGONAL_FROM_PX && !paintLabel(pen, entry, wide, deep)) {
     const [a, , c] = corners.map((corner) => at(pen, corner));
     if (a !== undefined && c !== undefined) {
       context.beginPath();
@@ -40,7 +44,7 @@ export function paintEntry(pen: Pen, entry: Footprint & Pick<Entry, 'label' | 'k
   context.strokeStyle = palette.ink;
   context.lineWidth = 1.25;
   // How an entry is kept shows in its edge: part of the building is heavy, here for a while is dashed.
-  if (entry.keeping === 'fixed') context.lineWidth = 2.5;
+  if (entry.keeping === 'fixed' && !covering) context.lineWidth = 2.5;
   if (entry.keeping === 'passing') context.setLineDash([5, 3]);
   context.stroke();
   context.setLineDash([]);

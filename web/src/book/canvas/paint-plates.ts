@@ -1,8 +1,8 @@
-import { at, FIGURES, SANS, type Pen } from './pen.ts';
+import { at, SANS, type Pen } from './pen.ts';
 import { LINE_PX, type RoomPlate } from './room-plates.ts';
 
 export const NAME_FONT = `700 14px ${SANS}`;
-export const FIGURE_FONT = `13px ${FIGURES}`;
+export const FIGURE_FONT = `13px ${SANS}`;
 const RADIUS_PX = 3;
 
 /** Plates with a room's name and figure. Near a limit: dotted edge; over: double edge; the word stands in the figure. */
@@ -34,18 +34,13 @@ function paintPlate(pen: Pen, plate: RoomPlate): void {
   }
   context.textAlign = 'center';
   context.textBaseline = 'middle';
-  const rows = (plate.lines.name === null ? 0 : 1) + (plate.lines.figure === null ? 0 : 1);
-  let y = centre.y - ((rows - 1) * LINE_PX) / 2 + 0.5;
-  if (plate.lines.name !== null) {
-    context.font = NAME_FONT;
-    context.fillStyle = palette.ink;
-    context.fillText(plate.lines.name, centre.x, y);
+  let y = centre.y - ((plate.lines.length - 1) * LINE_PX) / 2 + 0.5;
+  for (const { words, of } of plate.lines) {
+    context.font = of === 'name' ? NAME_FONT : FIGURE_FONT;
+    const marked = plate.standing === 'near' || plate.standing === 'over';
+    context.fillStyle = of === 'name' ? palette.ink : marked ? colour : palette.soft;
+    context.fillText(words, centre.x, y);
     y += LINE_PX;
-  }
-  if (plate.lines.figure !== null) {
-    context.font = FIGURE_FONT;
-    context.fillStyle = plate.standing === 'near' || plate.standing === 'over' ? colour : palette.soft;
-    context.fillText(plate.lines.figure, centre.x, y);
   }
 }
 

@@ -55,7 +55,7 @@ export function paintPreview(pen: Pen, preview: Preview, look: PreviewLook): voi
 function paintGhost(pen: Pen, ghost: NonNullable<Preview['ghost']>, colour: string): void {
   const { context } = pen;
   context.globalAlpha = 0.75;
-  paintEntry(pen, { ...ghost, keeping: 'stored' });
+  paintEntry(pen, ghost);
   context.globalAlpha = 1;
   line(pen, colour, 2, [6, 4], () => {
     traceRing(pen, footprint(ghost));

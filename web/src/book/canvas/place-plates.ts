@@ -26,7 +26,7 @@ export interface Plate {
   readonly size: number;
 }
 
-const STEPS = 12;
+const STEPS = 20;
 
 /**
  * Where a room's plate stands: the free place nearest to the wished one that covers no entry and touches no wall, in the

@@ -8,6 +8,7 @@ import { useBook } from '../session/use-book.ts';
 import { useBookSession } from '../session/use-book-session.ts';
 import { loadBand } from '../tally/load-band.ts';
 import { EntryTiles } from './entry-tiles.ts';
+import { isCovering } from './is-covering.ts';
 import { paintOpenings } from './paint-openings.ts';
 import { FIGURE_FONT, NAME_FONT, paintPlates } from './paint-plates.ts';
 import { paintRooms } from './paint-rooms.ts';
@@ -72,7 +73,7 @@ export function PlanLayer({ host, palette }: { readonly host: PlanHost; readonly
       pen,
       scene.rooms.flatMap((shape) => {
         const { id, name } = shape.room;
-        const entries = entriesOfRoom(shown, id);
+        const entries = entriesOfRoom(shown, id).filter((entry) => !isCovering(entry));
         return plates.place(shape, entries, textOf(id, name), camera.pxPerM, width, measure) ?? [];
       }),
     );

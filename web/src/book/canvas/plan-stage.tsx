@@ -48,7 +48,7 @@ function Active({ host, palette }: { readonly host: PlanHost; readonly palette: 
   const crosshair = useSyncExternalStore(host.crosshair.subscribe, host.crosshair.get);
   const wallThickness_m = (storeyId === null ? null : document.storeys.get(storeyId)?.wall_thickness_m) ?? 0;
   const lengthText = (length_m: number) => {
-    const { text, unit } = formatQuantity(length_m, 'm', units);
+    const { text, unit } = formatQuantity(Math.round(length_m * 1000) / 1000, 'm', units, { figures: 'as entered' });
     return `${text} ${unit}`;
   };
   // While things are being moved the handles would only be in the way.

@@ -11,24 +11,24 @@ export interface PlateText {
   readonly figure: string | null;
   readonly standing: Standing;
 }
-/** One wording of a plate: one or two lines. */
-export interface PlateLines {
-  readonly name: string | null;
-  readonly figure: string | null;
+/** One line of a plate: a room's name or a figure with its unit. */
+export interface PlateLine {
+  readonly words: string;
+  readonly of: 'name' | 'figure';
 }
 export interface RoomPlate {
   readonly roomId: string;
   readonly centre: Point;
-  readonly lines: PlateLines;
+  readonly lines: readonly PlateLine[];
   readonly standing: Standing;
   readonly width_px: number;
   readonly height_px: number;
 }
 
-const PAD_X_PX = 9;
-const PAD_Y_PX = 5;
-export const LINE_PX = 17;
-const CLEARANCE_PX = 5;
+const PAD_X_PX = 7;
+const PAD_Y_PX = 4;
+export const LINE_PX = 16;
+const CLEARANCE_PX = 3;
 
 interface Kept {
   readonly shape: RoomShape;
@@ -98,22 +98,20 @@ function placed(
   };
 }
 
-/** Fullest first. The word of a standing stays with its figure. */
-function wordingsOf({ name, figure, standing }: PlateText): readonly PlateLines[] {
-  if (figure === null) return [{ name, figure: null }];
-  const said = standing === 'near' || standing === 'over' ? `${figure} · ${standing}` : figure;
+/** Fullest first. The word of a standing is in every wording, and a figure never stands without its room's name. */
+function wordingsOf({ name, figure, standing }: PlateText): readonly (readonly PlateLine[])[] {
   const short = name.length > 18 ? `${name.slice(0, 17)}…` : name;
-  return [
-    { name, figure: said },
-    { name: short, figure: said },
-    { name: null, figure: said },
-    { name: short, figure: null },
-  ];
+  const title = (words: string): PlateLine => ({ words, of: 'name' });
+  const line = (words: string): PlateLine => ({ words, of: 'figure' });
+  const word = standing === 'near' || standing === 'over' ? standing : null;
+  const bare = [title(short), ...(word === null ? [] : [line(word)])];
+  if (figure === null) return [[title(name)], bare];
+  const said = word === null ? figure : `${figure} · ${word}`;
+  const stacked = [title(short), line(figure), ...(word === null ? [] : [line(word)])];
+  return [[title(name), line(said)], [title(short), line(said)], stacked, [line(`${short} · ${said}`)], bare];
 }
 
-function sizeOf(lines: PlateLines, measure: (words: string, of: 'name' | 'figure') => number) {
-  const name = lines.name === null ? 0 : measure(lines.name, 'name');
-  const figure = lines.figure === null ? 0 : measure(lines.figure, 'figure');
-  const rows = (lines.name === null ? 0 : 1) + (lines.figure === null ? 0 : 1);
-  return { width: Math.max(name, figure) + 2 * PAD_X_PX, height: rows * LINE_PX + 2 * PAD_Y_PX };
+function sizeOf(lines: readonly PlateLine[], measure: (words: string, of: 'name' | 'figure') => number) {
+  const widest = Math.max(...lines.map(({ words, of }) => measure(words, of)));
+  return { width: widest + 2 * PAD_X_PX, height: lines.length * LINE_PX + 2 * PAD_Y_PX };
 }

@@ -1,4 +1,3 @@
-import type { Footprint } from '@embertally/shared/geometry/footprint';
 import type { Point } from '@embertally/shared/geometry/point';
 import type { Changes } from '@embertally/shared/survey/change';
 import type { Entry, Opening } from '@embertally/shared/survey/survey-document';
@@ -13,7 +12,7 @@ export interface Preview {
   /** Corners placed so far of a room being drawn, and where the next would go. */
   readonly drawing?: { readonly points: readonly Point[]; readonly next: Point | null; readonly closes: boolean };
   /** A footprint that follows the pointer before it is placed. */
-  readonly ghost?: Footprint & { readonly label: string };
+  readonly ghost?: Entry;
   readonly openingGhost?: { readonly opening: Pick<Opening, 'kind' | 'state'>; readonly a: Point; readonly b: Point };
   /** Rectangle dragged to pick what lies in it. */
   readonly marquee?: { readonly a: Point; readonly b: Point };

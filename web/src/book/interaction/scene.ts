@@ -63,10 +63,15 @@ export function sceneOf(document: SurveyDocument, storeyId: string): Scene | nul
       const position = openingPosition(document, opening.id);
       return position === null ? [] : [{ opening, a: position.from, b: position.to }];
     }),
-    entries: rooms.flatMap((room) => entriesOfRoom(document, room.id)),
+    // Large ones first: what stands on a carpet is drawn on it.
+    entries: rooms.flatMap((room) => entriesOfRoom(document, room.id)).sort((a, b) => areaOf(b) - areaOf(a)),
   };
   ofDocument.set(storeyId, scene);
   return scene;
+}
+
+function areaOf(entry: Entry): number {
+  return entry.width_m * entry.depth_m;
 }
 
 function roomShape(document: SurveyDocument, room: Room): RoomShape {

@@ -3,11 +3,11 @@ import { LOAD_BAND_EDGES } from '../tally/load-band.ts';
 /** What the shading of rooms means: bands of fire load density, pale to deep, with their hatch. */
 export function LoadLegend() {
   return (
-    <figure className="load-legend" aria-label="Shading of rooms by fire load density">
+    <figure className="load-legend">
       <figcaption>
-        Load density, MJ/m<sup>2</sup>
+        Load density <span className="font-normal text-soft">MJ/m²</span>
       </figcaption>
-      <ol>
+      <ol aria-label="Each band begins at">
         {LOAD_BAND_EDGES.map((edge, band) => (
           <li key={edge}>
             <span className="load-swatch" data-band={band} aria-hidden="true" />

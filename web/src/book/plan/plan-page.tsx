@@ -1,6 +1,6 @@
 import { useRef, useState } from 'react';
 import { Key } from '../../components/key.tsx';
-import { FIT_ACTIONS, HISTORY_ACTIONS, TOOL_ACTIONS } from '../actions/plan-actions.ts';
+import { FIT_ACTIONS, HISTORY_ACTIONS, TABLE_ACTIONS, TOOL_ACTIONS } from '../actions/plan-actions.ts';
 import type { PlanHost } from '../interaction/plan-host.ts';
 import { useBook } from '../session/use-book.ts';
 import { useBookSession } from '../session/use-book-session.ts';
@@ -32,10 +32,11 @@ export function PlanPage({ host }: { readonly host: PlanHost }) {
       <div className="verbs" role="toolbar" aria-label="What can be done on the plan">
         <PlanVerbs actions={TOOL_ACTIONS} world={world} />
         <span className="verbs-gap" />
-        <PlanVerbs actions={HISTORY_ACTIONS} world={world} />
+        <PlanVerbs actions={HISTORY_ACTIONS} world={world} keysShown={false} />
+        <PlanVerbs actions={TABLE_ACTIONS} world={world} />
       </div>
-      <ToolOptions focusPlan={focusPlan} />
       <PlanSurface host={host}>
+        <ToolOptions focusPlan={focusPlan} />
         {empty ? <EmptyPlan world={world} /> : null}
         <SelectionStrip host={host} />
         <PlanMessage />
@@ -52,7 +53,7 @@ export function PlanPage({ host }: { readonly host: PlanHost }) {
             setKeysOpen(true);
           }}
         >
-          Keys <Key>?</Key>
+          <Key>?</Key>
         </button>
       </div>
       {keysOpen ? (

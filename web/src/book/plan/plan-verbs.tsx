@@ -3,18 +3,31 @@ import type { Action, ActionWorld } from '../actions/action.ts';
 import { keyLabel } from '../actions/key-name.ts';
 import { useBook } from '../session/use-book.ts';
 
+interface PlanVerbsProps {
+  readonly actions: readonly Action[];
+  readonly world: ActionWorld;
+  /** False where everybody knows the key. */
+  readonly keysShown?: boolean;
+}
+
 /** The row of verbs above the plan: what can be done next, each with its key. */
-export function PlanVerbs({ actions, world }: { readonly actions: readonly Action[]; readonly world: ActionWorld }) {
+export function PlanVerbs({ actions, world, keysShown = true }: PlanVerbsProps) {
   return (
     <>
       {actions.map((action) => (
-        <Verb key={action.id} action={action} world={world} />
+        <Verb key={action.id} action={action} world={world} keyShown={keysShown} />
       ))}
     </>
   );
 }
 
-function Verb({ action, world }: { readonly action: Action; readonly world: ActionWorld }) {
+interface VerbProps {
+  readonly action: Action;
+  readonly world: ActionWorld;
+  readonly keyShown: boolean;
+}
+
+function Verb({ action, world, keyShown }: VerbProps) {
   const on = useBook((state) => action.isOn?.(state) ?? false);
   const available = useBook(action.isAvailable);
   const [key] = action.keys;
@@ -30,7 +43,7 @@ function Verb({ action, world }: { readonly action: Action; readonly world: Acti
       }}
     >
       {action.label}
-      {key === undefined ? null : <Key>{keyLabel(key)}</Key>}
+      {key === undefined || !keyShown ? null : <Key>{keyLabel(key)}</Key>}
     </button>
   );
 }

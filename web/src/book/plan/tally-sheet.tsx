@@ -1,4 +1,6 @@
 import { useId, useState, type ReactNode } from 'react';
+import { Link } from 'react-router-dom';
+import { paths } from '../../lib/paths.ts';
 import { useBook } from '../session/use-book.ts';
 
 /** The right page. Where there is no room for two pages it is a sheet pulled up from below. */
@@ -21,8 +23,12 @@ export function TallySheet({ children }: { readonly children: ReactNode }) {
         {open ? 'Put the tally away' : `Tally of ${room ?? 'a room'}`}
       </button>
       <div id={body} className="book-tally-body">
-        {children}
+        <div className="book-page-body">{children}</div>
       </div>
+      <p className="tally-foot">
+        Planning estimate from published methods. It does not replace the local fire code, the authority having
+        jurisdiction or licensed practice. <Link to={paths.cautions()}>Cautions</Link>
+      </p>
     </section>
   );
 }

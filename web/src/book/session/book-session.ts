@@ -50,7 +50,7 @@ export class BookSession {
   constructor(start: BookSessionStart, ports: BookSessionPorts) {
     this.#ports = ports;
     this.person = start.person;
-    const storeyId = start.document.storeys.keys().next().value ?? null;
+    const storeyId = groundStorey(start.document);
     this.#state = {
       survey: start.survey,
       document: start.document,
@@ -253,6 +253,13 @@ const READ_ONLY: Refusal = {
   message: 'Your role on this site lets you read the book but not change it. Nothing was changed.',
 };
 
+/** The storey one comes in by: the one nearest to level 0. */
+function groundStorey(document: SurveyDocument): string | null {
+  const storeys = [...document.storeys.values()];
+  const away = (level_m: number) => Math.abs(level_m);
+  return storeys.sort((a, b) => away(a.level_m) - away(b.level_m))[0]?.id ?? null;
+}
+
 function firstRoom(document: SurveyDocument, storeyId: string | null): string | null {
   for (const room of document.rooms.values()) if (room.storey_id === storeyId) return room.id;
   return null;
@@ -262,9 +269,7 @@ function firstRoom(document: SurveyDocument, storeyId: string | null): string | 
 function stillThere(state: BookState): Pick<BookState, 'selection' | 'storeyId' | 'roomInHand'> {
   const { document } = state;
   const storeyId =
-    state.storeyId !== null && document.storeys.has(state.storeyId)
-      ? state.storeyId
-      : (document.storeys.keys().next().value ?? null);
+    state.storeyId !== null && document.storeys.has(state.storeyId) ? state.storeyId : groundStorey(document);
   const roomInHand =
     state.roomInHand !== null && document.rooms.has(state.roomInHand)
       ? state.roomInHand
