@@ -2,8 +2,14 @@ import type { Change, Changes } from './change.ts';
 import { mapName, type MapName } from './rows.ts';
 import type { SurveyDocument } from './survey-document.ts';
 
-/** The last outcome of a set of changes: a command looks at it before the session does. */
-const known = new WeakMap<Changes, { readonly before: SurveyDocument; readonly after: SurveyDocument }>();
+interface Outcome {
+  readonly changes: Changes;
+  readonly before: SurveyDocument;
+  readonly after: SurveyDocument;
+}
+
+/** The last outcome, because a command looks at it just before the session takes it. One only, so no history is held. */
+let last: Outcome | null = null;
 
 /**
  * The document after the changes. Untouched maps and rows are the very same objects as before, so whatever was derived
@@ -12,8 +18,7 @@ const known = new WeakMap<Changes, { readonly before: SurveyDocument; readonly a
  * @throws ChangesDoNotFit when an edit names a row the document does not have; merge first
  */
 export function applyChanges(document: SurveyDocument, changes: Changes): SurveyDocument {
-  const found = known.get(changes);
-  if (found?.before === document) return found.after;
+  if (last?.changes === changes && last.before === document) return last.after;
   const copies = new Map<MapName, Map<string, object>>();
   for (const change of changes) {
     const name = mapName(change.kind);
@@ -26,7 +31,7 @@ export function applyChanges(document: SurveyDocument, changes: Changes): Survey
   }
   if (copies.size === 0) return document;
   const after = { ...document, ...(Object.fromEntries(copies) as unknown as Partial<SurveyDocument>) };
-  known.set(changes, { before: document, after });
+  last = { changes, before: document, after };
   return after;
 }
 
