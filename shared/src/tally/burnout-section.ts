@@ -6,6 +6,9 @@ import { roomThermalInertia } from './room-linings.ts';
 import type { RoomTally } from './room-tally.ts';
 import { noteMissing, type TallyContext } from './tally-context.ts';
 
+/** A fire behind a keyhole would last longer; by then every layer has long heated through. */
+const LONGEST_H = 1000;
+
 /** The section `burnout` of a tally: a fire that burns the room out, as kept first and then as designed. */
 export function burnoutSection(given: BurnoutGiven, context: TallyContext): RoomTally['burnout'] {
   const { areas, openings, linings, load } = given;
@@ -27,7 +30,7 @@ export function burnoutSection(given: BurnoutGiven, context: TallyContext): Room
   const inertia = (q_f: number): Estimate | undefined => {
     if (linings.unknown.length > 0) return undefined;
     const heating = (0.2e-3 * q_f * areas.floor) / areas.enclosing / stage.openingFactor;
-    const t_max = Math.max(heating, timeLimit(given));
+    const t_max = Math.min(LONGEST_H, Math.max(heating, timeLimit(given)));
     return roomThermalInertia(linings, areas, stage, openings.roofVents, t_max, context);
   };
   const thermalInertia = inertia(load.asKept.value ?? 0);

@@ -16,6 +16,7 @@ type Load = RoomTally['load'];
 export function loadBand(
   heats: readonly EntryHeat[],
   floorLoad: { readonly Q: number; readonly A_f: number; readonly q: number },
+  samples: number,
   context: TallyContext,
 ): { standardUncertainty: Estimate; band: NonNullable<Load['band']> } {
   const { workings } = context;
@@ -32,11 +33,15 @@ export function loadBand(
     { workings, origins: { r_A: 'default', r_o: 'default' }, steps: sum.steps ?? [] },
   );
   const o = triangularMean(OVERLOOKED.low, OVERLOOKED.mode, OVERLOOKED.high);
+  const warnings =
+    samples > 0
+      ? [{ code: 'FIRST_ORDER_ONLY', text: 'Sampling is not done by this version: the band is the first-order one.' }]
+      : [];
   const at = (p: number) =>
     estimate(
       bandFractile,
       { q: floorLoad.q, u: u.value ?? 0, o, p },
-      { workings, origins: { o: 'default', p: 'given' } },
+      { workings, warnings, origins: { o: 'default', p: 'given' } },
     );
   return { standardUncertainty: u, band: { p5: at(0.05), p50: at(0.5), p80: at(0.8), p95: at(0.95) } };
 }

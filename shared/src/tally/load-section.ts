@@ -6,6 +6,7 @@ import { characteristicLoad } from '../methods/load/characteristic-load.ts';
 import { combustionFactor } from '../methods/load/combustion-factor.ts';
 import { perEnclosure } from '../methods/load/per-enclosure.ts';
 import { perFloor } from '../methods/load/per-floor.ts';
+import type { WorkingStep } from '../methods/working.ts';
 import { designLoadOf } from './design-factors.ts';
 import type { CountedPart, EntryHeat } from './entry-heats.ts';
 import { loadBand } from './load-band.ts';
@@ -39,7 +40,7 @@ export function loadSection(
 ): RoomTally['load'] {
   const { workings } = context;
   const parts = allParts(heats);
-  const total = sumOfParts(parts, context, protectionWarnings(input, heats));
+  const total = sumOfParts(parts, context, protectionWarnings(input, heats), workings ? defaultSteps(heats) : []);
   const Q = total.value ?? 0;
   const kept = (keeping: 'fixed' | 'stored' | 'passing') =>
     sumOfParts(allParts(heats.filter(({ entry }) => (entry.keeping ?? 'stored') === keeping)), context);
@@ -72,7 +73,7 @@ export function loadSection(
       { workings, warnings: characteristic.warnings, steps: characteristic.steps },
     ),
     design: designLoadOf(input, areas, m.value ?? 1, characteristic, context),
-    ...loadBand(heats, { Q, A_f, q: floorLoad.value ?? 0 }, context),
+    ...loadBand(heats, { Q, A_f, q: floorLoad.value ?? 0 }, input.options?.samples ?? 0, context),
     ...optional('localPeak', localPeakOf(heats, context)),
     ...optional('placeAmongUse', placeAmongUse(input.room.use ?? null, (Q - (fixed.value ?? 0)) / A_f, context)),
   };
@@ -131,6 +132,23 @@ function characteristicOf(input: RoomInput, fixed: number, variable: number, con
         ]
       : [],
   };
+}
+
+/** Names what nobody said about the entries and was therefore assumed. */
+function defaultSteps(heats: readonly EntryHeat[]): WorkingStep[] {
+  const unsaid = (field: 'keeping' | 'enclosure' | 'evidence') =>
+    heats.filter(({ entry }) => entry[field] == null).length;
+  return (
+    [
+      [unsaid('keeping'), 'stored'],
+      [unsaid('enclosure'), 'open'],
+      [unsaid('evidence'), 'estimated'],
+    ] as const
+  )
+    .filter(([count]) => count > 0)
+    .map(([count, taken]) => ({
+      text: `By default ${count} ${count === 1 ? 'entry is' : 'entries are'} taken as ${taken}.`,
+    }));
 }
 
 function protectionWarnings(input: RoomInput, heats: readonly EntryHeat[]): EstimateWarning[] {

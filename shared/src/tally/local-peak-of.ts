@@ -3,6 +3,9 @@ import { localPeak } from '../methods/load/local-peak.ts';
 import type { EntryHeat } from './entry-heats.ts';
 import { noteMissing, type TallyContext } from './tally-context.ts';
 
+/** The plan's own grid: thinner footprints are drawn this thin. */
+const THINNEST_M = 0.001;
+
 /** The highest load over any 2 × 2 m window; missing while an entry that counts has no place or no footprint. */
 export function localPeakOf(heats: readonly EntryHeat[], context: TallyContext): Estimate | undefined {
   const counted = heats.filter((heat) => heat.counted > 0);
@@ -28,8 +31,8 @@ export function localPeakOf(heats: readonly EntryHeat[], context: TallyContext):
       Q: placed.map(({ heat }) => heat),
       x: placed.map(({ x }) => x ?? 0),
       y: placed.map(({ y }) => y ?? 0),
-      w: placed.map(({ w }) => w ?? 0),
-      d: placed.map(({ d }) => d ?? 0),
+      w: placed.map(({ w }) => Math.max(THINNEST_M, w ?? 0)),
+      d: placed.map(({ d }) => Math.max(THINNEST_M, d ?? 0)),
       rotation: placed.map(({ rotation }) => rotation),
     },
     { workings: context.workings, origins: { x: 'given', y: 'given', w: 'given', d: 'given', rotation: 'given' } },

@@ -26,9 +26,9 @@ export function roomAreas(room: RoomInputRoom, context: TallyContext): RoomAreas
   const ring = pointsOf(room.ring_m);
   const holes = (room.holes_m ?? []).map(pointsOf);
   const region = regionArea({ ring, holes });
-  const drawn = region < LEAST_FLOOR_M2 ? 0 : region;
+
   const measured = room.measured_floor_area_m2 ?? null;
-  const A_f = measured ?? drawn;
+  const A_f = (measured ?? region) < LEAST_FLOOR_M2 ? 0 : (measured ?? region);
   const P = [ring, ...holes].reduce((sum, edge) => sum + perimeter(edge), 0);
   const H = room.height_m;
   const run = estimateOutputs(

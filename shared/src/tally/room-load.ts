@@ -1,5 +1,6 @@
 import { estimate, type Estimate, type EstimateWarning, type Origins } from '../methods/estimate.ts';
 import { fireLoad } from '../methods/load/fire-load.ts';
+import type { WorkingStep } from '../methods/working.ts';
 import type { CountedPart, EntryHeat } from './entry-heats.ts';
 import type { EntryShare, MaterialShare } from './room-tally.ts';
 import type { TallyContext } from './tally-context.ts';
@@ -9,6 +10,7 @@ export function sumOfParts(
   parts: readonly CountedPart[],
   context: TallyContext,
   warnings: readonly EstimateWarning[] = [],
+  steps: readonly WorkingStep[] = [],
 ): Estimate {
   return estimate(
     fireLoad,
@@ -21,6 +23,7 @@ export function sumOfParts(
     {
       workings: context.workings,
       warnings,
+      steps,
       ...(context.workings ? { origins: originsOf(parts) } : {}),
     },
   );

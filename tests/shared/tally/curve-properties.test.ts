@@ -32,8 +32,8 @@ const roomArbitrary: fc.Arbitrary<RoomInput> = fc.record({
     }),
     openings: fc.array(
       fc.record({
-        width_m: number(0.05, 6),
-        height_m: number(0.05, 2),
+        width_m: fc.oneof(number(1e-6, 1e-3), number(0.05, 6)),
+        height_m: number(1e-3, 2),
         state: fc.constantFrom(null, 'open' as const, 'fails' as const, 'closed' as const),
         leads_to: fc.constantFrom('inside' as const, 'outside' as const),
       }),

@@ -13,6 +13,15 @@ const square = (side: number): [number, number][] => [
 const door = { width_m: 0.9, height_m: 2, sill_m: 0, state: 'open', leads_to: 'outside' } as const;
 const concrete = { walls: { key: 'concrete' }, ceiling: { key: 'concrete' }, floor: { key: 'concrete' } };
 
+const layer = (size: number) => ({
+  layers: [
+    { thickness_m: size, conductivity_W_mK: size, density_kg_m3: size, specific_heat_J_kgK: size },
+    { thickness_m: size, conductivity_W_mK: size / 2, density_kg_m3: size, specific_heat_J_kgK: size },
+    { thickness_m: size, conductivity_W_mK: size, density_kg_m3: size, specific_heat_J_kgK: size },
+  ],
+});
+const [thick, thin] = [layer(10), layer(1e-6)];
+
 function room(changes: Partial<Room>): Room {
   return { name: 'Room', ring_m: square(5), height_m: 2.7, lining: concrete, openings: [door], ...changes };
 }
@@ -81,6 +90,54 @@ export const ODD_ROOMS: Readonly<Record<string, RoomInput>> = {
   'a door ajar': {
     room: room({ openings: [{ ...door, width_m: 0.05 }] }),
     contents: [entry({ peak_kW: 3000 })],
+  },
+  'everything as large as may be entered': {
+    room: room({
+      ring_m: [
+        [-10_000, -10_000],
+        [10_000, -10_000],
+        [10_000, 10_000],
+        [-10_000, 10_000],
+      ],
+      height_m: 100,
+      openings: Array.from({ length: 500 }, () => ({ ...door, width_m: 1000, height_m: 100 })),
+      roof_vents_m2: 100_000,
+      lining: { walls: thick, ceiling: thick, floor: thick },
+    }),
+    contents: [
+      entry({ count: 1e6, parts: [{ net_heat_MJ_kg: 150, mass_kg: 1 }], peak_kW: 1e6, width_m: 1000, depth_m: 1000 }),
+    ],
+  },
+  'everything as small as may be entered': {
+    room: room({
+      ring_m: square(0.1),
+      height_m: 1e-6,
+      openings: [{ width_m: 1e-9, height_m: 1e-9, state: 'open' }],
+      lining: { walls: thin, ceiling: thin, floor: thin },
+      measured_floor_area_m2: 1e-9,
+    }),
+    contents: [
+      entry({
+        count: 1e-9,
+        parts: [{ net_heat_MJ_kg: 1e-9, mass_kg: 1e-9 }],
+        peak_kW: 1e-9,
+        width_m: 1e-12,
+        depth_m: 1e-12,
+        x_m: 9999,
+        y_m: 0,
+      }),
+    ],
+    options: {
+      exposure_s: 1e-6,
+      time_limit_min: 1e-6,
+      fire_area_m2: 1e-9,
+      plateau_kW_m2: 1e-9,
+      combustion_factor: 1e-9,
+    },
+  },
+  'a keyhole': {
+    room: room({ ring_m: square(0.5), openings: [{ width_m: 0.01, height_m: 0.01, state: 'open' }] }),
+    contents: [entry({ peak_kW: 100 })],
   },
   'plastics and liquids in cabinets': {
     room: room({ use: 'workshop' }),

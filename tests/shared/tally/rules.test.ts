@@ -356,7 +356,20 @@ describe('limits', () => {
   });
 });
 
+describe('what nobody said', () => {
+  it('is named in the working of the load', () => {
+    const input = dock({ entries: [{ keeping: null, enclosure: null, evidence: null }, { evidence: null }] });
+    const texts = estimateRoom(input, { workings: true }).load.total.steps?.map(({ text }) => text);
+    expect(texts).toContain('By default 1 entry is taken as stored.');
+    expect(texts).toContain('By default 1 entry is taken as open.');
+    expect(texts).toContain('By default 2 entries are taken as estimated.');
+  });
+});
+
 describe('how sure the load is', () => {
+  it('says so when samples were asked for and the band is first order', () => {
+    expect(codes(estimateRoom(dock({ options: { samples: 1000 } })).load.band?.p95)).toEqual(['FIRST_ORDER_ONLY']);
+  });
   it('a weighed load is surer than a guessed one, and the band holds its middle', () => {
     const [weighed, guessed] = (['weighed', 'hearsay'] as const).map(
       (evidence) => estimateRoom(dock({ entries: [{ evidence }] })).load,

@@ -9,8 +9,14 @@ export const meanThermalInertia = defineMethod({
   symbol: 'b',
   unit: 'J/m2s1/2K',
   inputs: {
-    b: { symbol: 'b_j', unit: 'J/m2s1/2K', quantity: 'Thermal inertia of a surface', valid: [0, 1e5], list: true },
-    A: { symbol: 'A_j', unit: 'm2', quantity: 'Area of the surface, openings left out', valid: [0, 1e7], list: true },
+    b: { symbol: 'b_j', unit: 'J/m2s1/2K', quantity: 'Thermal inertia of a surface', valid: [0, Infinity], list: true },
+    A: {
+      symbol: 'A_j',
+      unit: 'm2',
+      quantity: 'Area of the surface, openings left out',
+      valid: [0, Infinity],
+      list: true,
+    },
   },
   equation: 'b = Σ b_j A_j / (A_t − A_v)',
   sources: [en1991('Annex A(8), equation (A.5)')],

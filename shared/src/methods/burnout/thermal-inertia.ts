@@ -28,7 +28,7 @@ export const thermalInertia = defineMethod({
   sources: [en1991('Annex A(5)-(7), equations (A.3) to (A.4b)')],
   assumptions: ['Layer 1 is the exposed one.', 'Values at room temperature.'],
   why: 'It belongs to the parametric curve and the conversion factor k_b.',
-  outOfRange: 'refuse',
+  outOfRange: 'warn',
   outputs: { b: { symbol: 'b', unit: 'J/m2s1/2K', quantity: 'Thermal inertia' } },
   run({ t_max, s, rho, c, lambda }): ThermalInertia {
     const b1 = Math.sqrt(rho[0]! * c[0]! * lambda[0]!);

@@ -9,8 +9,8 @@ export const fuelPlateau = defineMethod({
   symbol: 'Q_max,f',
   unit: 'kW',
   inputs: {
-    RHR_f: { symbol: 'RHR_f', unit: 'kW/m2', quantity: 'Heat release rate per area', valid: [0, 1e5] },
-    A_fi: { symbol: 'A_fi', unit: 'm2', quantity: 'Fire area', valid: [0, 1e6] },
+    RHR_f: { symbol: 'RHR_f', unit: 'kW/m2', quantity: 'Heat release rate per area', valid: [0, Infinity] },
+    A_fi: { symbol: 'A_fi', unit: 'm2', quantity: 'Fire area', valid: [0, Infinity] },
     peaks: {
       symbol: 'Q_p,i',
       unit: 'kW',

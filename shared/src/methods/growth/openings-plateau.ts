@@ -12,7 +12,12 @@ export const openingsPlateau = defineMethod({
   symbol: 'Q_max,v',
   unit: 'kW',
   inputs: {
-    F: { symbol: 'A_v √h_eq', unit: 'm5/2', quantity: 'Ventilation factor, broken glass counted', valid: [0, 1e5] },
+    F: {
+      symbol: 'A_v √h_eq',
+      unit: 'm5/2',
+      quantity: 'Ventilation factor, broken glass counted',
+      valid: [0, Infinity],
+    },
   },
   equation: 'Q_max,v = 0.10 · m · H_u · A_v √h_eq MW with m = 0.8 and H_u = 17.5 MJ/kg: 1.40 A_v √h_eq MW',
   sources: [en1991('E.4(8), equation (E.6)'), recalled('Kawagoe, Fire behaviour in rooms', '0.09 A √H kg/s', '1958')],

@@ -9,9 +9,9 @@ export const enclosureAreas = defineMethod({
   symbol: 'A_t',
   unit: 'm2',
   inputs: {
-    A_f: { symbol: 'A_f', unit: 'm2', quantity: 'Floor area inside the walls, holes taken off', valid: [0, 1e6] },
-    P: { symbol: 'P', unit: 'm', quantity: 'Length of all walls, around holes too', valid: [0, 1e6] },
-    H: { symbol: 'H', unit: 'm', quantity: 'Clear height', valid: [0, 100] },
+    A_f: { symbol: 'A_f', unit: 'm2', quantity: 'Floor area inside the walls, holes taken off', valid: [0, Infinity] },
+    P: { symbol: 'P', unit: 'm', quantity: 'Length of all walls, around holes too', valid: [0, Infinity] },
+    H: { symbol: 'H', unit: 'm', quantity: 'Clear height', valid: [0, Infinity] },
   },
   equation: 'A_t = 2 A_f + P · H;  V = A_f · H',
   sources: [definition('plane geometry of a room with a flat ceiling'), en1991('Annex A, definition of A_t')],

@@ -9,7 +9,7 @@ export const flashoverBabrauskas = defineMethod({
   symbol: 'Q_fo',
   unit: 'kW',
   inputs: {
-    F: { symbol: 'A √H', unit: 'm5/2', quantity: 'Ventilation factor', valid: [1e-9, 1e5] },
+    F: { symbol: 'A √H', unit: 'm5/2', quantity: 'Ventilation factor', valid: [1e-9, Infinity] },
     A_T_per_F: { symbol: 'A_T/(A √H)', unit: 'm-1/2', quantity: 'Lining area over ventilation factor', valid: [9, 65] },
   },
   equation: 'Q_fo = 750 A √H',

@@ -11,7 +11,7 @@ export const flashoverMqh = defineMethod({
   inputs: {
     h_k: { symbol: 'h_k', unit: 'kW/m2K', quantity: 'Heat transfer into the linings', valid: [1e-9, 100] },
     A_T: { symbol: 'A_T', unit: 'm2', quantity: 'Lining area, openings left out', valid: [1e-6, Infinity] },
-    F: { symbol: 'A √H', unit: 'm5/2', quantity: 'Ventilation factor', valid: [1e-9, 1e5] },
+    F: { symbol: 'A √H', unit: 'm5/2', quantity: 'Ventilation factor', valid: [1e-9, Infinity] },
     A_f: { symbol: 'A_f', unit: 'm2', quantity: 'Floor area', valid: [0, 100] },
     H: { symbol: 'H', unit: 'm', quantity: 'Height', valid: [0, 4] },
   },

@@ -10,7 +10,7 @@ export const flashoverThomas = defineMethod({
   unit: 'kW',
   inputs: {
     A_T: { symbol: 'A_T', unit: 'm2', quantity: 'Lining area, openings left out', valid: [1e-6, Infinity] },
-    F: { symbol: 'A √H', unit: 'm5/2', quantity: 'Ventilation factor', valid: [1e-9, 1e5] },
+    F: { symbol: 'A √H', unit: 'm5/2', quantity: 'Ventilation factor', valid: [1e-9, Infinity] },
     A_f: { symbol: 'A_f', unit: 'm2', quantity: 'Floor area', valid: [0, 150] },
   },
   equation: 'Q_fo = 7.8 A_T + 378 A √H',

@@ -16,7 +16,7 @@ export const hotLayerMqh = defineMethod({
     Q: { symbol: 'Q', unit: 'kW', quantity: 'Heat release rate', valid: [0, Infinity] },
     h_k: { symbol: 'h_k', unit: 'kW/m2K', quantity: 'Heat transfer into the linings', valid: [1e-9, 100] },
     A_T: { symbol: 'A_T', unit: 'm2', quantity: 'Lining area, openings left out', valid: [1e-6, Infinity] },
-    F: { symbol: 'A √H', unit: 'm5/2', quantity: 'Ventilation factor', valid: [1e-9, 1e5] },
+    F: { symbol: 'A √H', unit: 'm5/2', quantity: 'Ventilation factor', valid: [1e-9, Infinity] },
     position: { symbol: '', quantity: 'Where the fire burns', choices: ['centre', 'wall', 'corner'] },
   },
   equation: 'ΔT = 6.85 [Q² / (h_k A_T A √H)]^⅓, × 1.3 at a wall, × 1.7 in a corner, at most 600 K',

@@ -8,7 +8,7 @@ export const kawagoe = defineMethod({
   title: 'Burning rate under ventilation control',
   symbol: 'R',
   unit: 'kg/s',
-  inputs: { F: { symbol: 'A √H', unit: 'm5/2', quantity: 'Ventilation factor', valid: [0, 1e5] } },
+  inputs: { F: { symbol: 'A √H', unit: 'm5/2', quantity: 'Ventilation factor', valid: [0, Infinity] } },
   equation: 'R = 0.09 A √H;  air = 0.5 A √H',
   sources: [
     {

@@ -9,7 +9,7 @@ export const openingFactor = defineMethod({
   symbol: 'O',
   unit: 'm1/2',
   inputs: {
-    F: { symbol: 'A_v √h_eq', unit: 'm5/2', quantity: 'Ventilation factor', valid: [0, 1e5] },
+    F: { symbol: 'A_v √h_eq', unit: 'm5/2', quantity: 'Ventilation factor', valid: [0, Infinity] },
     A_t: { symbol: 'A_t', unit: 'm2', quantity: 'Enclosing area, openings included', valid: [1e-6, Infinity] },
   },
   equation: 'O = A_v √h_eq / A_t',

@@ -9,7 +9,7 @@ export const openings = defineMethod({
   symbol: 'A_v √h_eq',
   unit: 'm5/2',
   inputs: {
-    A: { symbol: 'A_i', unit: 'm2', quantity: 'Area of an opening', valid: [0, 1e5], list: true },
+    A: { symbol: 'A_i', unit: 'm2', quantity: 'Area of an opening', valid: [0, Infinity], list: true },
     h: { symbol: 'h_i', unit: 'm', quantity: 'Height of the opening', valid: [0, 100], list: true },
   },
   equation: 'A_v = Σ A_i;  h_eq = Σ A_i h_i / A_v;  F = A_v √h_eq',

@@ -9,8 +9,8 @@ export const roofVentEquivalent = defineMethod({
   symbol: 'F_fict',
   unit: 'm5/2',
   inputs: {
-    F: { symbol: 'A_v √h', unit: 'm5/2', quantity: 'Ventilation factor of wall openings', valid: [1e-9, 1e5] },
-    A_h: { symbol: 'A_h', unit: 'm2', quantity: 'Area of the roof vent', valid: [0, 1e5] },
+    F: { symbol: 'A_v √h', unit: 'm5/2', quantity: 'Ventilation factor of wall openings', valid: [1e-9, Infinity] },
+    A_h: { symbol: 'A_h', unit: 'm2', quantity: 'Area of the roof vent', valid: [0, Infinity] },
     h_d: { symbol: 'h_d', unit: 'm', quantity: 'From mid-height of the wall opening to the vent', valid: [1e-3, 100] },
     share: { symbol: 'A_h √h_d/(A_v √h)', unit: '', quantity: 'Roof vent over wall openings', valid: [0.3, 1.5] },
   },

@@ -9,7 +9,7 @@ export const ventilationLimit = defineMethod({
   symbol: 'Q_v',
   unit: 'kW',
   inputs: {
-    F: { symbol: 'A √H', unit: 'm5/2', quantity: 'Ventilation factor', valid: [0, 1e5] },
+    F: { symbol: 'A √H', unit: 'm5/2', quantity: 'Ventilation factor', valid: [0, Infinity] },
     O: { symbol: 'O', unit: 'm1/2', quantity: 'Opening factor', valid: [0, 0.2] },
   },
   equation: 'Q_v = 1500 A √H',
