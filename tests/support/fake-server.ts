@@ -18,7 +18,7 @@ type Answer = (request: FakeRequest) => Response | Promise<Response>;
 export interface FakeServer {
   /** Everything that was asked, in order. */
   readonly requests: readonly FakeRequest[];
-  /** Answers one operation; the body is held to the contract, so that the fake cannot say what the API never would. */
+  /** Answers one operation; what is asked and what is answered are held to the contract, so that the fake cannot take or say what the API never would. */
   readonly answer: <P extends Schema, Q extends Schema, B extends Schema, R extends Schema>(
     contract: Contract<P, Q, B, R>,
     params: Record<string, string>,
@@ -71,6 +71,9 @@ export function fakeServer(): FakeServer {
     requests,
     answer(contract, params, body) {
       put(contract, params, (request) => {
+        // The API refuses a body or a query its contract does not know; so does the stand-in, loudly.
+        contract.body?.parse(request.body);
+        contract.query?.parse(Object.fromEntries(request.query));
         if (contract.response === undefined) return new Response(null, { status: contract.status });
         const value: unknown = typeof body === 'function' ? (body as (asked: FakeRequest) => unknown)(request) : body;
         return json(contract.status, contract.response.parse(value), 'application/json');
