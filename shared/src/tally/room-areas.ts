@@ -26,7 +26,6 @@ export function roomAreas(room: RoomInputRoom, context: TallyContext): RoomAreas
   const ring = pointsOf(room.ring_m);
   const holes = (room.holes_m ?? []).map(pointsOf);
   const region = regionArea({ ring, holes });
-
   const measured = room.measured_floor_area_m2 ?? null;
   const A_f = (measured ?? region) < LEAST_FLOOR_M2 ? 0 : (measured ?? region);
   const P = [ring, ...holes].reduce((sum, edge) => sum + perimeter(edge), 0);
