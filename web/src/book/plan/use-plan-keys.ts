@@ -3,7 +3,10 @@ import type { ActionWorld } from '../actions/action.ts';
 import { keyName } from '../actions/key-name.ts';
 import { runKey } from '../actions/run-key.ts';
 
-/** Undo and redo answer everywhere in the Book; all other keys only while the plan page has the focus. */
+/**
+ * Undo and redo answer everywhere in the Book; all other keys while the plan page has the focus, or nothing a person
+ * chose has it: a Book just opened, with the focus on its heading or nowhere, answers to its keys.
+ */
 const EVERYWHERE = new Set(['Control+Z', 'Control+Shift+Z', 'Control+Y']);
 
 /** Listens for the keys of the plan; never while somebody types. */
@@ -14,7 +17,7 @@ export function usePlanKeys(page: RefObject<HTMLElement | null>, world: ActionWo
       const { target } = event;
       if (event.defaultPrevented || (target instanceof Element && isTyping(target))) return;
       const name = keyName(event);
-      const onPlan = target instanceof Node && (page.current?.contains(target) ?? false);
+      const onPlan = target instanceof Element && (hasNoFocus(target) || (page.current?.contains(target) ?? false));
       if (!onPlan && !EVERYWHERE.has(name)) return;
       // A button is pressed with Enter and Space; its arrows and letters still belong to the plan.
       if (name === '?') showKeys();
@@ -27,6 +30,10 @@ export function usePlanKeys(page: RefObject<HTMLElement | null>, world: ActionWo
       window.removeEventListener('keydown', listen);
     };
   }, [page, session, host, showKeys]);
+}
+
+function hasNoFocus(target: Element): boolean {
+  return target === document.body || target.tagName === 'H1';
 }
 
 function isTyping(target: Element): boolean {
