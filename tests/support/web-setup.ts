@@ -37,6 +37,11 @@ if (!('hidePopover' in HTMLElement.prototype)) {
 }
 if (!('scrollIntoView' in Element.prototype)) Object.assign(Element.prototype, { scrollIntoView: () => undefined });
 window.scrollTo = () => undefined;
+// Nothing is laid out, so nothing would count as visible; focus goes only to what is.
+Element.prototype.getClientRects = function (this: Element): DOMRectList {
+  const rects = this.isConnected ? [this.getBoundingClientRect()] : [];
+  return Object.assign(rects, { item: (index: number) => rects[index] ?? null });
+};
 
 beforeEach(() => {
   window.localStorage.clear();

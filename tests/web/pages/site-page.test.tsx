@@ -109,11 +109,14 @@ describe('the site', () => {
     expect(email.value).toBe('who@nowhere.example');
   });
 
-  it('asks before a role is taken away, and says why when it is refused', async () => {
+  it('asks before a role is taken away, with the way back in focus, and says why when it is refused', async () => {
     show(MANAGER);
     server.refuse(takeSiteRole, { siteId: uuid(10), roleId: uuid(40) }, 409, 'A site keeps at least one manager.');
     fireEvent.click(await screen.findByRole('button', { name: /^Take away the role manager/ }));
     const dialog = await screen.findByRole('dialog', { name: 'Take the role from Mara Tidewell' });
+    await waitFor(() => {
+      expect(document.activeElement?.textContent).toBe('Keep it as it is');
+    });
     fireEvent.click(within(dialog).getByRole('button', { name: 'Take the role away' }));
     expect(await screen.findByText('A site keeps at least one manager.')).toBeTruthy();
   });
