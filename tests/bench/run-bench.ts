@@ -3,10 +3,17 @@ import type { BenchRow } from './bench-row.ts';
 import { benchApi } from './bench-api.ts';
 import { benchBundle } from './bench-bundle.ts';
 import { benchEstimateRoom } from './bench-estimate-room.ts';
+import { benchReport } from './bench-report.ts';
 import { benchStart } from './bench-start.ts';
 
 /** Runs every benchmark one after the other and prints one table; `--json FILE` writes the rows as well. */
-const benches: readonly (() => Promise<readonly BenchRow[]>)[] = [benchEstimateRoom, benchBundle, benchApi, benchStart];
+const benches: readonly (() => Promise<readonly BenchRow[]>)[] = [
+  benchEstimateRoom,
+  benchBundle,
+  benchApi,
+  benchReport,
+  benchStart,
+];
 
 const rows: BenchRow[] = [];
 for (const bench of benches) {

@@ -23,12 +23,27 @@ describe('text that people type', () => {
     ['Japanese, Chinese, Korean', '日本 仓库 창고'],
     ['emoji', '😀 🔥'],
     ['Hebrew', 'שלום'],
+    ['scripts that need shapers of their own', 'ⴰⵣⵓⵍ ᠮᠣᠩ ሰላም ไทย नमस् ខ្មែ'],
   ])('%s prints with a glyph for every letter and reads back the same', async (_, typed) => {
     const printed = await line(typed);
     // The reader guesses spaces from gaps and adds marks of direction; the letters are what counts.
     const letters = (text: string) => text.replace(/[\s\u200e\u200f\u202a-\u202e\u2066-\u2069]/gu, '').normalize('NFC');
     expect(letters(printed.text)).toBe(letters(typed));
     expect(printed.image && inkShare(printed.image)).toBeGreaterThan(0.005);
+  });
+
+  it('never leaves a box: any character has a glyph or prints as its number', async () => {
+    const step = 61;
+    const characters = Array.from({ length: Math.floor(0x1ffff / step) }, (_, index) => (index + 1) * step)
+      .filter((codePoint) => codePoint < 0xd800 || codePoint > 0xdfff)
+      .map((codePoint) => String.fromCodePoint(codePoint));
+    const { book } = await PdfFile.create(characters.join(''));
+    const missing = '0000';
+    for (const character of characters) {
+      for (const { hex } of book.set(character, 'bold')) {
+        expect(hex.startsWith(missing), `U+${character.codePointAt(0)?.toString(16)}`).toBe(false);
+      }
+    }
   });
 
   it('joins Arabic letters: the word is narrower than its letters apart', async () => {

@@ -6,6 +6,7 @@ import { writeText } from '../layout/write-text.ts';
 import type { Sheet } from '../pdf/sheet.ts';
 import type { RoomReport } from '../report-book.ts';
 import { sourceText } from './source-text.ts';
+import { typeset } from './typeset.ts';
 import { tallyEstimates } from './tally-estimates.ts';
 
 /** Each method that was used, once: its relation, what it takes for granted, why it was chosen, its source. */
@@ -31,7 +32,7 @@ export function writeMethodsPage(flow: Flow, rooms: readonly RoomReport[]): Shee
     writeText(flow, id, { ...small, colour: SOFT });
     if (equation !== undefined) writeText(flow, equation, small);
     if (why !== undefined) writeText(flow, `Why this one: ${why}`, small);
-    for (const assumption of assumptions ?? []) writeText(flow, `Takes for granted: ${assumption}`, small);
+    for (const assumption of assumptions ?? []) writeText(flow, `Takes for granted: ${typeset(assumption)}`, small);
     writeText(flow, `Source: ${(sources ?? []).map(sourceText).join('; ')}`, { ...small, colour: SOFT, after: 8 });
   }
   return sheet;

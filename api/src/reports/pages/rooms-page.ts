@@ -26,7 +26,7 @@ export function writeRoomsPage(
   const columns: Column[] = [
     { title: '', width: 18, align: 'right' },
     { title: 'Room', width: { share: 1 } },
-    { title: 'Use', width: { share: 0.55 } },
+    { title: 'Use', width: { share: 0.8 } },
     { title: `Area, ${figures.unit('m2')}`, width: 42, align: 'right' },
     { title: `Heat kept, ${figures.unit('MJ')}`, width: 58, align: 'right' },
     { title: `Density, ${density}`, width: 66, align: 'right' },

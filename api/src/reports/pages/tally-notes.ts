@@ -6,6 +6,7 @@ import { writeTable } from '../layout/write-table.ts';
 import { writeText } from '../layout/write-text.ts';
 import type { RoomReport } from '../report-book.ts';
 import { missingName } from './missing-name.ts';
+import { typeset } from './typeset.ts';
 import { superscript, type RoomNotes } from './room-notes.ts';
 
 /** What could not be computed, which input would give it, and why it is not a zero. */
@@ -26,7 +27,7 @@ export function writeMissing(flow: Flow, { tally }: RoomReport): void {
     { title: 'Why', width: { share: 1.3 } },
   ];
   const rows = [...byReason.values()].map(({ names, input, why }) => ({
-    cells: [names.join('; '), input === 'engine' ? '–' : input, why],
+    cells: [names.join('; '), input === 'engine' ? '–' : input, typeset(why)],
   }));
   writeTable(flow, columns, rows);
   flow.gap(14);
@@ -37,7 +38,7 @@ export function writeNotes(flow: Flow, notes: RoomNotes): void {
   if (notes.all.length === 0) return;
   writeHeading(flow, 'Flags beside these numbers', 30);
   for (const [index, text] of notes.all.entries()) {
-    writeText(flow, `${superscript(index + 1)} ${text}`, { size: SIZE.table, after: 2.5 });
+    writeText(flow, `${superscript(index + 1)} ${typeset(text)}`, { size: SIZE.table, after: 2.5 });
   }
   flow.gap(10);
 }

@@ -1,8 +1,7 @@
 import { useByKey } from '@embertally/shared/catalogue/uses';
 import type { Flow } from '../layout/flow.ts';
-import { SOFT, VERDIGRIS, SIZE } from '../layout/theme.ts';
+import { SIZE, VERDIGRIS } from '../layout/theme.ts';
 import { writeTitle } from '../layout/write-heading.ts';
-import { writeText } from '../layout/write-text.ts';
 import type { Sheet } from '../pdf/sheet.ts';
 import type { ReportBook, RoomReport } from '../report-book.ts';
 import { RoomNotes } from './room-notes.ts';
@@ -45,12 +44,12 @@ export function writeTallyPages(
   writeMissing(flow, room);
   writeNotes(flow, notes);
   writeCautionTitles(flow, room);
-  writeText(flow, 'Every number above is derived in the workings of this room', { colour: SOFT, size: SIZE.table });
+  flow.need(SIZE.table * 2);
   const [end, y, left] = [flow.sheet, flow.y, flow.left];
   flow.later(() => {
     const target = workings();
     if (target === undefined) return;
-    const text = `Workings: page ${flow.pageOf(target)}`;
+    const text = `Every number above is derived in the workings of this room, page ${flow.pageOf(target)}`;
     const wide = end.text(text, left, y + SIZE.table, { size: SIZE.table, colour: VERDIGRIS });
     end.link(left, y, wide, SIZE.table + 3, target);
   });

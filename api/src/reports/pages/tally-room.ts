@@ -6,6 +6,7 @@ import { writeText } from '../layout/write-text.ts';
 import type { ReportBook, RoomReport } from '../report-book.ts';
 import { FLASHOVER_NAMES } from './lowest-flashover.ts';
 import type { RoomNotes } from './room-notes.ts';
+import { typeset } from './typeset.ts';
 import { writeFigureList } from './write-figure-list.ts';
 
 const REGIMES: Readonly<Record<RoomReport['tally']['room']['regime'], string>> = {
@@ -27,8 +28,8 @@ export function writeRoomFigures(flow: Flow, { figures }: ReportBook, { tally }:
         cells: [
           FLASHOVER_NAMES[way],
           `${figures.estimate(criterion)}${notes.marks(criterion)}`,
-          criterion.range,
-          criterion.applicable ? 'applies' : `does not apply: ${criterion.why ?? 'outside its range'}`,
+          typeset(criterion.range),
+          criterion.applicable ? 'applies' : `does not apply: ${typeset(criterion.why ?? 'outside its range')}`,
         ],
       },
     ];

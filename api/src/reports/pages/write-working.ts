@@ -7,6 +7,7 @@ import { wrapText } from '../pdf/wrap-text.ts';
 import type { WorkingGroup } from './group-workings.ts';
 import { sourceText } from './source-text.ts';
 import type { PlacedEstimate } from './tally-estimates.ts';
+import { typeset } from './typeset.ts';
 import { workingFigure } from './working-figure.ts';
 
 const INDENT = 12;
@@ -30,11 +31,13 @@ export function writeWorking(flow: Flow, { results, shared }: WorkingGroup): voi
     for (const { text, equation, value, unit } of (shared.steps ?? []).slice(0, -1)) {
       if (equation !== undefined && equation === shared.equation) continue;
       const shown = value == null ? '' : ` ${workingFigure(value, unit)}`;
-      const between = equation === undefined ? (shown === '' ? '' : ' =') : `: ${equation}${shown === '' ? '' : ' ='}`;
-      writeText(flow, `${text}${between}${shown}`, small);
+      const equals = shown === '' || /=$/u.test(equation ?? text) ? '' : ' =';
+      const between = equation === undefined ? equals : `: ${equation}${equals}`;
+      writeText(flow, typeset(`${text}${between}${shown}`), small);
     }
   }
-  for (const { text, code } of shared.warnings) writeText(flow, `Flag ${code}: ${text}`, { ...small, colour: OCHRE });
+  for (const { text, code } of shared.warnings)
+    writeText(flow, `Flag ${code}: ${typeset(text)}`, { ...small, colour: OCHRE });
   const [source] = shared.sources ?? [];
   if (source !== undefined) writeText(flow, `Source: ${sourceText(source)}`, { ...small, colour: SOFT });
   flow.gap(4);

@@ -7,6 +7,28 @@ import { unpackWoff } from './unpack-woff.ts';
 const packages = createRequire(import.meta.url);
 /** Figures of equal width, so that columns of numbers line up. */
 const FEATURES = { tnum: true, kern: false, liga: false };
+const ARABIC = /\p{Script=Arabic}/u;
+
+type ScriptLayout = (
+  text: string,
+  features: typeof FEATURES | undefined,
+  script: string,
+) => ReturnType<ReturnType<typeof fontkit.create>['layout']>;
+
+/**
+ * The font library, told the script instead of left to guess it: letters are set one by one, so only Arabic needs shaping,
+ * and the library's shapers of some other scripts do not run at all.
+ */
+const letterByLetter: Parameters<typeof CustomFontSubsetEmbedder.for>[0] = {
+  create(bytes) {
+    const font = fontkit.create(bytes);
+    // The third argument is there; the types leave it out.
+    const layout = font.layout.bind(font) as ScriptLayout;
+    return Object.assign(font, {
+      layout: (text: string, features?: typeof FEATURES) => layout(text, features, ARABIC.test(text) ? 'arab' : 'latn'),
+    });
+  },
+};
 
 /** A glyph or a shaped run: what the page content says and how far the pen moves (in 1/1000 of the size). */
 export interface SetText {
@@ -35,7 +57,11 @@ export class FontFace {
 
   static async load(key: string, file: string, name: string, context: PDFContext): Promise<FontFace> {
     const bytes = unpackWoff(await readFile(packages.resolve(file)));
-    return new FontFace(key, context.nextRef(), await CustomFontSubsetEmbedder.for(fontkit, bytes, name, FEATURES));
+    return new FontFace(
+      key,
+      context.nextRef(),
+      await CustomFontSubsetEmbedder.for(letterByLetter, bytes, name, FEATURES),
+    );
   }
 
   has(codePoint: number): boolean {
