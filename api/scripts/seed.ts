@@ -2,9 +2,10 @@ import type { SiteRoleName } from '@embertally/shared/policy/policy';
 import { createHash, randomBytes } from 'node:crypto';
 import { existsSync, mkdirSync, readFileSync, renameSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
-import type { DataSource } from 'typeorm';
 import type { Actor, Trail } from '../src/actor.ts';
 import type { Clock } from '../src/clock.ts';
+import type { Database } from '../src/repositories/database.ts';
+import { PersonRepository } from '../src/repositories/person-repository.ts';
 import type { Services } from '../src/services/services.ts';
 import { demoChanges } from './demo/demo-changes.ts';
 import { DEMO_LIMITS } from './demo/demo-limits.ts';
@@ -22,7 +23,7 @@ interface DemoFile {
 
 export interface SeedParts {
   readonly services: Services;
-  readonly database: DataSource;
+  readonly database: Database;
   readonly clock: Clock;
   /** Where `demo.json`, with the passwords of the demo's people, is kept. */
   readonly dataDir: string;
@@ -36,15 +37,10 @@ export async function seedDemo(parts: SeedParts): Promise<void> {
   const file = join(parts.dataDir, 'demo.json');
   const demo = readDemo(file);
   if (demo?.complete === true) return;
-  if (demo === null && !(await isEmpty(parts.database))) return;
+  if (demo === null && (await new PersonRepository(parts.database.statements).hasAny())) return;
   const begun = demo ?? beginDemo(file, parts.clock);
   await fill(parts.services, begun);
   writeDemo(file, { ...begun, complete: true });
-}
-
-async function isEmpty(database: DataSource): Promise<boolean> {
-  const rows: unknown[] = await database.query('SELECT 1 FROM organisation LIMIT 1');
-  return rows.length === 0;
 }
 
 function readDemo(file: string): DemoFile | null {

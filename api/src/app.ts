@@ -1,7 +1,6 @@
 import compression from 'compression';
 import express, { type Express } from 'express';
 import type { Logger } from 'pino';
-import type { DataSource } from 'typeorm';
 import type { Sessions } from './auth/sessions.ts';
 import type { Clock } from './clock.ts';
 import { Fault } from './fault.ts';
@@ -17,7 +16,6 @@ import { allRoutes } from './routes/all-routes.ts';
 import type { Services } from './services/services.ts';
 
 export interface AppParts {
-  readonly database: DataSource;
   readonly services: Services;
   readonly sessions: Sessions;
   readonly events: SurveyEvents;

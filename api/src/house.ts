@@ -1,7 +1,7 @@
 import type { Express } from 'express';
 import { join } from 'node:path';
 import type { Logger } from 'pino';
-import type { DataSource } from 'typeorm';
+import { Database } from './repositories/database.ts';
 import { createApp } from './app.ts';
 import { PasswordHashes } from './auth/password-hashes.ts';
 import { Sessions } from './auth/sessions.ts';
@@ -30,7 +30,7 @@ export interface HouseOptions {
 export class House {
   readonly app: Express;
   readonly services: Services;
-  readonly database: DataSource;
+  readonly database: Database;
   private readonly feed: SurveyFeed;
   private readonly jobs: DatabaseJobs;
   private readonly events: SurveyEvents;
@@ -43,7 +43,7 @@ export class House {
   constructor(env: Env, log: Logger, options: HouseOptions = {}) {
     const clock = options.clock ?? systemClock;
     this.log = log;
-    this.database = dataSource({ url: env.databaseUrl, poolSize: env.databasePool });
+    this.database = new Database(dataSource({ url: env.databaseUrl, poolSize: env.databasePool }));
     this.sessions = new Sessions(this.database, clock);
     this.feed = new SurveyFeed(env.databaseUrl, log);
     this.jobs = new DatabaseJobs(env.databaseUrl, log);
@@ -66,7 +66,6 @@ export class House {
       ...(options.heartbeat_ms === undefined ? {} : { heartbeat_ms: options.heartbeat_ms }),
     });
     this.app = createApp({
-      database: this.database,
       services: this.services,
       sessions: this.sessions,
       events: this.events,
@@ -100,12 +99,12 @@ export class House {
     await this.jobs.close();
     await this.services.summaries.stop();
     await this.feed.close();
-    if (this.database.isInitialized) await this.database.destroy();
+    await this.database.close();
   }
 
   private async connect(): Promise<void> {
     try {
-      await this.database.initialize();
+      await this.database.open();
     } catch (error) {
       if (this.closed) return;
       this.log.error({ err: error }, 'the database does not answer; trying again');

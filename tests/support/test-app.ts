@@ -126,7 +126,7 @@ export class TestApp {
 
   /** A further member of somebody's organisation. */
   async colleague(of: Actor, role: 'admin' | 'member' = 'member', name = 'Wren Tolly'): Promise<TestPerson> {
-    const people = new PersonRepository(this.house.database.manager);
+    const people = new PersonRepository(this.house.database.statements);
     const known = await this.owner.query<{ password_hash: string }>('SELECT password_hash FROM person WHERE id = $1', [
       of.personId,
     ]);

@@ -1,5 +1,5 @@
 import { Lucia, TimeSpan, type Adapter, type DatabaseSession, type DatabaseUser } from 'lucia';
-import type { DataSource } from 'typeorm';
+import type { Database } from '../repositories/database.ts';
 import type { Actor } from '../actor.ts';
 import type { Clock } from '../clock.ts';
 import { SessionRepository, type SessionWithActor } from '../repositories/session-repository.ts';
@@ -35,8 +35,8 @@ export class Sessions {
   private readonly repository: SessionRepository;
   private readonly clock: Clock;
 
-  constructor(database: DataSource, clock: Clock) {
-    this.repository = new SessionRepository(database.manager);
+  constructor(database: Database, clock: Clock) {
+    this.repository = new SessionRepository(database.statements);
     this.clock = clock;
     this.lucia = new Lucia<{ member_id: string }, SessionWithActor>(this.adapter(), {
       sessionExpiresIn: new TimeSpan(IDLE_h, 'h'),

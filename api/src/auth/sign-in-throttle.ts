@@ -1,5 +1,5 @@
 import { randomUUID } from 'node:crypto';
-import type { DataSource } from 'typeorm';
+import type { Database } from '../repositories/database.ts';
 import type { Clock } from '../clock.ts';
 import { Fault } from '../fault.ts';
 import { SignInAttemptRepository } from '../repositories/sign-in-attempt-repository.ts';
@@ -17,10 +17,10 @@ const FIRST_WAIT_s = 30;
  * that many at once gain nothing. After ten failures the wait doubles with each further one.
  */
 export class SignInThrottle {
-  private readonly database: DataSource;
+  private readonly database: Database;
   private readonly clock: Clock;
 
-  constructor(database: DataSource, clock: Clock) {
+  constructor(database: Database, clock: Clock) {
     this.database = database;
     this.clock = clock;
   }
@@ -33,8 +33,8 @@ export class SignInThrottle {
    */
   reserve(account: string, ip: string): Promise<string> {
     const accountHash = hashToken(account);
-    return this.database.transaction(async (manager) => {
-      const attempts = new SignInAttemptRepository(manager);
+    return this.database.transaction(async (statements) => {
+      const attempts = new SignInAttemptRepository(statements);
       await attempts.lock(accountHash, ip);
       const now = this.clock.now();
       const counts = await attempts.count(accountHash, ip, now, WINDOW_s);
@@ -52,14 +52,14 @@ export class SignInThrottle {
   }
 
   async succeeded(id: string): Promise<void> {
-    await new SignInAttemptRepository(this.database.manager).markSucceeded(id);
+    await new SignInAttemptRepository(this.database.statements).markSucceeded(id);
   }
 
   /** Counts a sign-up. @throws Fault 429 when this network address has made very many */
   reserveSignUp(ip: string): Promise<void> {
     const accountHash = hashToken(`sign-up from ${ip}`);
-    return this.database.transaction(async (manager) => {
-      const attempts = new SignInAttemptRepository(manager);
+    return this.database.transaction(async (statements) => {
+      const attempts = new SignInAttemptRepository(statements);
       await attempts.lock(accountHash, ip);
       const now = this.clock.now();
       const counts = await attempts.count(accountHash, ip, now, WINDOW_s);
@@ -70,7 +70,7 @@ export class SignInThrottle {
 
   async forgetOld(): Promise<void> {
     const dayAgo = new Date(this.clock.now().getTime() - 24 * 3600 * 1000);
-    await new SignInAttemptRepository(this.database.manager).removeBefore(dayAgo);
+    await new SignInAttemptRepository(this.database.statements).removeBefore(dayAgo);
   }
 }
 

@@ -33,6 +33,11 @@ export class PersonRepository extends SqlRepository {
     );
   }
 
+  /** Whether anybody has ever signed up. */
+  async hasAny(): Promise<boolean> {
+    return (await this.row('SELECT 1 AS yes FROM person LIMIT 1')) !== null;
+  }
+
   find(personId: string): Promise<PersonRow | null> {
     return this.row<PersonRow>('SELECT id, name, email, units FROM person WHERE id = $1', [personId]);
   }

@@ -2,7 +2,6 @@ import type { Sessions } from '../auth/sessions.ts';
 import type { SurveyEvents } from '../http/survey-events.ts';
 import type { Route } from '../http/define-route.ts';
 import type { Services } from '../services/services.ts';
-import type { DataSource } from 'typeorm';
 import { buildingRoutes } from './building-routes.ts';
 import { catalogueRoutes } from './catalogue-routes.ts';
 import { cautionRoutes } from './caution-routes.ts';
@@ -17,16 +16,15 @@ import { siteRoutes } from './site-routes.ts';
 import { surveyRoutes } from './survey-routes.ts';
 
 export interface RouteParts {
-  readonly database: DataSource;
   readonly services: Services;
   readonly sessions: Sessions;
   readonly events: SurveyEvents;
 }
 
 /** Every operation of the API; what is not listed here does not exist. */
-export function allRoutes({ database, services, sessions, events }: RouteParts): Route[] {
+export function allRoutes({ services, sessions, events }: RouteParts): Route[] {
   const routes = [
-    ...healthRoutes(database),
+    ...healthRoutes(services.health),
     ...organisationRoutes(services.accounts),
     ...sessionRoutes(services.accounts, sessions),
     ...siteRoutes(services.sites, services.siteRoles, services.history),

@@ -1,6 +1,6 @@
 import type { Me } from '@embertally/shared/contracts/sessions';
 import { randomUUID } from 'node:crypto';
-import type { DataSource } from 'typeorm';
+import type { Database } from '../repositories/database.ts';
 import type { Actor, Trail } from '../actor.ts';
 import type { PasswordHashes } from '../auth/password-hashes.ts';
 import { MAX_PASSWORD_BYTES, passwordFault } from '../auth/password-rules.ts';
@@ -11,7 +11,7 @@ import type { Clock } from '../clock.ts';
 import { Fault } from '../fault.ts';
 import { PersonRepository } from '../repositories/person-repository.ts';
 import { HOUSE_CHAIN, recordEvent } from './audit-record.ts';
-import { uniqueViolation } from './unique-violation.ts';
+import { uniqueViolation } from '../repositories/unique-violation.ts';
 
 export interface SignUpInput {
   readonly id: string;
@@ -22,7 +22,7 @@ export interface SignUpInput {
 }
 
 interface AccountParts {
-  readonly database: DataSource;
+  readonly database: Database;
   readonly clock: Clock;
   readonly sessions: Sessions;
   readonly hashes: PasswordHashes;
@@ -61,8 +61,8 @@ export class AccountService {
       organisationRole: 'admin',
     };
     try {
-      await database.transaction(async (manager) => {
-        const people = new PersonRepository(manager);
+      await database.transaction(async (statements) => {
+        const people = new PersonRepository(statements);
         await people.add({
           id: actor.personId,
           name: input.name,
@@ -79,7 +79,7 @@ export class AccountService {
           role: 'admin',
           created_at: at,
         });
-        await recordEvent(manager, {
+        await recordEvent(statements, {
           chain: { kind: 'organisation', id: input.id },
           actor,
           action: 'organisation.made',
@@ -122,7 +122,7 @@ export class AccountService {
         },
       ]);
     }
-    const people = new PersonRepository(database.manager);
+    const people = new PersonRepository(database.statements);
     const person = await people.forSignIn(input.email);
     const deviceHash = hashToken(deviceToken ?? 'no device');
     const known = await people.knowsDevice(person?.id ?? null, deviceHash);
@@ -130,7 +130,7 @@ export class AccountService {
     const right = await hashes.check(input.password, person?.password_hash ?? null);
     const at = clock.now();
     if (person === null || !right) {
-      await recordEvent(database.manager, {
+      await recordEvent(database.statements, {
         chain: person === null ? HOUSE_CHAIN : { kind: 'organisation', id: person.organisation_id },
         actor: null,
         action: 'session.refused',
@@ -152,7 +152,7 @@ export class AccountService {
     const device = deviceToken ?? newToken();
     await people.rememberDevice(person.id, hashToken(device), at);
     const me = await this.describe(person.id, person.member_id, expiresAt);
-    await recordEvent(database.manager, {
+    await recordEvent(database.statements, {
       chain: { kind: 'organisation', id: person.organisation_id },
       actor: actorOf(me),
       action: 'session.begun',
@@ -165,7 +165,7 @@ export class AccountService {
 
   async signOut(actor: Actor, token: string, trail: Trail): Promise<void> {
     await this.parts.sessions.end(token);
-    await recordEvent(this.parts.database.manager, {
+    await recordEvent(this.parts.database.statements, {
       chain: { kind: 'organisation', id: actor.organisationId },
       actor,
       action: 'session.ended',
@@ -176,7 +176,7 @@ export class AccountService {
   }
 
   async describe(personId: string, memberId: string, expiresAt: Date): Promise<Me> {
-    const people = new PersonRepository(this.parts.database.manager);
+    const people = new PersonRepository(this.parts.database.statements);
     const person = await people.find(personId);
     if (person === null) throw Fault.notFound();
     const members = await people.memberships(personId);
@@ -188,7 +188,7 @@ export class AccountService {
     patch: { readonly name?: string | undefined; readonly units?: 'SI' | 'US' | undefined },
     expiresAt: Date,
   ): Promise<Me> {
-    await new PersonRepository(this.parts.database.manager).edit(actor.personId, patch);
+    await new PersonRepository(this.parts.database.statements).edit(actor.personId, patch);
     return this.describe(actor.personId, actor.memberId, expiresAt);
   }
 }

@@ -1,4 +1,4 @@
-import type { EntityManager } from 'typeorm';
+import type { Statements } from '../repositories/database.ts';
 import type { Actor, Trail } from '../actor.ts';
 import { AuditRepository, type AuditChainKey } from '../repositories/audit-repository.ts';
 
@@ -37,7 +37,7 @@ export interface AuditRecord {
 export const HOUSE_CHAIN: AuditChainKey = { kind: 'house', id: '00000000-0000-0000-0000-000000000000' };
 
 /** Adds an event in the transaction of what it tells about: both happen or neither. JSON keeps every record on one line. */
-export function recordEvent(manager: EntityManager, draft: AuditEventDraft): Promise<void> {
+export function recordEvent(statements: Statements, draft: AuditEventDraft): Promise<void> {
   const { actor } = draft;
   const record: AuditRecord = {
     at: draft.at.toISOString(),
@@ -57,5 +57,5 @@ export function recordEvent(manager: EntityManager, draft: AuditEventDraft): Pro
     request_id: draft.trail.requestId,
     ip: draft.trail.ip,
   };
-  return new AuditRepository(manager).add(draft.chain, JSON.stringify(record));
+  return new AuditRepository(statements).add(draft.chain, JSON.stringify(record));
 }

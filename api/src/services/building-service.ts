@@ -1,6 +1,6 @@
 import type { BuildingSummary } from '@embertally/shared/contracts/sites';
 import { newStorey } from '@embertally/shared/survey/new-storey';
-import type { DataSource } from 'typeorm';
+import type { Database } from '../repositories/database.ts';
 import type { Actor, SiteAccess, Trail } from '../actor.ts';
 import type { Clock } from '../clock.ts';
 import { Fault } from '../fault.ts';
@@ -8,7 +8,7 @@ import { BuildingRepository } from '../repositories/building-repository.ts';
 import { recordEvent } from './audit-record.ts';
 import { claimId } from './claim-id.ts';
 import { staleVersion } from './stale-version.ts';
-import { uniqueViolation } from './unique-violation.ts';
+import { uniqueViolation } from '../repositories/unique-violation.ts';
 
 interface BuildingInput {
   readonly id: string;
@@ -20,16 +20,16 @@ interface BuildingInput {
 
 /** Buildings; each is made with its working survey and first storey. */
 export class BuildingService {
-  private readonly database: DataSource;
+  private readonly database: Database;
   private readonly clock: Clock;
 
-  constructor(database: DataSource, clock: Clock) {
+  constructor(database: Database, clock: Clock) {
     this.database = database;
     this.clock = clock;
   }
 
   async read(access: SiteAccess, buildingId: string): Promise<BuildingSummary> {
-    const building = await new BuildingRepository(this.database.manager).find(access.siteId, buildingId);
+    const building = await new BuildingRepository(this.database.statements).find(access.siteId, buildingId);
     if (building === null) throw Fault.notFound();
     return building;
   }
@@ -37,13 +37,13 @@ export class BuildingService {
   async create(actor: Actor, access: SiteAccess, input: BuildingInput, trail: Trail): Promise<BuildingSummary> {
     const at = this.clock.now();
     try {
-      await this.database.transaction(async (manager) => {
-        if (!(await claimId(manager, actor, input, at))) return;
-        const buildings = new BuildingRepository(manager);
+      await this.database.transaction(async (statements) => {
+        if (!(await claimId(statements, actor, input, at))) return;
+        const buildings = new BuildingRepository(statements);
         await buildings.add(input.id, access.siteId, input.name, at);
         const storey = newStorey({ id: input.storey_id, name: input.storey_name });
         await buildings.addWorkingSurvey(input.survey_id, input.id, storey, at);
-        await recordEvent(manager, {
+        await recordEvent(statements, {
           chain: { kind: 'site', id: access.siteId },
           actor,
           action: 'building.made',
@@ -73,9 +73,9 @@ export class BuildingService {
     trail: Trail,
   ): Promise<BuildingSummary> {
     const at = this.clock.now();
-    const changed = await this.database.transaction(async (manager) => {
-      if (!(await new BuildingRepository(manager).rename(buildingId, version, name, at))) return false;
-      await recordEvent(manager, {
+    const changed = await this.database.transaction(async (statements) => {
+      if (!(await new BuildingRepository(statements).rename(buildingId, version, name, at))) return false;
+      await recordEvent(statements, {
         chain: { kind: 'site', id: access.siteId },
         actor,
         action: 'building.renamed',

@@ -3,7 +3,7 @@ import { mergeChangeSet } from '@embertally/shared/survey/merge-change-set';
 import { parseChanges } from '@embertally/shared/survey/parse-changes';
 import { fromStored } from '@embertally/shared/survey/stored';
 import { createHash } from 'node:crypto';
-import type { DataSource, EntityManager } from 'typeorm';
+import type { Database, Statements } from '../repositories/database.ts';
 import type { Actor } from '../actor.ts';
 import type { Clock } from '../clock.ts';
 import { Fault } from '../fault.ts';
@@ -21,7 +21,7 @@ export interface AcceptedChangeSet {
 }
 
 interface ChangeSetParts {
-  readonly database: DataSource;
+  readonly database: Database;
   readonly clock: Clock;
   readonly summaries: SummaryService;
 }
@@ -41,8 +41,8 @@ export class ChangeSetService {
   async apply(actor: Actor, surveyId: string, body: ChangeSetBody): Promise<AcceptedChangeSet> {
     const bodyHash = createHash('sha256').update(JSON.stringify(body)).digest('hex');
     const { database, clock, summaries } = this.parts;
-    const accepted = await database.transaction(async (manager) => {
-      const sets = new ChangeSetRepository(manager);
+    const accepted = await database.transaction(async (statements) => {
+      const sets = new ChangeSetRepository(statements);
       const survey = await sets.lockSurvey(surveyId);
       if (survey === null) throw Fault.notFound();
       const stored = await answerKnown(sets, surveyId, body.id, bodyHash);
@@ -50,10 +50,10 @@ export class ChangeSetService {
       const parsed = parseChanges(body.changes);
       if (!parsed.ok) throw Fault.invalid(parsed.errors);
       const sent = normaliseTimes(parsed.value);
-      const document = fromStored(await loadTouched(new DocumentRepository(manager), surveyId, sent));
+      const document = fromStored(await loadTouched(new DocumentRepository(statements), surveyId, sent));
       const merged = mergeChangeSet(document, sent);
-      if (!merged.ok) throw await clashFault(manager, surveyId, merged.clashes);
-      await storeMerged(new DocumentRepository(manager), document, merged.document, merged.changes);
+      if (!merged.ok) throw await clashFault(statements, surveyId, merged.clashes);
+      await storeMerged(new DocumentRepository(statements), document, merged.document, merged.changes);
       const sequence = survey.sequence + 1;
       await sets.accept(
         {
@@ -92,8 +92,8 @@ async function answerKnown(
   return { id, sequence: known.sequence, changes: known.changes };
 }
 
-async function clashFault(manager: EntityManager, surveyId: string, clashes: readonly Clash[]): Promise<Fault> {
-  const sets = new ChangeSetRepository(manager);
+async function clashFault(statements: Statements, surveyId: string, clashes: readonly Clash[]): Promise<Fault> {
+  const sets = new ChangeSetRepository(statements);
   const named: Clash[] = [];
   for (const clash of clashes) {
     const author = await sets.lastAuthor(surveyId, clash.id, clash.reason === 'field' ? clash.field : null);

@@ -1,4 +1,4 @@
-import type { EntityManager } from 'typeorm';
+import type { Statements } from '../repositories/database.ts';
 import type { Actor } from '../actor.ts';
 import { Fault } from '../fault.ts';
 import { CreationRepository } from '../repositories/creation-repository.ts';
@@ -9,12 +9,12 @@ import { CreationRepository } from '../repositories/creation-repository.ts';
  * @throws Fault 409 when the id was used for something else
  */
 export async function claimId(
-  manager: EntityManager,
+  statements: Statements,
   actor: Actor,
   body: { readonly id: string },
   at: Date,
 ): Promise<boolean> {
-  const outcome = await new CreationRepository(manager).claim(body.id, actor.personId, body, at);
+  const outcome = await new CreationRepository(statements).claim(body.id, actor.personId, body, at);
   if (outcome === 'other') {
     throw new Fault(
       'conflict',

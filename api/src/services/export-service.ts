@@ -1,7 +1,7 @@
 import type { Export } from '@embertally/shared/contracts/exports';
 import { randomUUID } from 'node:crypto';
 import type { Logger } from 'pino';
-import type { DataSource } from 'typeorm';
+import type { Database } from '../repositories/database.ts';
 import type { Actor, SiteAccess, Trail } from '../actor.ts';
 import type { Clock } from '../clock.ts';
 import { Fault } from '../fault.ts';
@@ -20,7 +20,7 @@ const CHECK_ms = 400;
 const QUEUE = 'make-export';
 
 interface ExportParts {
-  readonly database: DataSource;
+  readonly database: Database;
   readonly clock: Clock;
   readonly log: Logger;
   readonly files: FileStore;
@@ -51,9 +51,9 @@ export class ExportService {
   async create(actor: Actor, access: SiteAccess, surveyId: string, input: ExportInput, trail: Trail): Promise<Export> {
     const { database, clock, jobs } = this.parts;
     const at = clock.now();
-    await database.transaction(async (manager) => {
-      if (!(await claimId(manager, actor, input, at))) return;
-      const exports = new ExportRepository(manager);
+    await database.transaction(async (statements) => {
+      if (!(await claimId(statements, actor, input, at))) return;
+      const exports = new ExportRepository(statements);
       await checkRoom(exports, surveyId, input);
       if ((await exports.countUnfinished(actor.personId)) >= UNFINISHED_PER_PERSON) {
         throw new Fault(
@@ -64,7 +64,7 @@ export class ExportService {
         );
       }
       await exports.add({ ...input, survey_id: surveyId, person_id: actor.personId, at });
-      await recordEvent(manager, {
+      await recordEvent(statements, {
         chain: { kind: 'site', id: access.siteId },
         actor,
         action: 'export.asked-for',
@@ -86,9 +86,9 @@ export class ExportService {
   async stop(actor: Actor, access: SiteAccess, id: string, trail: Trail): Promise<void> {
     const { database, clock } = this.parts;
     const at = clock.now();
-    await database.transaction(async (manager) => {
-      await new ExportRepository(manager).stop(id, at);
-      await recordEvent(manager, {
+    await database.transaction(async (statements) => {
+      await new ExportRepository(statements).stop(id, at);
+      await recordEvent(statements, {
         chain: { kind: 'site', id: access.siteId },
         actor,
         action: 'export.stopped',
@@ -115,14 +115,14 @@ export class ExportService {
   }
 
   private async find(id: string): Promise<ExportRow> {
-    const row = await new ExportRepository(this.parts.database.manager).find(id);
+    const row = await new ExportRepository(this.parts.database.statements).find(id);
     if (row === null) throw Fault.notFound();
     return row;
   }
 
   private async make(id: string): Promise<void> {
     const { database, clock, files, makeReport, log } = this.parts;
-    const exports = new ExportRepository(database.manager);
+    const exports = new ExportRepository(database.statements);
     const row = await exports.find(id);
     if (row === null || !(await exports.run(id, 0, clock.now()))) return;
     const stopping = new AbortController();
@@ -136,7 +136,7 @@ export class ExportService {
         .catch((error: unknown) => log.warn({ err: error, exportId: id }, 'progress was not written down'));
     }, CHECK_ms);
     try {
-      const input = await reportInput(database.manager, row);
+      const input = await reportInput(database.statements, row);
       const bytes = await makeReport(
         input,
         (fraction) => (progress = Math.min(0.99, Math.max(progress, fraction))),

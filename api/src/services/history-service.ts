@@ -1,5 +1,5 @@
 import type { HistoryEvent } from '@embertally/shared/contracts/history';
-import type { DataSource } from 'typeorm';
+import type { Database } from '../repositories/database.ts';
 import { AuditRepository } from '../repositories/audit-repository.ts';
 import type { AuditRecord } from './audit-record.ts';
 
@@ -7,9 +7,9 @@ const PAGE = 50;
 
 /** A site's history for reading. Network addresses and request numbers stay in the chain. */
 export class HistoryService {
-  private readonly database: DataSource;
+  private readonly database: Database;
 
-  constructor(database: DataSource) {
+  constructor(database: Database) {
     this.database = database;
   }
 
@@ -18,7 +18,7 @@ export class HistoryService {
     query: { readonly before?: number | undefined; readonly limit?: number | undefined },
   ): Promise<{ items: HistoryEvent[]; next_before: number | null }> {
     const limit = query.limit ?? PAGE;
-    const rows = await new AuditRepository(this.database.manager).page(
+    const rows = await new AuditRepository(this.database.statements).page(
       { kind: 'site', id: siteId },
       query.before ?? null,
       limit,

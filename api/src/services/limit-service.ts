@@ -1,6 +1,6 @@
 import type { Limit } from '@embertally/shared/contracts/limits';
 import { canOnSite } from '@embertally/shared/policy/policy';
-import type { DataSource, EntityManager } from 'typeorm';
+import type { Database, Statements } from '../repositories/database.ts';
 import type { Actor, SiteAccess, Trail } from '../actor.ts';
 import type { Clock } from '../clock.ts';
 import { Fault } from '../fault.ts';
@@ -13,7 +13,7 @@ import { staleVersion } from './stale-version.ts';
 import type { SummaryService } from './summary-service.ts';
 
 interface LimitParts {
-  readonly database: DataSource;
+  readonly database: Database;
   readonly clock: Clock;
   readonly access: AccessService;
   readonly summaries: SummaryService;
@@ -28,7 +28,7 @@ export class LimitService {
   }
 
   async list(buildingId: string): Promise<Limit[]> {
-    return [...(await new LimitRepository(this.parts.database.manager).ofBuilding(buildingId))];
+    return [...(await new LimitRepository(this.parts.database.statements).ofBuilding(buildingId))];
   }
 
   async create(
@@ -40,8 +40,8 @@ export class LimitService {
   ): Promise<Limit> {
     await this.checkSource(actor, access, input.source, trail);
     const at = this.parts.clock.now();
-    await this.change(buildingId, input.room_id, async (manager, surveyId) => {
-      if (!(await claimId(manager, actor, input, at))) return;
+    await this.change(buildingId, input.room_id, async (statements, surveyId) => {
+      if (!(await claimId(statements, actor, input, at))) return;
       if (surveyId === null) {
         throw Fault.invalid([
           {
@@ -51,8 +51,8 @@ export class LimitService {
           },
         ]);
       }
-      await new LimitRepository(manager).add(input.id, buildingId, input, actor.personId, at);
-      await recordEvent(manager, {
+      await new LimitRepository(statements).add(input.id, buildingId, input, actor.personId, at);
+      await recordEvent(statements, {
         chain: { kind: 'site', id: access.siteId },
         actor,
         action: 'limit.set',
@@ -79,9 +79,9 @@ export class LimitService {
   ): Promise<Limit> {
     const before = await this.read(limitId);
     await this.checkSource(actor, access, before.source, trail);
-    await this.change(before.building_id, before.room_id, async (manager) => {
-      if (!(await new LimitRepository(manager).edit(limitId, version, patch))) throw staleVersion(before);
-      await recordEvent(manager, {
+    await this.change(before.building_id, before.room_id, async (statements) => {
+      if (!(await new LimitRepository(statements).edit(limitId, version, patch))) throw staleVersion(before);
+      await recordEvent(statements, {
         chain: { kind: 'site', id: access.siteId },
         actor,
         action: 'limit.edited',
@@ -97,9 +97,9 @@ export class LimitService {
   async remove(actor: Actor, access: SiteAccess, limitId: string, version: number, trail: Trail): Promise<void> {
     const before = await this.read(limitId);
     await this.checkSource(actor, access, before.source, trail);
-    await this.change(before.building_id, before.room_id, async (manager) => {
-      if (!(await new LimitRepository(manager).remove(limitId, version))) throw staleVersion(before);
-      await recordEvent(manager, {
+    await this.change(before.building_id, before.room_id, async (statements) => {
+      if (!(await new LimitRepository(statements).remove(limitId, version))) throw staleVersion(before);
+      await recordEvent(statements, {
         chain: { kind: 'site', id: access.siteId },
         actor,
         action: 'limit.taken-away',
@@ -112,7 +112,7 @@ export class LimitService {
   }
 
   private async read(id: string): Promise<Limit> {
-    const found = await new LimitRepository(this.parts.database.manager).find(id);
+    const found = await new LimitRepository(this.parts.database.statements).find(id);
     if (found === null) throw Fault.notFound();
     return found;
   }
@@ -133,12 +133,12 @@ export class LimitService {
   private async change(
     buildingId: string,
     roomId: string,
-    work: (manager: EntityManager, surveyId: string | null) => Promise<void>,
+    work: (statements: Statements, surveyId: string | null) => Promise<void>,
   ): Promise<void> {
-    const surveyId = await this.parts.database.transaction(async (manager) => {
-      const found = await new LimitRepository(manager).surveyOfRoom(buildingId, roomId);
-      await work(manager, found);
-      if (found !== null) await new RoomSummaryRepository(manager).markStale(found, [roomId]);
+    const surveyId = await this.parts.database.transaction(async (statements) => {
+      const found = await new LimitRepository(statements).surveyOfRoom(buildingId, roomId);
+      await work(statements, found);
+      if (found !== null) await new RoomSummaryRepository(statements).markStale(found, [roomId]);
       return found;
     });
     if (surveyId !== null) this.parts.summaries.recomputeSoon(surveyId);

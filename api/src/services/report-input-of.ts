@@ -1,5 +1,5 @@
 import type { SurveyDocumentV1 } from '@embertally/shared/survey/versions/v1';
-import type { EntityManager } from 'typeorm';
+import type { Statements } from '../repositories/database.ts';
 import { DocumentRepository } from '../repositories/document-repository.ts';
 import type { ExportRow } from '../repositories/export-repository.ts';
 import { LimitRepository } from '../repositories/limit-repository.ts';
@@ -7,11 +7,11 @@ import { SurveyRepository } from '../repositories/survey-repository.ts';
 import type { ReportInput } from '../reports/report-input.ts';
 
 /** Everything a report of an export is made from, read at one moment. */
-export async function reportInput(manager: EntityManager, row: ExportRow): Promise<ReportInput> {
-  const survey = await new SurveyRepository(manager).find(row.survey_id);
-  const text = await new DocumentRepository(manager).text(row.survey_id);
+export async function reportInput(statements: Statements, row: ExportRow): Promise<ReportInput> {
+  const survey = await new SurveyRepository(statements).find(row.survey_id);
+  const text = await new DocumentRepository(statements).text(row.survey_id);
   if (survey === null || text === null) throw new Error('The survey of the export is not there any more.');
-  const limits = await new LimitRepository(manager).ofBuilding(survey.building.id);
+  const limits = await new LimitRepository(statements).ofBuilding(survey.building.id);
   return {
     kind: row.kind,
     room_id: row.room_id,

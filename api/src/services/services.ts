@@ -1,5 +1,5 @@
 import type { Logger } from 'pino';
-import type { DataSource } from 'typeorm';
+import type { Database } from '../repositories/database.ts';
 import type { PasswordHashes } from '../auth/password-hashes.ts';
 import type { Sessions } from '../auth/sessions.ts';
 import { SignInThrottle } from '../auth/sign-in-throttle.ts';
@@ -11,6 +11,7 @@ import { AccountService } from './account-service.ts';
 import { BuildingService } from './building-service.ts';
 import { ChangeSetService } from './change-set-service.ts';
 import { ExportService } from './export-service.ts';
+import { HealthService } from './health-service.ts';
 import { HistoryService } from './history-service.ts';
 import { LimitService } from './limit-service.ts';
 import type { ReportMaker } from './report-maker.ts';
@@ -20,7 +21,7 @@ import { SummaryService } from './summary-service.ts';
 import { SurveyService } from './survey-service.ts';
 
 export interface ServiceParts {
-  readonly database: DataSource;
+  readonly database: Database;
   readonly clock: Clock;
   readonly log: Logger;
   readonly sessions: Sessions;
@@ -42,6 +43,7 @@ export interface Services {
   readonly summaries: SummaryService;
   readonly exports: ExportService;
   readonly history: HistoryService;
+  readonly health: HealthService;
   readonly throttle: SignInThrottle;
 }
 
@@ -64,5 +66,6 @@ export function services(parts: ServiceParts): Services {
     changeSets: new ChangeSetService({ database, clock, summaries }),
     exports: new ExportService(parts),
     history: new HistoryService(database),
+    health: new HealthService(database),
   };
 }

@@ -1,6 +1,6 @@
 import type { SitePerson } from '@embertally/shared/contracts/sites';
 import type { SiteRoleName } from '@embertally/shared/policy/policy';
-import type { DataSource, EntityManager } from 'typeorm';
+import type { Database, Statements } from '../repositories/database.ts';
 import type { Actor, Trail } from '../actor.ts';
 import type { Clock } from '../clock.ts';
 import { Fault } from '../fault.ts';
@@ -11,10 +11,10 @@ import { claimId } from './claim-id.ts';
 
 /** Who has which role on a site. The last manager of the keeper stays. */
 export class SiteRoleService {
-  private readonly database: DataSource;
+  private readonly database: Database;
   private readonly clock: Clock;
 
-  constructor(database: DataSource, clock: Clock) {
+  constructor(database: Database, clock: Clock) {
     this.database = database;
     this.clock = clock;
   }
@@ -27,10 +27,10 @@ export class SiteRoleService {
     trail: Trail,
   ): Promise<SitePerson> {
     const at = this.clock.now();
-    await this.database.transaction(async (manager) => {
-      await new SiteRepository(manager).lock(siteId);
-      if (!(await claimId(manager, actor, input, at))) return;
-      const roles = new SiteRoleRepository(manager);
+    await this.database.transaction(async (statements) => {
+      await new SiteRepository(statements).lock(siteId);
+      if (!(await claimId(statements, actor, input, at))) return;
+      const roles = new SiteRoleRepository(statements);
       const memberId = await roles.memberByEmail(input.email);
       if (memberId === null) {
         throw Fault.invalid([
@@ -43,11 +43,11 @@ export class SiteRoleService {
       }
       const present = await roles.ofMember(siteId, memberId);
       if (present !== null) {
-        if (input.role !== 'manager') await keepAManager(manager, siteId, present);
+        if (input.role !== 'manager') await keepAManager(statements, siteId, present);
         await roles.remove(siteId, present.id);
       }
       await roles.add(input.id, siteId, memberId, input.role, at);
-      await recordEvent(manager, {
+      await recordEvent(statements, {
         chain: { kind: 'site', id: siteId },
         actor,
         action: 'site-role.given',
@@ -57,7 +57,9 @@ export class SiteRoleService {
         at,
       });
     });
-    const person = (await new SiteRepository(this.database.manager).people(siteId)).find((one) => one.id === input.id);
+    const person = (await new SiteRepository(this.database.statements).people(siteId)).find(
+      (one) => one.id === input.id,
+    );
     if (person === undefined) {
       throw new Fault(
         'conflict',
@@ -70,14 +72,14 @@ export class SiteRoleService {
 
   async take(actor: Actor, siteId: string, roleId: string, trail: Trail): Promise<void> {
     const at = this.clock.now();
-    await this.database.transaction(async (manager) => {
-      await new SiteRepository(manager).lock(siteId);
-      const roles = new SiteRoleRepository(manager);
+    await this.database.transaction(async (statements) => {
+      await new SiteRepository(statements).lock(siteId);
+      const roles = new SiteRoleRepository(statements);
       const present = await roles.find(siteId, roleId);
       if (present === null) throw Fault.notFound();
-      await keepAManager(manager, siteId, present);
+      await keepAManager(statements, siteId, present);
       await roles.remove(siteId, roleId);
-      await recordEvent(manager, {
+      await recordEvent(statements, {
         chain: { kind: 'site', id: siteId },
         actor,
         action: 'site-role.taken',
@@ -90,8 +92,8 @@ export class SiteRoleService {
   }
 }
 
-async function keepAManager(manager: EntityManager, siteId: string, losing: SiteRoleRow): Promise<void> {
-  const roles = new SiteRoleRepository(manager);
+async function keepAManager(statements: Statements, siteId: string, losing: SiteRoleRow): Promise<void> {
+  const roles = new SiteRoleRepository(statements);
   if (!(await roles.isKeeperManager(siteId, losing.id))) return;
   if ((await roles.countManagers(siteId)) > 1) return;
   throw new Fault(

@@ -1,6 +1,6 @@
 import type { Site, SiteSummary } from '@embertally/shared/contracts/sites';
 import { randomUUID } from 'node:crypto';
-import type { DataSource } from 'typeorm';
+import type { Database } from '../repositories/database.ts';
 import type { Actor, Trail } from '../actor.ts';
 import type { Clock } from '../clock.ts';
 import { Fault } from '../fault.ts';
@@ -16,10 +16,10 @@ const PAGE = 50;
 
 /** Sites: the list a person sees, one with its buildings and people, making and editing. */
 export class SiteService {
-  private readonly database: DataSource;
+  private readonly database: Database;
   private readonly clock: Clock;
 
-  constructor(database: DataSource, clock: Clock) {
+  constructor(database: Database, clock: Clock) {
     this.database = database;
     this.clock = clock;
   }
@@ -33,7 +33,7 @@ export class SiteService {
     },
   ): Promise<{ items: SiteSummary[]; next_cursor: string | null }> {
     const limit = query.limit ?? PAGE;
-    const found = await new SiteRepository(this.database.manager).list(actor, {
+    const found = await new SiteRepository(this.database.statements).list(actor, {
       after: readCursor(query.cursor),
       limit: limit + 1,
       search: query.search?.trim() ?? '',
@@ -45,10 +45,10 @@ export class SiteService {
   }
 
   async read(actor: Actor, siteId: string): Promise<Site> {
-    const sites = new SiteRepository(this.database.manager);
+    const sites = new SiteRepository(this.database.statements);
     const summary = await sites.find(actor, siteId);
     if (summary === null) throw Fault.notFound();
-    const building_list = [...(await new BuildingRepository(this.database.manager).ofSite(siteId))];
+    const building_list = [...(await new BuildingRepository(this.database.statements).ofSite(siteId))];
     const people = [...(await sites.people(siteId))];
     return { ...summary, building_list, people };
   }
@@ -56,11 +56,11 @@ export class SiteService {
   async create(actor: Actor, input: SiteValues & { readonly id: string }, trail: Trail): Promise<Site> {
     checkTimeZone(input.time_zone);
     const at = this.clock.now();
-    await this.database.transaction(async (manager) => {
-      if (!(await claimId(manager, actor, input, at))) return;
-      await new SiteRepository(manager).add(input.id, input, actor.organisationId, at);
-      await new SiteRoleRepository(manager).add(randomUUID(), input.id, actor.memberId, 'manager', at);
-      await recordEvent(manager, {
+    await this.database.transaction(async (statements) => {
+      if (!(await claimId(statements, actor, input, at))) return;
+      await new SiteRepository(statements).add(input.id, input, actor.organisationId, at);
+      await new SiteRoleRepository(statements).add(randomUUID(), input.id, actor.memberId, 'manager', at);
+      await recordEvent(statements, {
         chain: { kind: 'site', id: input.id },
         actor,
         action: 'site.made',
@@ -82,9 +82,9 @@ export class SiteService {
   ): Promise<Site> {
     if (patch.time_zone !== undefined) checkTimeZone(patch.time_zone);
     const at = this.clock.now();
-    const changed = await this.database.transaction(async (manager) => {
-      if (!(await new SiteRepository(manager).edit(siteId, version, { ...patch }, at))) return false;
-      await recordEvent(manager, {
+    const changed = await this.database.transaction(async (statements) => {
+      if (!(await new SiteRepository(statements).edit(siteId, version, { ...patch }, at))) return false;
+      await recordEvent(statements, {
         chain: { kind: 'site', id: siteId },
         actor,
         action: 'site.edited',

@@ -6,7 +6,7 @@ import type { SurveyDocument } from '@embertally/shared/survey/survey-document';
 import { ENGINE } from '@embertally/shared/tally/engine';
 import { estimateRoom } from '@embertally/shared/tally/estimate-room';
 import type { Logger } from 'pino';
-import type { DataSource } from 'typeorm';
+import type { Database } from '../repositories/database.ts';
 import type { Clock } from '../clock.ts';
 import { DocumentRepository } from '../repositories/document-repository.ts';
 import { LimitRepository } from '../repositories/limit-repository.ts';
@@ -17,7 +17,7 @@ import { worstStanding } from './worst-standing.ts';
 const AT_ONCE = 20;
 
 interface SummaryParts {
-  readonly database: DataSource;
+  readonly database: Database;
   readonly clock: Clock;
   readonly log: Logger;
 }
@@ -37,7 +37,7 @@ export class SummaryService {
   }
 
   async list(surveyId: string): Promise<RoomSummary[]> {
-    return [...(await new RoomSummaryRepository(this.parts.database.manager).ofSurvey(surveyId))];
+    return [...(await new RoomSummaryRepository(this.parts.database.statements).ofSurvey(surveyId))];
   }
 
   /** Computes a survey's stale rooms after the present turn; calls in quick succession become one run. */
@@ -58,7 +58,7 @@ export class SummaryService {
 
   /** Takes up what is stale anywhere, and what an older engine computed. */
   async sweep(): Promise<void> {
-    const summaries = new RoomSummaryRepository(this.parts.database.manager);
+    const summaries = new RoomSummaryRepository(this.parts.database.statements);
     await summaries.markOlderThan(ENGINE);
     for (const surveyId of await summaries.surveysWithStale()) this.recomputeSoon(surveyId);
   }
@@ -74,15 +74,15 @@ export class SummaryService {
   }
 
   private async recompute(surveyId: string): Promise<void> {
-    const { manager } = this.parts.database;
-    const summaries = new RoomSummaryRepository(manager);
+    const { statements } = this.parts.database;
+    const summaries = new RoomSummaryRepository(statements);
     for (;;) {
       // The marks are read before the rows: a change in between leaves its mark standing.
       const stale = await summaries.stale(surveyId, AT_ONCE);
       if (stale.length === 0 || this.stopping) return;
       const roomIds = stale.map((row) => row.room_id);
-      const document = fromStored(await new DocumentRepository(manager).forTallies(surveyId, roomIds));
-      const limits = await new LimitRepository(manager).ofRooms(surveyId, roomIds);
+      const document = fromStored(await new DocumentRepository(statements).forTallies(surveyId, roomIds));
+      const limits = await new LimitRepository(statements).ofRooms(surveyId, roomIds);
       const computed = stale
         .filter((row) => document.rooms.has(row.room_id))
         .map((row) => ({

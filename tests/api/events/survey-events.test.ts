@@ -96,7 +96,7 @@ describe('the stream of a survey', () => {
     // Its heart beats every 20 s: only the connection can bring the news in time.
     const quiet = await TestApp.open({ database: one.database });
     const far = await listen(quiet, person);
-    await one.house.database.query(
+    await one.house.database.statements.query(
       "SELECT pg_terminate_backend(pid) FROM pg_stat_activity WHERE application_name = 'embertally feed'",
     );
     const sequence = await change(one);

@@ -126,14 +126,14 @@ describe('the list of sites', () => {
     const person = await app.person();
     const counted = async (): Promise<number> => {
       const asked: string[] = [];
-      const runner = app.house.database;
-      const query = runner.manager.query.bind(runner.manager);
-      runner.manager.query = ((sql: string, values?: unknown[]) => {
+      const { statements } = app.house.database;
+      const query = statements.query.bind(statements);
+      statements.query = ((sql: string, values?: unknown[]) => {
         asked.push(sql);
         return query(sql, values as never);
-      }) as typeof runner.manager.query;
+      }) as typeof statements.query;
       await person.visitor.get('/api/sites').expect(200);
-      runner.manager.query = query;
+      statements.query = query;
       return asked.length;
     };
     await app.book(person);

@@ -12,10 +12,10 @@ beforeAll(async () => {
 afterAll(() => app.close());
 
 const TRAIL = { requestId: 'test', ip: '127.0.0.1' };
-const audit = (): AuditRepository => new AuditRepository(app.house.database.manager);
+const audit = (): AuditRepository => new AuditRepository(app.house.database.statements);
 
 async function add(chain: AuditChainKey, text: string): Promise<void> {
-  await recordEvent(app.house.database.manager, {
+  await recordEvent(app.house.database.statements, {
     chain,
     actor: null,
     action: 'test.done',
