@@ -33,7 +33,7 @@ export function usePlanKeys(page: RefObject<HTMLElement | null>, world: ActionWo
 }
 
 function hasNoFocus(target: Element): boolean {
-  return target === document.body || target.tagName === 'H1';
+  return ['BODY', 'MAIN', 'H1'].includes(target.tagName);
 }
 
 function isTyping(target: Element): boolean {
