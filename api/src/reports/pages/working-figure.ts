@@ -6,7 +6,7 @@ export function workingFigure(value: number | string | null | undefined, unit = 
   if (value == null) return '–';
   const symbol = displayUnit(unit, 'SI')?.symbol ?? setUnit(unit);
   const text = typeof value === 'number' ? figure(value).replace('-', '−') : value;
-  return symbol === '' ? text : `${text} ${symbol}`;
+  return symbol === '' || text === 'none' ? text : `${text} ${symbol}`;
 }
 
 /** A unit outside the table, set as print sets it: `J/m2s1/2K` as J/m²s^½K. */
