@@ -70,7 +70,7 @@ export function AppLayout() {
             Skip to the page
           </a>
           <RouteFocus />
-          <div className={`flex min-h-dvh flex-col ${wholeWindow ? 'wide:h-dvh' : ''}`}>
+          <div className={`flex min-h-dvh flex-col ${wholeWindow ? 'h-dvh' : ''}`}>
             <AppHeader
               person={
                 me === null ? (

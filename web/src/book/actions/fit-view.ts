@@ -4,7 +4,7 @@ import { fitted } from '../interaction/camera.ts';
 import { sceneOf } from '../interaction/scene.ts';
 import type { BookSession } from '../session/book-session.ts';
 
-const MARGIN_PX = 56;
+const WIDEST_MARGIN_PX = 56;
 const EMPTY_STOREY = [
   { x_m: 0, y_m: 0 },
   { x_m: 12, y_m: 8 },
@@ -20,5 +20,7 @@ export function fitView(session: BookSession, what: 'room' | 'storey'): void {
     ...chosen.flatMap(({ ring }) => ring),
     ...(what === 'storey' ? (scene?.entries ?? []).flatMap((entry) => footprint(entry)) : []),
   ];
-  session.setCamera(fitted(bounds(points.length === 0 ? EMPTY_STOREY : points), view, MARGIN_PX));
+  session.setCamera(
+    fitted(bounds(points.length === 0 ? EMPTY_STOREY : points), view, Math.min(WIDEST_MARGIN_PX, view.width * 0.08)),
+  );
 }

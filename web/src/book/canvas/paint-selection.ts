@@ -15,6 +15,8 @@ export interface SelectionLook {
   /** Length in the person's units. */
   readonly lengthText: (length_m: number) => string;
   readonly canEdit: boolean;
+  /** The room whose tally is read: a line around it ties the two pages together. */
+  readonly roomInHand: string | null;
 }
 
 const FONT = `13px ${FIGURES}`;
@@ -24,6 +26,15 @@ const LENGTH_AWAY_PX = 16;
 export function paintSelection(pen: Pen, look: SelectionLook): void {
   const scene = sceneOf(look.document, look.storeyId);
   if (scene === null) return;
+  const inHand = scene.rooms.find(({ room }) => room.id === look.roomInHand);
+  if (inHand !== undefined)
+    outline(
+      pen,
+      () => {
+        traceRing(pen, inHand.ring);
+      },
+      1.5,
+    );
   for (const picked of look.selection) {
     switch (picked.kind) {
       case 'room': {
@@ -79,16 +90,16 @@ export function paintSelection(pen: Pen, look: SelectionLook): void {
   }
 }
 
-function outline(pen: Pen, trace: () => void): void {
+function outline(pen: Pen, trace: () => void, width = 3): void {
   const { context, palette } = pen;
   context.lineJoin = 'round';
   context.beginPath();
   trace();
   context.strokeStyle = palette.page;
-  context.lineWidth = 3 + 2 * CASING_PX;
+  context.lineWidth = width + 2 * CASING_PX;
   context.stroke();
   context.strokeStyle = palette.indigo;
-  context.lineWidth = 3;
+  context.lineWidth = width;
   context.stroke();
 }
 

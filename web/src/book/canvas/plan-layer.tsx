@@ -17,6 +17,7 @@ import { Painting } from './painting.tsx';
 import type { Palette } from './palette.ts';
 import type { Pen } from './pen.ts';
 import { RoomPlates, type PlateText } from './room-plates.ts';
+import { useFontsReady } from './use-fonts-ready.ts';
 import { useSettled } from './use-settled.ts';
 import { worstStanding } from './worst-standing.ts';
 
@@ -42,7 +43,9 @@ export function PlanLayer({ host, palette }: { readonly host: PlanHost; readonly
     [document, changes],
   );
   const [tiles] = useState(() => new EntryTiles());
-  const [plates] = useState(() => new RoomPlates());
+  const fontsReady = useFontsReady();
+  // What was measured with another font is forgotten with its plates.
+  const plates = useMemo(() => new RoomPlates(fontsReady), [fontsReady]);
   const sharp = useSettled(camera.pxPerM, SHARP_AFTER_MS);
   const scene = storeyId === null ? null : sceneOf(shown, storeyId);
 

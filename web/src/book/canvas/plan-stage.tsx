@@ -43,6 +43,7 @@ function Active({ host, palette }: { readonly host: PlanHost; readonly palette: 
   const storeyId = useBook((state) => state.storeyId);
   const selection = useBook((state) => state.selection);
   const canEdit = useBook((state) => state.canEdit);
+  const roomInHand = useBook((state) => state.roomInHand);
   const units = useBook((state) => state.units);
   const preview = useSyncExternalStore(host.preview.subscribe, host.preview.get);
   const crosshair = useSyncExternalStore(host.crosshair.subscribe, host.crosshair.get);
@@ -59,7 +60,8 @@ function Active({ host, palette }: { readonly host: PlanHost; readonly palette: 
       view={view}
       palette={palette}
       paint={(pen) => {
-        if (storeyId !== null && !busy) paintSelection(pen, { document, storeyId, selection, lengthText, canEdit });
+        if (storeyId !== null && !busy)
+          paintSelection(pen, { document, storeyId, selection, lengthText, canEdit, roomInHand });
         paintPreview(pen, preview, { wallThickness_m, lengthText });
         if (crosshair !== null) paintCrosshair(pen, crosshair);
       }}

@@ -43,6 +43,12 @@ interface Kept {
  */
 export class RoomPlates {
   readonly #kept = new Map<string, Kept>();
+  readonly #fonts: boolean;
+
+  /** @param fonts Whether the plan's own fonts measured the words */
+  constructor(fonts: boolean) {
+    this.#fonts = fonts;
+  }
 
   place(
     shape: RoomShape,
@@ -52,7 +58,7 @@ export class RoomPlates {
     wallWidth_px: number,
     measure: (words: string, of: 'name' | 'figure') => number,
   ): RoomPlate | null {
-    const key = `${text.name}|${text.figure}|${text.standing}|${pxPerM}|${wallWidth_px}`;
+    const key = `${this.#fonts}|${text.name}|${text.figure}|${text.standing}|${pxPerM}|${wallWidth_px}`;
     const before = this.#kept.get(shape.room.id);
     if (before?.shape === shape && before.key === key && sameRows(before.entries, entries)) return before.plate;
     const plate = placed(shape, entries, text, pxPerM, wallWidth_px, measure);

@@ -7,12 +7,15 @@ import { StoreyPicker } from './storey-picker.tsx';
 export function BookTrail() {
   const survey = useBook((state) => state.survey);
   return (
-    <nav aria-label="Where you are" className="flex min-w-0 flex-wrap items-center gap-x-2 text-soft">
-      <Link to={paths.site(survey.site.id)} className="text-soft no-underline hover:text-ink hover:underline">
+    <nav aria-label="Where you are" className="book-trail text-soft">
+      <Link
+        to={paths.site(survey.site.id)}
+        className="book-trail-name text-soft no-underline hover:text-ink hover:underline"
+      >
         {survey.site.name}
       </Link>
       <span aria-hidden="true">/</span>
-      <span>{survey.building.name}</span>
+      <span className="book-trail-name">{survey.building.name}</span>
       <span aria-hidden="true">/</span>
       <StoreyPicker />
     </nav>

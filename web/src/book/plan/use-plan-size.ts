@@ -2,7 +2,10 @@ import { useEffect, useRef, type RefObject } from 'react';
 import { fitView } from '../actions/fit-view.ts';
 import type { BookSession } from '../session/book-session.ts';
 
-/** Tells the session how large the plan's view is; the first time, shows the whole storey in it. */
+/** Narrower than this a whole storey would be too small to read. */
+const NARROW_PX = 600;
+
+/** Tells the session how large the plan's view is; the first time, shows the storey in it, or the room in hand. */
 export function usePlanSize(element: RefObject<HTMLElement | null>, session: BookSession): void {
   const fittedFor = useRef<string | null>(null);
   useEffect(() => {
@@ -12,7 +15,7 @@ export function usePlanSize(element: RefObject<HTMLElement | null>, session: Boo
       const { storeyId, view } = session.state;
       if (view.width === 0 || fittedFor.current === storeyId) return;
       fittedFor.current = storeyId;
-      fitView(session, 'storey');
+      fitView(session, view.width < NARROW_PX ? 'room' : 'storey');
     };
     const measure = () => {
       session.setView(watched.clientWidth, watched.clientHeight);
