@@ -42,8 +42,8 @@ export function BandBar({ value, low, high, lowLabel, highLabel, limits }: BandB
         height={14}
         fill="color-mix(in srgb, var(--load-2) 42%, var(--page))"
       />
-      {[low, high].map((end) => (
-        <line key={end} x1={x(end)} x2={x(end)} y1={LINE - 7} y2={LINE + 7} stroke="var(--ink)" strokeWidth={1.5} />
+      {[low, high].map((end, index) => (
+        <line key={index} x1={x(end)} x2={x(end)} y1={LINE - 7} y2={LINE + 7} stroke="var(--ink)" strokeWidth={1.5} />
       ))}
       <line x1={x(value)} x2={x(value)} y1={LINE - 12} y2={LINE + 12} stroke="var(--ink)" strokeWidth={3} />
       {shown.map((limit, index) => (

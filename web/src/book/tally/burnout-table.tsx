@@ -1,9 +1,9 @@
 import type { Estimate } from '@embertally/shared/methods/estimate';
 import type { BurnoutCase, RoomTally } from '@embertally/shared/tally/room-tally';
+import { formatQuantity } from '@embertally/shared/units/format-quantity';
 import { StandingMark } from '../../components/standing-mark.tsx';
 import { Figure } from './figure.tsx';
 import { FigureNotes } from './figure-notes.tsx';
-import { useQuantity } from './use-quantity.ts';
 
 const ROWS: readonly {
   readonly label: string;
@@ -23,7 +23,6 @@ interface BurnoutTableProps {
 
 /** The burn-out twice: for the heat as kept, which comes first, and for the design load. */
 export function BurnoutTable({ burnout, rating_min }: BurnoutTableProps) {
-  const show = useQuantity();
   const { asKept, design } = burnout;
   const rows = ROWS.filter((row) => (asKept && row.of(asKept)) ?? (design && row.of(design)));
   if (rows.length === 0) return null;
@@ -48,7 +47,7 @@ export function BurnoutTable({ burnout, rating_min }: BurnoutTableProps) {
       )}
     </td>
   );
-  const rating = rating_min === null ? null : show(rating_min, 'min');
+  const rating = rating_min === null ? null : formatQuantity(rating_min, 'min', 'SI', { figures: 'as entered' });
   return (
     <>
       <table className="tally-ledger w-full text-small">

@@ -73,8 +73,12 @@ export function ContentsLedger({ rows, total, onPick }: ContentsLedgerProps) {
                     {quantity} · {KEEPING_WORDS[row.keeping]} · {EVIDENCE_WORDS[row.evidence]}
                   </span>
                 </th>
-                <td data-align="end" data-wide="yes" className="figure">
-                  {quantity}
+                <td data-align="end" data-wide="yes">
+                  <span className="figure">
+                    {row.count === 1 ? '' : `${formatCount(row.count)} × `}
+                    {mass.text}
+                  </span>{' '}
+                  <span className="text-soft">{mass.unit}</span>
                 </td>
                 <td data-wide="yes">{KEEPING_WORDS[row.keeping]}</td>
                 <td data-wide="yes">

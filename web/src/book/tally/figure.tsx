@@ -2,6 +2,7 @@ import type { Estimate } from '@embertally/shared/methods/estimate';
 import { figureName } from '@embertally/shared/tally/figure-name';
 import { use } from 'react';
 import { estimateText } from './estimate-text.ts';
+import { UnitText } from './unit-text.tsx';
 import { useQuantity } from './use-quantity.ts';
 import { WorkingContext } from './working-context.ts';
 
@@ -27,7 +28,12 @@ export function Figure({ path, estimate, row, unit = 'shown', className = '', un
   const body = (
     <>
       <span className="figure">{shown.text}</span>
-      {unit === 'shown' && shown.unit !== '' && <span className={`text-soft ${unitClassName}`}> {shown.unit}</span>}
+      {unit === 'shown' && shown.unit !== '' && (
+        <span className={`text-soft ${unitClassName}`}>
+          {' '}
+          <UnitText unit={shown.unit} />
+        </span>
+      )}
       {warned && <span className="font-bold text-ochre">*</span>}
     </>
   );

@@ -1,6 +1,8 @@
 import type { RoomTally } from '@embertally/shared/tally/room-tally';
 import { Figure } from './figure.tsx';
 import { FigureNotes } from './figure-notes.tsx';
+import { FormulaText } from './formula-text.tsx';
+import { plainUnits } from './plain-units.ts';
 import { FLASHOVER_NAMES, FLASHOVER_WAYS, lowestFlashover } from './lowest-flashover.ts';
 
 /** Flashover three ways, side by side, each with the range it was made for. */
@@ -32,7 +34,9 @@ export function FlashoverTable({ flashover }: { readonly flashover: RoomTally['r
                 <td data-align="end">
                   <Figure path={`room.flashover.${way}`} estimate={criterion} />
                 </td>
-                <td className="text-soft">{criterion.range}</td>
+                <td className="text-soft">
+                  <FormulaText>{plainUnits(criterion.range)}</FormulaText>
+                </td>
                 <td>
                   {criterion.applicable ? (
                     way === lowest?.way ? (
@@ -43,7 +47,11 @@ export function FlashoverTable({ flashover }: { readonly flashover: RoomTally['r
                   ) : (
                     <>
                       does not apply
-                      {criterion.why !== undefined && <span className="block text-soft">{criterion.why}</span>}
+                      {criterion.why !== undefined && (
+                        <span className="block text-soft">
+                          <FormulaText>{plainUnits(criterion.why)}</FormulaText>
+                        </span>
+                      )}
                     </>
                   )}
                 </td>

@@ -32,7 +32,8 @@ export function RoomsList({ onChosen }: RoomsListProps) {
   const { found, more } = useMemo(() => findInSurvey(document, query), [document, query]);
   const searching = query.trim() !== '';
   const empty = rows.filter((row) => row.entries === 0).length;
-  const severalStoreys = document.storeys.size > 1;
+  const storeys = [...document.storeys.values()].sort((a, b) => a.level_m - b.level_m);
+  const severalStoreys = storeys.length > 1;
 
   return (
     <div className="grid gap-3">
@@ -92,42 +93,48 @@ export function RoomsList({ onChosen }: RoomsListProps) {
           )}
         </ul>
       ) : (
-        <ul aria-label="Rooms of the building">
-          {rows.map((row) => {
-            const figure = row.density_MJ_m2 === null ? null : show(row.density_MJ_m2, 'MJ/m2');
-            const area = row.area_m2 === null ? null : show(row.area_m2, 'm2');
-            const marked = row.standing === 'near' || row.standing === 'over';
-            return (
-              <li key={row.room.id}>
-                <button
-                  type="button"
-                  className="rooms-row"
-                  data-standing={row.standing}
-                  aria-current={row.room.id === inHand ? 'true' : undefined}
-                  onClick={() => {
-                    session.takeRoom(row.room.id);
-                    onChosen?.('room');
-                  }}
-                >
-                  <span className="min-w-0">
-                    <span className="block truncate font-bold">{row.room.name}</span>
-                    <span className="block text-small text-soft">
-                      {area === null ? '' : `${area.text} ${area.unit} · `}
-                      {row.entries === 1 ? '1 entry' : `${row.entries} entries`}
-                      {severalStoreys ? ` · ${row.storeyName}` : ''}
-                    </span>
-                  </span>
-                  <LoadBar density_MJ_m2={row.density_MJ_m2} />
-                  <span className="rooms-figure text-right">
-                    <span className="figure">{figure?.text ?? '–'}</span>
-                    <span className="unseen"> {figure?.unit ?? 'no density yet'}</span>
-                    {marked && ` ${row.standing}`}
-                  </span>
-                </button>
-              </li>
-            );
-          })}
-        </ul>
+        storeys.map((storey) => (
+          <section key={storey.id} aria-label={`Rooms, ${storey.name}`}>
+            {severalStoreys && <h3 className="pt-3 pb-1 text-small font-bold text-soft">{storey.name}</h3>}
+            <ul>
+              {rows
+                .filter((row) => row.room.storey_id === storey.id)
+                .map((row) => {
+                  const figure = row.density_MJ_m2 === null ? null : show(row.density_MJ_m2, 'MJ/m2');
+                  const area = row.area_m2 === null ? null : show(row.area_m2, 'm2');
+                  const marked = row.standing === 'near' || row.standing === 'over';
+                  return (
+                    <li key={row.room.id}>
+                      <button
+                        type="button"
+                        className="rooms-row"
+                        data-standing={row.standing}
+                        aria-current={row.room.id === inHand ? 'true' : undefined}
+                        onClick={() => {
+                          session.takeRoom(row.room.id);
+                          onChosen?.('room');
+                        }}
+                      >
+                        <span className="min-w-0">
+                          <span className="block truncate font-bold">{row.room.name}</span>
+                          <span className="block text-small text-soft">
+                            {area === null ? '' : `${area.text} ${area.unit} · `}
+                            {row.entries === 1 ? '1 entry' : `${row.entries} entries`}
+                          </span>
+                        </span>
+                        <LoadBar density_MJ_m2={row.density_MJ_m2} />
+                        <span className="rooms-figure text-right">
+                          <span className="figure">{figure?.text ?? '–'}</span>
+                          <span className="unseen"> {figure?.unit ?? 'no density yet'}</span>
+                          {marked && ` ${row.standing}`}
+                        </span>
+                      </button>
+                    </li>
+                  );
+                })}
+            </ul>
+          </section>
+        ))
       )}
     </div>
   );

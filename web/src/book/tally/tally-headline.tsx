@@ -46,7 +46,7 @@ export function TallyHeadline({ tally, limits }: TallyHeadlineProps) {
             unitClassName="text-lead font-normal"
           />
         </p>
-        {low !== null && high !== null && band !== undefined && (
+        {low !== null && high !== null && high > 0 && band !== undefined && (
           <div className="min-w-0">
             <BandBar
               value={perFloor.value}

@@ -1,7 +1,7 @@
-import { lazy, Suspense, useMemo, useState } from 'react';
-import { Link } from 'react-router-dom';
+import { lazy, Suspense, useEffect, useMemo, useRef, useState } from 'react';
 import { Button } from '../../components/button.tsx';
 import { EmptyState } from '../../components/empty-state.tsx';
+import { LinkButton } from '../../components/link-button.tsx';
 import { Skeleton } from '../../components/skeleton.tsx';
 import { paths } from '../../lib/paths.ts';
 import { useUnits } from '../../lib/units-context.ts';
@@ -30,6 +30,11 @@ export function TallyPage() {
   const [asked, setAsked] = useState<WorkingAsked | null>(null);
   const limits = useMemo(() => allLimits.filter((limit) => limit.room_id === roomId), [allLimits, roomId]);
   const room = roomId === null ? undefined : document.rooms.get(roomId);
+  const article = useRef<HTMLElement>(null);
+  // Another room is another page: it is read from its top.
+  useEffect(() => {
+    article.current?.parentElement?.scrollTo?.(0, 0);
+  }, [roomId]);
 
   if (roomId === null || room === undefined) {
     return (
@@ -55,7 +60,7 @@ export function TallyPage() {
   }
   return (
     <WorkingContext value={setAsked}>
-      <article aria-labelledby="tally-room" className="tally">
+      <article ref={article} aria-labelledby="tally-room" className="tally">
         <header className="mb-4">
           <h2 id="tally-room" className="text-title">
             {room.name}
@@ -82,9 +87,9 @@ export function TallyPage() {
             >
               Limits
             </Button>
-            <Link to={paths.workings(surveyId, roomId)} className="inline-block py-1">
+            <LinkButton look="quiet" className="text-small" to={paths.workings(surveyId, roomId)}>
               All workings, to print
-            </Link>
+            </LinkButton>
           </p>
         </header>
         {tally === null ? (
@@ -106,6 +111,7 @@ export function TallyPage() {
                 {canEdit ? 'Add or edit contents' : 'Contents as a table'}
               </Button>
             }
+            onGive={canEdit ? openTables : undefined}
             onPickEntry={(entryId) => {
               session.select([{ kind: 'entry', id: entryId }]);
             }}

@@ -1,4 +1,6 @@
 import type { EstimateWarning } from '@embertally/shared/methods/estimate';
+import { FormulaText } from './formula-text.tsx';
+import { plainUnits } from './plain-units.ts';
 
 /** Notes that stand with numbers, each said once. */
 export function WarningList({ warnings }: { readonly warnings: readonly EstimateWarning[] }) {
@@ -11,7 +13,9 @@ export function WarningList({ warnings }: { readonly warnings: readonly Estimate
           <span aria-hidden="true" className="font-bold text-ochre">
             *
           </span>
-          <span>{warning.text}</span>
+          <span>
+            <FormulaText>{plainUnits(warning.text)}</FormulaText>
+          </span>
         </li>
       ))}
     </ul>

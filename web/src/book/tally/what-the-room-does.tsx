@@ -29,7 +29,7 @@ export function WhatTheRoomDoes({ tally, rating_min }: WhatTheRoomDoesProps) {
     <TallySection title="What the room does">
       <div className="grid gap-4">
         {REGIMES[room.regime] !== '' && <p className="max-w-[72ch]">{REGIMES[room.regime]}</p>}
-        <div>
+        <div className="empty:hidden">
           <FigureList
             rows={[
               { path: 'room.hotLayer', label: 'Rise of the hot layer before flashover', estimate: room.hotLayer },
@@ -52,14 +52,14 @@ export function WhatTheRoomDoes({ tally, rating_min }: WhatTheRoomDoesProps) {
             ]}
           />
         </div>
-        <div>
+        <div className="empty:hidden">
           <FlashoverTable flashover={room.flashover} />
         </div>
         {chart !== null && <ChartFigure chart={chart} />}
-        <div>
+        <div className="empty:hidden">
           <BurnoutTable burnout={burnout} rating_min={rating_min} />
         </div>
-        <div>
+        <div className="empty:hidden">
           <FigureList
             rows={[
               { path: 'load.asKept', label: 'Fire load density as kept', estimate: load.asKept },

@@ -1,4 +1,8 @@
+import type { ReactNode } from 'react';
 import type { Estimate, InputOrigin, WorkingInput, WorkingStep } from '@embertally/shared/methods/estimate';
+import { FormulaText } from './formula-text.tsx';
+import { plainUnits } from './plain-units.ts';
+import { UnitText } from './unit-text.tsx';
 import { useQuantity } from './use-quantity.ts';
 import { WarningList } from './warning-list.tsx';
 
@@ -10,51 +14,74 @@ const ORIGINS: Readonly<Record<InputOrigin, string>> = {
   computed: 'computed before',
 };
 
+interface WorkingViewProps {
+  /** Computed with workings. */
+  readonly estimate: Estimate;
+  /** Level of the headings inside. */
+  readonly level?: 3 | 4;
+}
+
 /** How one number came about: relation, what went in and where it came from, steps, sources, range, reasons. */
-export function WorkingView({ estimate }: { readonly estimate: Estimate }) {
+export function WorkingView({ estimate, level = 3 }: WorkingViewProps) {
+  const Heading = level === 3 ? 'h3' : 'h4';
   const show = useQuantity();
   const value = estimate.value === null ? null : show(estimate.value, estimate.unit);
   const inputs = estimate.inputs ?? [];
   const steps = (estimate.steps ?? []).filter((step) => step.equation !== estimate.equation);
   return (
-    <div className="working grid gap-4">
+    <div className="working grid grid-cols-[minmax(0,1fr)] gap-4">
       <p className="text-lead">
-        {estimate.symbol !== undefined && <span className="font-bold">{estimate.symbol} = </span>}
+        {estimate.symbol !== undefined && (
+          <span className="font-bold">
+            <FormulaText>{estimate.symbol}</FormulaText> ={' '}
+          </span>
+        )}
         {value === null ? (
           <span>never: {estimate.never}</span>
         ) : (
           <>
-            <span className="figure font-bold">{value.text}</span> <span className="text-soft">{value.unit}</span>
+            <span className="figure font-bold">{value.text}</span>{' '}
+            <span className="text-soft">
+              <UnitText unit={value.unit} />
+            </span>
           </>
         )}
       </p>
       <WarningList warnings={estimate.warnings} />
       <section>
-        <h3>The relation</h3>
+        <Heading>The relation</Heading>
         <p>{estimate.title}</p>
-        {estimate.equation !== undefined && <p className="working-equation figure">{estimate.equation}</p>}
+        {estimate.equation !== undefined && (
+          <p className="working-equation">
+            <FormulaText>{estimate.equation}</FormulaText>
+          </p>
+        )}
       </section>
-      {inputs.length > 0 && <InputTable inputs={inputs} />}
+      {inputs.length > 0 && <InputTable inputs={inputs} heading={<Heading>What went in</Heading>} />}
       {steps.length > 0 && (
         <section>
-          <h3>Step by step</h3>
+          <Heading>Step by step</Heading>
           <ol className="grid gap-1">
             {steps.map((step, index) => (
               <li key={`${String(index)} ${step.text}`} className="border-b border-rule pb-1">
-                {step.text} <StepValue step={step} />
-                {step.equation !== undefined && <span className="working-equation figure">{step.equation}</span>}
+                <FormulaText>{plainUnits(step.text)}</FormulaText> <StepValue step={step} />
+                {step.equation !== undefined && (
+                  <span className="working-equation">
+                    <FormulaText>{step.equation}</FormulaText>
+                  </span>
+                )}
               </li>
             ))}
           </ol>
         </section>
       )}
       <section>
-        <h3>Where it comes from</h3>
+        <Heading>Where it comes from</Heading>
         <ul className="grid gap-1">
           {(estimate.sources ?? []).map((source) => (
             <li key={`${source.title} ${source.locator}`}>
               {source.title}
-              {source.edition !== undefined && ` (${source.edition})`}, {source.locator}
+              {source.edition !== undefined && ` (${source.edition})`}, <FormulaText>{source.locator}</FormulaText>
               {source.fromMemory === true && (
                 <span className="text-soft"> – taken from memory of the source, to be read again</span>
               )}
@@ -64,18 +91,22 @@ export function WorkingView({ estimate }: { readonly estimate: Estimate }) {
       </section>
       {(estimate.assumptions ?? []).length > 0 && (
         <section>
-          <h3>Taken as so</h3>
+          <Heading>Taken as so</Heading>
           <ul className="list-disc pl-5">
             {estimate.assumptions?.map((text) => (
-              <li key={text}>{text}</li>
+              <li key={text}>
+                <FormulaText>{plainUnits(text)}</FormulaText>
+              </li>
             ))}
           </ul>
         </section>
       )}
       {estimate.why !== undefined && (
         <section>
-          <h3>Why this method</h3>
-          <p>{estimate.why}</p>
+          <Heading>Why this method</Heading>
+          <p>
+            <FormulaText>{plainUnits(estimate.why)}</FormulaText>
+          </p>
         </section>
       )}
       <p className="figure text-small text-soft">Method {estimate.method}</p>
@@ -83,10 +114,15 @@ export function WorkingView({ estimate }: { readonly estimate: Estimate }) {
   );
 }
 
-function InputTable({ inputs }: { readonly inputs: readonly WorkingInput[] }) {
+interface InputTableProps {
+  readonly inputs: readonly WorkingInput[];
+  readonly heading: ReactNode;
+}
+
+function InputTable({ inputs, heading }: InputTableProps) {
   return (
     <section>
-      <h3 id="working-inputs">What went in</h3>
+      {heading}
       <div role="region" aria-label="What went in" tabIndex={0} className="overflow-x-auto">
         <table className="working-table w-full">
           <caption className="unseen">What went into this number</caption>
@@ -105,13 +141,15 @@ function InputTable({ inputs }: { readonly inputs: readonly WorkingInput[] }) {
             {inputs.map((input) => (
               <tr key={input.name}>
                 <th scope="row" className="whitespace-nowrap">
-                  {input.symbol}
+                  <FormulaText>{input.symbol}</FormulaText>
                 </th>
-                <td>{input.quantity}</td>
+                <td>
+                  <FormulaText>{plainUnits(input.quantity)}</FormulaText>
+                </td>
                 <td data-align="end">
                   <InputValue input={input} />
                 </td>
-                <td className="text-soft">{input.valid ?? '–'}</td>
+                <td className="text-soft">{rangeWords(input.valid)}</td>
                 <td>
                   {ORIGINS[input.origin]}
                   {input.note !== undefined && <span className="block text-soft">{input.note}</span>}
@@ -125,6 +163,11 @@ function InputTable({ inputs }: { readonly inputs: readonly WorkingInput[] }) {
   );
 }
 
+/** A bound that only keeps out zero is said so. */
+function rangeWords(valid: string | undefined): string {
+  return valid?.replace(/^\d(?:\.\d+)?e-\d+ (?=or more|to )/, 'above 0 ').replace('above 0 or more', 'above 0') ?? '–';
+}
+
 /** Inputs stand in the units of the relation, whatever the person reads in: the arithmetic must be followable. */
 function InputValue({ input }: { readonly input: WorkingInput }) {
   const { value, unit } = input;
@@ -132,7 +175,10 @@ function InputValue({ input }: { readonly input: WorkingInput }) {
   const text = typeof value === 'number' ? Number(value.toPrecision(6)).toLocaleString('en-GB', TO_SIX) : value;
   return (
     <>
-      <span className="figure">{text}</span> <span className="text-soft">{unit}</span>
+      <span className="figure">{text}</span>{' '}
+      <span className="text-soft">
+        <UnitText unit={unit} />
+      </span>
     </>
   );
 }
@@ -144,7 +190,10 @@ function StepValue({ step }: { readonly step: WorkingStep }) {
   const text = typeof step.value === 'number' ? step.value.toLocaleString('en-GB', TO_SIX) : step.value;
   return (
     <span className="whitespace-nowrap">
-      <span className="figure font-bold">{text}</span> <span className="text-soft">{step.unit ?? ''}</span>
+      <span className="figure font-bold">{text}</span>{' '}
+      <span className="text-soft">
+        <UnitText unit={step.unit ?? ''} />
+      </span>
     </span>
   );
 }

@@ -66,24 +66,36 @@ export function ContentsTable({ room, entries, canEdit }: ContentsTableProps) {
         aria-label={`Contents of ${room.name}`}
         tabIndex={0}
       >
-        <table className="ledger" aria-rowcount={long ? entries.length + 1 : undefined}>
+        <table role="table" className="ledger entries" aria-rowcount={long ? entries.length + 1 : undefined}>
           <caption>
             {entries.length === 1 ? '1 entry' : `${entries.length} entries`} in {room.name}
           </caption>
-          <thead>
-            <tr aria-rowindex={long ? 1 : undefined}>
-              <th scope="col">Entry</th>
-              <th scope="col">Count</th>
-              <th scope="col">Mass of one, {symbol('kg')}</th>
-              <th scope="col">Kept</th>
-              <th scope="col">How known</th>
-              <th scope="col" data-align="end">
+          <thead role="rowgroup">
+            <tr role="row" aria-rowindex={long ? 1 : undefined}>
+              <th role="columnheader" scope="col">
+                Entry
+              </th>
+              <th role="columnheader" scope="col">
+                Count
+              </th>
+              <th role="columnheader" scope="col">
+                Mass of one, {symbol('kg')}
+              </th>
+              <th role="columnheader" scope="col">
+                Kept
+              </th>
+              <th role="columnheader" scope="col">
+                How known
+              </th>
+              <th role="columnheader" scope="col" data-align="end">
                 Heat, {symbol('MJ')}
               </th>
-              <th scope="col">{canEdit ? 'Change' : 'Read'}</th>
+              <th role="columnheader" scope="col">
+                {canEdit ? 'Change' : 'Read'}
+              </th>
             </tr>
           </thead>
-          <tbody>
+          <tbody role="rowgroup">
             {before > 0 && (
               <tr aria-hidden="true">
                 <td colSpan={7} style={{ height: before, padding: 0 }} />

@@ -1,7 +1,10 @@
+import { duplicateEntries } from '@embertally/shared/survey/commands/duplicate-entries';
 import { moveEntries } from '@embertally/shared/survey/commands/move-entries';
 import type { Entry } from '@embertally/shared/survey/survey-document';
+import { Button } from '../../../components/button.tsx';
 import { Dialog } from '../../../components/dialog.tsx';
 import { useBook } from '../../session/use-book.ts';
+import { useBookSession } from '../../session/use-book-session.ts';
 import { ENCLOSURE_WORDS, EVIDENCE_WORDS, KEEPING_WORDS } from '../../tally/entry-words.ts';
 import { useQuantity } from '../../tally/use-quantity.ts';
 import { CommandChoice } from '../command-choice.tsx';
@@ -11,6 +14,8 @@ import { FieldGroup } from '../field-group.tsx';
 import { useRunBack } from '../run-back.ts';
 import { ENCLOSURE, EVIDENCE, GROWTH, IGNITION, KEEPING } from './entry-choices.ts';
 import type { EditEntry } from './entry-row.tsx';
+
+const BESIDE_M = 0.2;
 
 interface EntryDialogProps {
   readonly entry: Entry;
@@ -25,6 +30,7 @@ export function EntryDialog({ entry, canEdit, edit, onClose }: EntryDialogProps)
     <Dialog open onClose={onClose} title={entry.label} width="wide">
       {canEdit ? <EntryFields entry={entry} edit={edit} /> : <EntryFacts entry={entry} />}
       <PartList entry={entry} />
+      {canEdit && <DuplicateButton entry={entry} onDone={onClose} />}
       <p className="text-small text-soft">
         {entry.recorded_by === null
           ? 'Nobody is named as having recorded it.'
@@ -163,6 +169,29 @@ function EntryFields({ entry, edit }: { readonly entry: Entry; readonly edit: Ed
       </FieldGroup>
       <CommandText label="Note" optional lines="several" value={entry.note} run={(note) => edit(entry, { note })} />
     </>
+  );
+}
+
+/** A copy stands a little beside its original; against a wall, on the spot. */
+function DuplicateButton({ entry, onDone }: { readonly entry: Entry; readonly onDone: () => void }) {
+  const session = useBookSession();
+  const runBack = useRunBack();
+  return (
+    <Button
+      className="justify-self-start self-start"
+      onClick={() => {
+        const copyAt = (by_m: number) => ({
+          copies: [{ entry_id: entry.id, id: session.newId(), dx_m: by_m, dy_m: by_m }],
+          recorded_by: session.person,
+          recorded_at: session.now(),
+        });
+        const label = `Duplicated ${entry.label}`;
+        if (runBack(duplicateEntries, copyAt(BESIDE_M), label).refused) runBack(duplicateEntries, copyAt(0), label);
+        onDone();
+      }}
+    >
+      Duplicate
+    </Button>
   );
 }
 

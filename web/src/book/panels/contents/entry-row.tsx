@@ -1,6 +1,5 @@
 import type { Done, Refusal } from '@embertally/shared/survey/command';
 import { deleteEntries } from '@embertally/shared/survey/commands/delete-entries';
-import { duplicateEntries } from '@embertally/shared/survey/commands/duplicate-entries';
 import type { Entry } from '@embertally/shared/survey/survey-document';
 import { formatQuantity } from '@embertally/shared/units/format-quantity';
 import { memo } from 'react';
@@ -30,9 +29,6 @@ interface EntryRowProps {
   /** Called before the row goes. */
   readonly onLeave: (entryId: string) => void;
 }
-
-/** A copy stands a little beside its original. */
-const BESIDE_M = 0.2;
 
 /** One entry of the contents table. */
 export const EntryRow = memo(function EntryRow(props: EntryRowProps) {
@@ -68,21 +64,35 @@ export const EntryRow = memo(function EntryRow(props: EntryRowProps) {
   );
   if (!canEdit) {
     return (
-      <tr className="entry-row" data-picked={picked ? 'yes' : undefined} aria-rowindex={rowIndex}>
-        <th scope="row">{name}</th>
-        <td data-align="end">{entry.count}</td>
-        <td data-align="end">{formatQuantity(mass_kg, 'kg', units, { figures: 'as entered' }).text}</td>
-        <td>{KEEPING_WORDS[entry.keeping]}</td>
-        <td>{EVIDENCE_WORDS[entry.evidence]}</td>
-        <td data-align="end">{heat}</td>
-        <td>{more}</td>
+      <tr role="row" className="entry-row" data-picked={picked ? 'yes' : undefined} aria-rowindex={rowIndex}>
+        <th role="rowheader" scope="row">
+          {name}
+        </th>
+        <td role="cell" data-label="Count" data-align="end">
+          {entry.count}
+        </td>
+        <td role="cell" data-label="Mass of one" data-align="end">
+          {formatQuantity(mass_kg, 'kg', units, { figures: 'as entered' }).text}
+        </td>
+        <td role="cell" data-label="Kept">
+          {KEEPING_WORDS[entry.keeping]}
+        </td>
+        <td role="cell" data-label="How known">
+          {EVIDENCE_WORDS[entry.evidence]}
+        </td>
+        <td role="cell" data-label="Heat" data-align="end">
+          {heat}
+        </td>
+        <td role="cell">{more}</td>
       </tr>
     );
   }
   return (
-    <tr className="entry-row" data-picked={picked ? 'yes' : undefined} aria-rowindex={rowIndex}>
-      <th scope="row">{name}</th>
-      <td>
+    <tr role="row" className="entry-row" data-picked={picked ? 'yes' : undefined} aria-rowindex={rowIndex}>
+      <th role="rowheader" scope="row">
+        {name}
+      </th>
+      <td role="cell" data-label="Count">
         <CountField
           label={`Count of ${entry.label}`}
           labelUnseen
@@ -91,7 +101,7 @@ export const EntryRow = memo(function EntryRow(props: EntryRowProps) {
           run={(count) => edit(entry, { count })}
         />
       </td>
-      <td>
+      <td role="cell" data-label="Mass of one">
         <CommandQuantity
           label={`Mass of one ${entry.label}`}
           labelUnseen
@@ -103,7 +113,7 @@ export const EntryRow = memo(function EntryRow(props: EntryRowProps) {
           run={(mass) => edit(entry, { parts: withMass(entry.parts, mass) })}
         />
       </td>
-      <td>
+      <td role="cell" data-label="Kept">
         <CommandChoice
           label={`How ${entry.label} is kept`}
           labelUnseen
@@ -113,7 +123,7 @@ export const EntryRow = memo(function EntryRow(props: EntryRowProps) {
           run={(keeping) => edit(entry, { keeping })}
         />
       </td>
-      <td>
+      <td role="cell" data-label="How known">
         <CommandChoice
           label={`How ${entry.label} is known`}
           labelUnseen
@@ -123,27 +133,12 @@ export const EntryRow = memo(function EntryRow(props: EntryRowProps) {
           run={(evidence) => edit(entry, { evidence })}
         />
       </td>
-      <td data-align="end">{heat}</td>
-      <td>
-        <span className="flex flex-wrap gap-x-3">
+      <td role="cell" data-label="Heat" data-align="end">
+        {heat}
+      </td>
+      <td role="cell">
+        <span className="flex gap-x-3">
           {more}
-          <Button
-            look="quiet"
-            size="small"
-            aria-label={`Duplicate ${entry.label}`}
-            onClick={() => {
-              const copy = { entry_id: entry.id, id: session.newId(), dx_m: BESIDE_M, dy_m: BESIDE_M };
-              const input = { copies: [copy], recorded_by: session.person, recorded_at: session.now() };
-              const result = session.run(duplicateEntries, input, `Duplicated ${entry.label}`, { refusal: 'returned' });
-              // Against a wall there is no place to the upper right; on the spot there always is.
-              if (result.refused) {
-                const onTheSpot = { ...copy, dx_m: 0, dy_m: 0 };
-                session.run(duplicateEntries, { ...input, copies: [onTheSpot] }, `Duplicated ${entry.label}`);
-              }
-            }}
-          >
-            Duplicate
-          </Button>
           <Button
             look="quiet"
             size="small"

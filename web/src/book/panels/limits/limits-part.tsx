@@ -126,7 +126,7 @@ export function LimitsPart() {
   ];
   const maySet = maySetLimit(survey, 'house-rule');
   return (
-    <div className="grid gap-4">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-4">
       {failure !== null && (
         <Notice tone="problem" title={failure.title} announced>
           {failure.text}

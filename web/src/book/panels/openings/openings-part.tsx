@@ -12,7 +12,7 @@ export function OpeningsPart() {
   if (room === undefined) return <p className="text-soft">No room is in hand: choose one under Rooms.</p>;
   const openings = openingsOfRoom(document, room.id);
   return (
-    <div className="grid gap-4">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-4">
       {canEdit && (
         <Disclosure title={`Add an opening to ${room.name}`} open={openings.length === 0}>
           <AddOpeningForm key={room.id} room={room} />

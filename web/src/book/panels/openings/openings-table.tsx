@@ -43,7 +43,6 @@ export function OpeningsTable({ room, openings, canEdit }: OpeningsTableProps) {
   const edit = (opening: Opening, patch: EditOpeningInput['patch']) =>
     runBack(editOpening, { opening_id: opening.id, patch }, `Changed ${openingName(opening)}`);
   const wallOf = (opening: Opening) => walls.find((wall) => wall.key === wallKey(...opening.wall));
-  const leadsTo = (opening: Opening): string => wallOf(opening)?.beyond.join(', ') || 'outside';
 
   const columns: readonly Column<Opening>[] = [
     {
@@ -74,7 +73,10 @@ export function OpeningsTable({ room, openings, canEdit }: OpeningsTableProps) {
             labelUnseen
             compact
             value={wallKey(...opening.wall)}
-            options={walls.map((wall, index) => ({ value: wall.key, label: `${index + 1}: ${wall.side}` }))}
+            options={walls.map((wall, index) => ({
+              value: wall.key,
+              label: `${index + 1}: ${wall.side}, to ${wall.beyond.join(', ') || 'outside'}`,
+            }))}
             run={(key) => {
               const wall = walls.find((candidate) => candidate.key === key)?.wall ?? opening.wall;
               const input = { opening_id: opening.id, wall, offset_m: 0 };
@@ -82,10 +84,9 @@ export function OpeningsTable({ room, openings, canEdit }: OpeningsTableProps) {
             }}
           />
         ) : (
-          wallOf(opening)?.side
+          `${wallOf(opening)?.side ?? ''}, to ${wallOf(opening)?.beyond.join(', ') || 'outside'}`
         ),
     },
-    { key: 'to', header: 'Leads to', cell: leadsTo },
     ...LENGTHS.map(({ field, label, minimum }): Column<Opening> => ({
       key: field,
       header: `${label}, ${metre}`,
@@ -147,7 +148,7 @@ export function OpeningsTable({ room, openings, canEdit }: OpeningsTableProps) {
       : []),
   ];
   return (
-    <div ref={rootRef} tabIndex={-1}>
+    <div ref={rootRef} tabIndex={-1} className="openings-table">
       <Table
         caption={`Openings of ${room.name}`}
         columns={columns}

@@ -18,7 +18,7 @@ export function surfaceWords(surface: LiningSurface | null): string {
 export function liningWords(lining: Lining): string {
   const [walls, ceiling, floor] = [lining.walls, lining.ceiling, lining.floor].map(surfaceWords);
   if (walls === ceiling && ceiling === floor) return walls ?? '';
-  return `walls ${walls}, ceiling ${ceiling}, floor ${floor}`;
+  return `Walls: ${walls}. Ceiling: ${ceiling}. Floor: ${floor}.`;
 }
 
 /** What protects the room, in a few words; what nobody has looked at is said to be unknown. */

@@ -40,17 +40,20 @@ export function RoomsPart() {
       cell: (row) => (
         <button
           type="button"
-          className="row-name"
+          className="row-name min-w-28"
           aria-current={row.room.id === inHand ? 'true' : undefined}
           onClick={() => {
             session.takeRoom(row.room.id);
           }}
         >
           {row.room.name}
+          <span className="block font-normal text-soft">
+            {row.room.use === null ? '' : `${wordsOfUse(row.room.use)} · `}
+            {row.entries === 1 ? '1 entry' : `${row.entries} entries`}
+          </span>
         </button>
       ),
     },
-    { key: 'use', header: 'Use', sortBy: (row) => row.room.use, cell: (row) => wordsOfUse(row.room.use) },
     {
       key: 'height',
       header: `Height, ${symbol('m')}`,
@@ -65,8 +68,16 @@ export function RoomsPart() {
       sortBy: (row) => row.area_m2,
       cell: (row) => (row.area_m2 === null ? '–' : show(row.area_m2, 'm2').text),
     },
-    { key: 'lining', header: 'Linings', cell: (row) => liningWords(row.room.lining) },
-    { key: 'protection', header: 'Protection', cell: (row) => protectionWords(row.room.protection) },
+    {
+      key: 'known',
+      header: 'Linings and protection',
+      cell: (row) => (
+        <span className="block min-w-40">
+          {liningWords(row.room.lining)}
+          <span className="block text-soft">{protectionWords(row.room.protection)}</span>
+        </span>
+      ),
+    },
     {
       key: 'rating',
       header: 'Rating, min',
@@ -75,30 +86,26 @@ export function RoomsPart() {
       cell: (row) => row.room.rating_min ?? '–',
     },
     {
-      key: 'entries',
-      header: 'Entries',
-      numeric: true,
-      sortBy: (row) => row.entries,
-      cell: (row) => row.entries,
-    },
-    {
       key: 'density',
       header: `Load, ${symbol('MJ/m2')}`,
       numeric: true,
       sortBy: (row) => row.density_MJ_m2,
-      cell: (row) => (row.density_MJ_m2 === null ? '–' : show(row.density_MJ_m2, 'MJ/m2').text),
-    },
-    {
-      key: 'standing',
-      header: 'Standing',
-      sortBy: (row) => row.standing,
-      cell: (row) => <StandingMark standing={row.standing} />,
+      cell: (row) => (
+        <>
+          {row.density_MJ_m2 === null ? '–' : show(row.density_MJ_m2, 'MJ/m2').text}
+          {row.standing !== 'no limit set' && (
+            <span className="block font-sans">
+              <StandingMark standing={row.standing} />
+            </span>
+          )}
+        </>
+      ),
     },
     {
       key: 'do',
       header: canEdit ? 'Change' : 'Read',
       cell: (row) => (
-        <span className="flex flex-wrap gap-x-3">
+        <span className="flex gap-x-3">
           <Button
             look="quiet"
             size="small"
@@ -128,7 +135,7 @@ export function RoomsPart() {
   ];
 
   return (
-    <div className="grid gap-4">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-4">
       {canEdit && (
         <Disclosure title="Add a room by its measures" open={rows.length === 0}>
           <AddRoomForm />

@@ -139,7 +139,7 @@ export function StoreysPart() {
   ];
   const goes = leaving === null ? { rooms: 0, entries: 0 } : countOf(leaving);
   return (
-    <div className="grid gap-4">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-4">
       <Table
         caption="Storeys, from the top down. Rooms are drawn on wall centre lines; half the wall thickness is taken off."
         columns={columns}

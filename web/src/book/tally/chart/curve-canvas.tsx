@@ -35,7 +35,8 @@ function dataOf(chart: CurveChart, colours: ChartColours): ChartData<'line', { x
       borderColor: colours.tones[series.tone],
       backgroundColor: colours.fill,
       borderWidth: 1.75,
-      borderDash: [...series.dash],
+      // Without any dash the library draws dense lines column by column, which shows as steps.
+      borderDash: series.dash.length === 0 ? [1, 0] : [...series.dash],
       pointRadius: 0,
       pointHitRadius: 0,
       fill: series.filled === true ? 'origin' : false,

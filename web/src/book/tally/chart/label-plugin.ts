@@ -107,6 +107,13 @@ export function labelPlugin(current: () => Drawn): Plugin<'line'> {
       const lines = data.series.map((series) =>
         series.points.map(([px, py]) => [x.getPixelForValue(px), y.getPixelForValue(py)] as const),
       );
+      const obstacles = data.marks.map((mark) => {
+        const [mx, my] = [x.getPixelForValue(mark.x), y.getPixelForValue(mark.y)];
+        return [
+          [mx - 8, my - 8],
+          [mx + 8, my + 8],
+        ] as const;
+      });
       const frame = {
         x: chartArea.left,
         y: chartArea.top,
@@ -114,13 +121,15 @@ export function labelPlugin(current: () => Drawn): Plugin<'line'> {
         height: chartArea.bottom - chartArea.top,
       };
       ctx.textBaseline = 'middle';
-      for (const [id, box] of placeLabels(requests, lines, frame)) {
+      for (const [id, box] of placeLabels(requests, [...lines, ...obstacles], frame)) {
         const label = texts.get(id);
         if (label === undefined) continue;
-        ctx.globalAlpha = 0.85;
-        ctx.fillStyle = colours.page;
-        ctx.fillRect(box.x, box.y, box.width, box.height);
-        ctx.globalAlpha = 1;
+        if (box.covers) {
+          ctx.globalAlpha = 0.85;
+          ctx.fillStyle = colours.page;
+          ctx.fillRect(box.x, box.y, box.width, box.height);
+          ctx.globalAlpha = 1;
+        }
         ctx.fillStyle = colours.tones[label.tone];
         ctx.fillText(label.text, box.x + PADDING_PX, box.y + box.height / 2);
       }

@@ -5,6 +5,11 @@ export interface Box {
   readonly height: number;
 }
 
+export interface PlacedLabel extends Box {
+  /** Whether it lies over something and so needs a plate behind it. */
+  readonly covers: boolean;
+}
+
 /** A label that wants to stand at a line: the places it could take, best first. */
 export interface LabelRequest {
   readonly id: string;
@@ -50,9 +55,9 @@ export function placeLabels(
   requests: readonly LabelRequest[],
   lines: readonly (readonly (readonly [number, number])[])[],
   frame: Box,
-): ReadonlyMap<string, Box> {
+): ReadonlyMap<string, PlacedLabel> {
   const taken: Box[] = [];
-  const placed = new Map<string, Box>();
+  const placed = new Map<string, PlacedLabel>();
   for (const request of requests) {
     let best: Box | undefined;
     let bestCost = Infinity;
@@ -73,7 +78,7 @@ export function placeLabels(
     }
     if (best === undefined) continue;
     taken.push(best);
-    placed.set(request.id, best);
+    placed.set(request.id, { ...best, covers: bestCost > 0 });
   }
   return placed;
 }
