@@ -8,6 +8,8 @@ import { migrate } from './migrate.ts';
 
 /** After this the process goes even when a request still hangs, ms. */
 const LAST_ms = 20_000;
+/** Connections made before the word to stop are still served; no longer than this is waited for their requests, ms. */
+const DRAIN_ms = 400;
 
 function settings(): Env | null {
   try {
@@ -33,23 +35,29 @@ async function main(env: Env): Promise<void> {
   server.headersTimeout = 15_000;
 
   let stopping = false;
+  server.prependListener('request', (_request, response) => {
+    if (stopping) response.shouldKeepAlive = false;
+  });
+  const end = (): void => {
+    house.close().then(
+      () => process.exit(0),
+      (error: unknown) => {
+        log.error({ err: error }, 'stopping');
+        process.exit(1);
+      },
+    );
+  };
+  // Told more than once (a key press reaches starter and server alike) it goes on stopping.
   const stop = (): void => {
-    if (stopping) {
-      process.exit(1);
-    }
+    if (stopping) return;
     stopping = true;
     setTimeout(() => process.exit(1), LAST_ms).unref();
     house.endStreams();
-    server.close(() => {
-      house.close().then(
-        () => process.exit(0),
-        (error: unknown) => {
-          log.error({ err: error }, 'stopping');
-          process.exit(1);
-        },
-      );
-    });
-    server.closeIdleConnections();
+    setTimeout(() => {
+      house.endStreams();
+      server.close(end);
+      server.closeIdleConnections();
+    }, DRAIN_ms);
   };
   process.on('SIGTERM', stop);
   process.on('SIGINT', stop);

@@ -37,6 +37,8 @@ export interface TestBook {
 export interface TestAppOptions extends HouseOptions {
   /** Another process's database, to stand beside it. */
   readonly database?: TestDatabase;
+  /** Another way to the database than the direct one. */
+  readonly databaseUrl?: string;
   readonly log?: Logger;
   readonly env?: Readonly<Record<string, string>>;
 }
@@ -84,7 +86,7 @@ export class TestApp {
     const env = readEnv({
       NODE_ENV: 'test',
       BASE_URL: url,
-      DATABASE_URL: database.appUrl,
+      DATABASE_URL: options.databaseUrl ?? database.appUrl,
       DATA_DIR: folder,
       WEB_DIST: join(folder, 'no-web-client'),
       DATABASE_POOL: '5',
