@@ -1,32 +1,15 @@
-import type { CatalogueHit } from '@embertally/shared/catalogue/search-catalogue';
-import type { Entry } from '@embertally/shared/survey/survey-document';
-import { useEffect, useState } from 'react';
+import { useState } from 'react';
 import { Combobox } from '../../components/combobox.tsx';
 import { useBook } from '../session/use-book.ts';
 import { useBookSession } from '../session/use-book-session.ts';
-
-/** What the picker needs of the catalogue; fetched when contents are first placed. */
-interface CatalogueTools {
-  readonly search: (query: string) => readonly CatalogueHit[];
-  readonly entryOf: (hit: CatalogueHit) => Entry;
-}
+import { catalogueTools } from './catalogue-tools.ts';
 
 /** Which kind or material the next press places: type two letters, choose, press on the plan. */
 export function ContentsPicker({ onPicked }: { readonly onPicked: () => void }) {
   const session = useBookSession();
   const placing = useBook((state) => state.placing.entry);
-  const [catalogue, setCatalogue] = useState<CatalogueTools | null>(null);
   const [typed, setTyped] = useState('');
-  useEffect(() => {
-    let left = false;
-    void import('./catalogue-tools.ts').then((loaded) => {
-      if (!left) setCatalogue(loaded.catalogueTools);
-    });
-    return () => {
-      left = true;
-    };
-  }, []);
-  const hits = catalogue?.search(typed) ?? [];
+  const hits = catalogueTools.search(typed);
   return (
     <div className="contents-picker">
       <Combobox
@@ -39,8 +22,8 @@ export function ContentsPicker({ onPicked }: { readonly onPicked: () => void }) 
         nothing={typed === '' ? 'Type two letters: pa, cotton, chair' : 'Nothing in the catalogue answers to that.'}
         onPick={(item) => {
           const hit = hits.find((candidate) => `${candidate.type} ${candidate.row.key}` === item.id);
-          if (hit === undefined || catalogue === null) return;
-          session.setTool('contents', { entry: catalogue.entryOf(hit) });
+          if (hit === undefined) return;
+          session.setTool('contents', { entry: catalogueTools.entryOf(hit) });
           setTyped(hit.row.label);
           onPicked();
         }}

@@ -1,11 +1,10 @@
-import { useRef, useState } from 'react';
+import { lazy, Suspense, useRef, useState } from 'react';
 import { Key } from '../../components/key.tsx';
 import { FIT_ACTIONS, HISTORY_ACTIONS, TABLE_ACTIONS, TOOL_ACTIONS } from '../actions/plan-actions.ts';
 import type { PlanHost } from '../interaction/plan-host.ts';
 import { useBook } from '../session/use-book.ts';
 import { useBookSession } from '../session/use-book-session.ts';
 import { EmptyPlan } from './empty-plan.tsx';
-import { KeysDialog } from './keys-dialog.tsx';
 import { LoadLegend } from './load-legend.tsx';
 import { PlanMessage } from './plan-message.tsx';
 import { PlanSurface } from './plan-surface.tsx';
@@ -13,6 +12,8 @@ import { PlanVerbs } from './plan-verbs.tsx';
 import { SelectionStrip } from './selection-strip.tsx';
 import { ToolOptions } from './tool-options.tsx';
 import { usePlanKeys } from './use-plan-keys.ts';
+
+const KeysDialog = lazy(async () => ({ default: (await import('./keys-dialog.tsx')).KeysDialog }));
 
 /** The left page: what can be done next, the plan, and what its shading means. */
 export function PlanPage({ host }: { readonly host: PlanHost }) {
@@ -57,11 +58,13 @@ export function PlanPage({ host }: { readonly host: PlanHost }) {
         </button>
       </div>
       {keysOpen ? (
-        <KeysDialog
-          onClose={() => {
-            setKeysOpen(false);
-          }}
-        />
+        <Suspense>
+          <KeysDialog
+            onClose={() => {
+              setKeysOpen(false);
+            }}
+          />
+        </Suspense>
       ) : null}
     </div>
   );

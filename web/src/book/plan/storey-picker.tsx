@@ -1,29 +1,27 @@
-import { Menu, MenuItem } from '../../components/menu.tsx';
 import { useBook } from '../session/use-book.ts';
 import { useBookSession } from '../session/use-book-session.ts';
 
-/** Which storey lies open, and the way to the others. */
+/** Which storey lies open, and the way to the others: the browser's own list, highest storey first. */
 export function StoreyPicker() {
   const session = useBookSession();
   const storeys = useBook((state) => state.document.storeys);
   const storeyId = useBook((state) => state.storeyId);
-  const current = storeys.get(storeyId ?? '');
   const byLevel = [...storeys.values()].sort((a, b) => b.level_m - a.level_m);
+  if (storeyId === null) return <span>No storey</span>;
   return (
-    <Menu
-      button={<span className="font-bold text-ink">{current?.name ?? 'No storey'} ▾</span>}
-      label={`Storey: ${current?.name ?? 'none'}`}
+    <select
+      className="storey-picker"
+      aria-label="Storey"
+      value={storeyId}
+      onChange={(event) => {
+        session.goToStorey(event.target.value);
+      }}
     >
       {byLevel.map((storey) => (
-        <MenuItem
-          key={storey.id}
-          onChoose={() => {
-            session.goToStorey(storey.id);
-          }}
-        >
+        <option key={storey.id} value={storey.id}>
           {storey.name}
-        </MenuItem>
+        </option>
       ))}
-    </Menu>
+    </select>
   );
 }

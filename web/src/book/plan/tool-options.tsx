@@ -1,6 +1,9 @@
+import { lazy, Suspense } from 'react';
 import { useBook } from '../session/use-book.ts';
-import { ContentsPicker } from './contents-picker.tsx';
 import { OpeningKinds } from './opening-kinds.tsx';
+
+// Comes with the catalogue it searches, when contents are first placed.
+const ContentsPicker = lazy(async () => ({ default: (await import('./contents-picker.tsx')).ContentsPicker }));
 
 const HINTS = {
   'draw-room':
@@ -24,7 +27,9 @@ export function ToolOptions({ focusPlan }: { readonly focusPlan: () => void }) {
     case 'contents':
       return (
         <div className="tool-options">
-          <ContentsPicker onPicked={focusPlan} />
+          <Suspense fallback={<p className="text-small text-soft">Opening the catalogue…</p>}>
+            <ContentsPicker onPicked={focusPlan} />
+          </Suspense>
         </div>
       );
     case 'draw-room':
