@@ -76,8 +76,10 @@ function idFrom(seed: string, name: string): string {
 async function fill(services: Services, demo: DemoFile): Promise<void> {
   const id = (name: string): string => idFrom(demo.seed, name);
   const actors = new Map<SiteRoleName, Actor>();
-  for (const person of demo.people)
-    actors.set(person.role, await signInAs(services, person, id(`organisation ${person.organisation}`)));
+  for (const person of demo.people) {
+    const admin = [...actors.values()].find((actor) => actor.organisationName === person.organisation) ?? null;
+    actors.set(person.role, await signInAs(services, person, id(`organisation ${person.organisation}`), admin));
+  }
   const as = (role: SiteRoleName): Actor => {
     const actor = actors.get(role);
     if (actor === undefined) throw new Error(`The demo has no ${role}.`);
@@ -126,22 +128,23 @@ async function fill(services: Services, demo: DemoFile): Promise<void> {
   }
 }
 
-/** Signs a person up (an address already there changes nothing) and in; says who is acting. */
+/**
+ * Signs a person up, or has the admin of their organisation add them, and signs them in; says who is acting. An address
+ * that is there already changes nothing.
+ */
 async function signInAs(
   services: Services,
   person: DemoFile['people'][number],
   organisationId: string,
+  admin: Actor | null,
 ): Promise<Actor> {
-  await services.accounts.signUp(
-    {
-      id: organisationId,
-      organisation_name: person.organisation,
-      name: person.name,
-      email: person.email,
-      password: person.password,
-    },
-    TRAIL,
-  );
+  const { name, email, password } = person;
+  if (admin === null) {
+    const signUp = { id: organisationId, organisation_name: person.organisation, name, email, password };
+    await services.accounts.signUp(signUp, TRAIL);
+  } else {
+    await services.accounts.addMember(admin, { name, email, password, role: 'member' }, TRAIL);
+  }
   const { me } = await services.accounts.signIn({ email: person.email, password: person.password }, null, TRAIL);
   const member = me.members.find((one) => one.id === me.member_id);
   if (member === undefined) throw new Error(`${person.name} has no organisation.`);

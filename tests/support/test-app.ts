@@ -13,7 +13,6 @@ import type { SurveyDocument } from '@embertally/shared/survey/survey-document';
 import type { Actor } from '../../api/src/actor.ts';
 import { readEnv } from '../../api/src/env.ts';
 import { House, type HouseOptions } from '../../api/src/house.ts';
-import { PersonRepository } from '../../api/src/repositories/person-repository.ts';
 import { createTestDatabase, type TestDatabase } from './test-database.ts';
 import { TestClock } from './test-clock.ts';
 import { Visitor } from './visitor.ts';
@@ -126,24 +125,10 @@ export class TestApp {
     return this.signedIn(email);
   }
 
-  /** A further member of somebody's organisation. */
+  /** A further member of an admin's organisation. */
   async colleague(of: Actor, role: 'admin' | 'member' = 'member', name = 'Wren Tolly'): Promise<TestPerson> {
-    const people = new PersonRepository(this.house.database.statements);
-    const known = await this.owner.query<{ password_hash: string }>('SELECT password_hash FROM person WHERE id = $1', [
-      of.personId,
-    ]);
-    const id = randomUUID();
-    const email = `${id.slice(0, 8)}@quayside.example`;
-    const at = this.clock.now();
-    const password_hash = known.rows[0]?.password_hash ?? '';
-    await people.add({ id, name, email, password_hash, units: 'SI', created_at: at });
-    await people.addMember({
-      id: randomUUID(),
-      person_id: id,
-      organisation_id: of.organisationId,
-      role,
-      created_at: at,
-    });
+    const email = `${randomUUID().slice(0, 8)}@quayside.example`;
+    await this.house.services.accounts.addMember(of, { name, email, password: PASSWORD, role }, TRAIL);
     return this.signedIn(email);
   }
 

@@ -17,6 +17,7 @@ export const DEMO_PEOPLE: readonly DemoPerson[] = [
   },
   { name: 'Ines Okoro', email: 'ines@harbourwell.example', organisation: 'Harbourwell Fire Office', role: 'inspector' },
   { name: 'Bram Lindholm', email: 'bram@merrow.example', organisation: 'Merrow Mutual', role: 'reviewer' },
+  { name: 'Wyn Castell', email: 'wyn@tidewater.example', organisation: 'Tidewater Players’ Trust', role: 'viewer' },
 ];
 
 export const DEMO_SITE = {

@@ -1,4 +1,5 @@
 import type { Me } from '@embertally/shared/contracts/sessions';
+import { canInOrganisation, type OrganisationRole } from '@embertally/shared/policy/policy';
 import { randomUUID } from 'node:crypto';
 import type { Database } from '../repositories/database.ts';
 import type { Actor, Trail } from '../actor.ts';
@@ -60,8 +61,8 @@ export class AccountService {
       organisationName: input.organisation_name,
       organisationRole: 'admin',
     };
-    try {
-      await database.transaction(async (statements) => {
+    await unlessAddressIsTaken(() =>
+      database.transaction(async (statements) => {
         const people = new PersonRepository(statements);
         await people.add({
           id: actor.personId,
@@ -88,19 +89,65 @@ export class AccountService {
           trail,
           at,
         });
-      });
-    } catch (error) {
-      const broken = uniqueViolation(error);
-      if (broken === 'person_email_unique') return;
-      if (broken === 'organisation_pk') {
-        throw new Fault(
-          'conflict',
-          'id-taken',
-          'This id has been used already; nothing was changed. Send the form again.',
-        );
-      }
-      throw error;
+      }),
+    );
+  }
+
+  /**
+   * Makes an account in the acting admin's organisation: how a colleague comes in where no invitation can be mailed.
+   * An address that has an account already changes nothing, so doing it twice is the same as doing it once.
+   */
+  async addMember(
+    actor: Actor,
+    input: Pick<SignUpInput, 'name' | 'email' | 'password'> & { readonly role: OrganisationRole },
+    trail: Trail,
+  ): Promise<void> {
+    const { database, clock, hashes } = this.parts;
+    if (!canInOrganisation(actor.organisationRole, 'organisation.edit')) {
+      throw new Fault(
+        'forbidden',
+        'role-too-small',
+        'Only an admin of the organisation can add people; nothing was changed.',
+      );
     }
+    const fault = passwordFault(
+      input.password,
+      { email: input.email, name: input.name, organisation: actor.organisationName },
+      '/password',
+    );
+    if (fault !== null) throw Fault.invalid([fault]);
+    const passwordHash = await hashes.make(input.password);
+    const at = clock.now();
+    const [personId, memberId] = [randomUUID(), randomUUID()];
+    await unlessAddressIsTaken(() =>
+      database.transaction(async (statements) => {
+        const people = new PersonRepository(statements);
+        await people.add({
+          id: personId,
+          name: input.name,
+          email: input.email,
+          password_hash: passwordHash,
+          units: 'SI',
+          created_at: at,
+        });
+        await people.addMember({
+          id: memberId,
+          person_id: personId,
+          organisation_id: actor.organisationId,
+          role: input.role,
+          created_at: at,
+        });
+        await recordEvent(statements, {
+          chain: { kind: 'organisation', id: actor.organisationId },
+          actor,
+          action: 'member.added',
+          object: { kind: 'member', id: memberId },
+          facts: { name: input.name, role: input.role },
+          trail,
+          at,
+        });
+      }),
+    );
   }
 
   /**
@@ -190,6 +237,24 @@ export class AccountService {
   ): Promise<Me> {
     await new PersonRepository(this.parts.database.statements).edit(actor.personId, patch);
     return this.describe(actor.personId, actor.memberId, expiresAt);
+  }
+}
+
+/** An address that has an account is no fault: whether it has one is told to nobody. */
+async function unlessAddressIsTaken(work: () => Promise<void>): Promise<void> {
+  try {
+    await work();
+  } catch (error) {
+    const broken = uniqueViolation(error);
+    if (broken === 'person_email_unique') return;
+    if (broken === 'organisation_pk') {
+      throw new Fault(
+        'conflict',
+        'id-taken',
+        'This id has been used already; nothing was changed. Send the form again.',
+      );
+    }
+    throw error;
   }
 }
 

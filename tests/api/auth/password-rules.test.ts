@@ -84,3 +84,18 @@ describe('signing up', () => {
     expect(rows.rows[0]?.password_hash).toMatch(/^\$argon2id\$v=19\$m=19456,t=2,p=1\$/);
   });
 });
+
+describe('adding a colleague', () => {
+  let app: TestApp;
+  beforeAll(async () => {
+    app = await TestApp.open();
+  });
+  afterAll(() => app.close());
+
+  it('is an admin’s to do, and gives an account in the same organisation', async () => {
+    const admin = await app.person('Ada Fell', 'Millpond Carpets');
+    const colleague = await app.colleague(admin);
+    expect(colleague).toMatchObject({ organisationId: admin.organisationId, organisationRole: 'member' });
+    await expect(app.colleague(colleague)).rejects.toMatchObject({ kind: 'forbidden' });
+  });
+});
