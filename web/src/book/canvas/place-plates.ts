@@ -1,6 +1,6 @@
 import { footprint, type Footprint } from '@embertally/shared/geometry/footprint';
 import type { Point } from '@embertally/shared/geometry/point';
-import { bounds } from '@embertally/shared/geometry/bounds';
+import { bounds, boundsOverlap, type Bounds } from '@embertally/shared/geometry/bounds';
 import { pointInRing } from '@embertally/shared/geometry/point-in-ring';
 
 /** A size on the plan, m. */
@@ -26,6 +26,13 @@ export interface Plate {
   readonly size: number;
 }
 
+interface Blocked {
+  readonly ring: readonly Point[];
+  readonly box: Bounds;
+  /** Stands square to the plan: its box is all of it. */
+  readonly square: boolean;
+}
+
 const STEPS = 20;
 
 /**
@@ -35,7 +42,10 @@ const STEPS = 20;
  */
 export function placePlate(request: PlateWish): Plate | null {
   const places = candidates(request.ring, request.wish);
-  const blocked = request.entries.map((entry) => footprint(entry));
+  const blocked = request.entries.map((entry): Blocked => {
+    const ring = footprint(entry);
+    return { ring, box: bounds(ring), square: Math.abs(entry.rotation_deg % 90) < 1e-9 };
+  });
   for (const [size, plate] of request.sizes.entries())
     for (const centre of places) if (isFree(centre, plate, request, blocked)) return { centre, size };
   return null;
@@ -58,13 +68,15 @@ function isFree(
   centre: Point,
   plate: PlateSize,
   { ring, holes, clearance_m }: PlateWish,
-  blocked: readonly (readonly Point[])[],
+  blocked: readonly Blocked[],
 ): boolean {
   const kept = rectangle(centre, plate, clearance_m);
+  const box = bounds(kept);
+  if (blocked.some((entry) => boundsOverlap(entry.box, box) && (entry.square || overlaps(kept, entry.ring))))
+    return false;
   if (!kept.every((corner) => pointInRing(corner, ring) === 'inside')) return false;
   if (meetsOutline(kept, ring)) return false;
-  if (holes.some((hole) => overlaps(kept, hole))) return false;
-  return !blocked.some((entry) => overlaps(kept, entry));
+  return !holes.some((hole) => overlaps(kept, hole));
 }
 
 function rectangle(centre: Point, plate: PlateSize, margin: number): readonly Point[] {

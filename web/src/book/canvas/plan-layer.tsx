@@ -1,6 +1,7 @@
 import { applyChanges } from '@embertally/shared/survey/apply-changes';
 import { entriesOfRoom } from '@embertally/shared/survey/derive/entries-of-room';
 import { formatQuantity } from '@embertally/shared/units/format-quantity';
+import type { Stage } from 'konva/lib/Stage';
 import { useMemo, useState, useSyncExternalStore } from 'react';
 import type { PlanHost } from '../interaction/plan-host.ts';
 import { sceneOf } from '../interaction/scene.ts';
@@ -24,8 +25,14 @@ import { worstStanding } from './worst-standing.ts';
 const NONE: ReadonlySet<string> = new Set();
 const SHARP_AFTER_MS = 140;
 
+interface PlanLayerProps {
+  readonly stage: Stage;
+  readonly host: PlanHost;
+  readonly palette: Palette;
+}
+
 /** Rooms, contents, walls, openings and plates of the storey in view. */
-export function PlanLayer({ host, palette }: { readonly host: PlanHost; readonly palette: Palette }) {
+export function PlanLayer({ stage, host, palette }: PlanLayerProps) {
   const session = useBookSession();
   const document = useBook((state) => state.document);
   const storeyId = useBook((state) => state.storeyId);
@@ -77,10 +84,20 @@ export function PlanLayer({ host, palette }: { readonly host: PlanHost; readonly
       scene.rooms.flatMap((shape) => {
         const { id, name } = shape.room;
         const entries = entriesOfRoom(shown, id).filter((entry) => !isCovering(entry));
-        return plates.place(shape, entries, textOf(id, name), camera.pxPerM, width, measure) ?? [];
+        return (
+          plates.place({
+            shape,
+            entries,
+            text: textOf(id, name),
+            pxPerM: camera.pxPerM,
+            wallWidth_px: width,
+            settled: sharp,
+            measure,
+          }) ?? []
+        );
       }),
     );
   };
 
-  return <Painting camera={camera} view={view} palette={palette} paint={paint} />;
+  return <Painting stage={stage} camera={camera} view={view} palette={palette} paint={paint} />;
 }

@@ -1,7 +1,6 @@
-import 'konva/lib/Core';
 import { formatQuantity } from '@embertally/shared/units/format-quantity';
 import { useSyncExternalStore } from 'react';
-import { Stage } from 'react-konva/lib/ReactKonvaCore';
+import type { Stage } from 'konva/lib/Stage';
 import type { PlanHost } from '../interaction/plan-host.ts';
 import { useBook } from '../session/use-book.ts';
 import { paintCrosshair } from './paint-crosshair.ts';
@@ -13,30 +12,40 @@ import { Painting } from './painting.tsx';
 import type { Palette } from './palette.ts';
 import { PlanLayer } from './plan-layer.tsx';
 import { usePalette } from './use-palette.ts';
+import { useStage } from './use-stage.ts';
 
 /** The plan as a picture: four layers, drawn and never asked. */
 export function PlanStage({ host }: { readonly host: PlanHost }) {
   const view = useBook((state) => state.view);
   const palette = usePalette();
-  if (view.width === 0 || view.height === 0) return null;
+  const { stage, mount } = useStage(view);
   return (
-    <Stage width={view.width} height={view.height} listening={false}>
-      <Backdrop palette={palette} />
-      <PlanLayer host={host} palette={palette} />
-      <Active host={host} palette={palette} />
-      <Overlay palette={palette} />
-    </Stage>
+    <div ref={mount}>
+      {stage === null ? null : (
+        <>
+          <Backdrop stage={stage} palette={palette} />
+          <PlanLayer stage={stage} host={host} palette={palette} />
+          <Active stage={stage} host={host} palette={palette} />
+          <Overlay stage={stage} palette={palette} />
+        </>
+      )}
+    </div>
   );
 }
 
-function Backdrop({ palette }: { readonly palette: Palette }) {
+interface LayerProps {
+  readonly stage: Stage;
+  readonly palette: Palette;
+}
+
+function Backdrop({ stage, palette }: LayerProps) {
   const camera = useBook((state) => state.camera);
   const view = useBook((state) => state.view);
-  return <Painting camera={camera} view={view} palette={palette} paint={paintGrid} />;
+  return <Painting stage={stage} camera={camera} view={view} palette={palette} paint={paintGrid} />;
 }
 
 /** What is picked and what a gesture would do. */
-function Active({ host, palette }: { readonly host: PlanHost; readonly palette: Palette }) {
+function Active({ stage, host, palette }: LayerProps & { readonly host: PlanHost }) {
   const camera = useBook((state) => state.camera);
   const view = useBook((state) => state.view);
   const document = useBook((state) => state.document);
@@ -56,6 +65,7 @@ function Active({ host, palette }: { readonly host: PlanHost; readonly palette: 
   const busy = preview.entries !== undefined || preview.changes !== undefined;
   return (
     <Painting
+      stage={stage}
       camera={camera}
       view={view}
       palette={palette}
@@ -70,13 +80,14 @@ function Active({ host, palette }: { readonly host: PlanHost; readonly palette: 
 }
 
 /** Scale bar and north stand still over the plan. */
-function Overlay({ palette }: { readonly palette: Palette }) {
+function Overlay({ stage, palette }: LayerProps) {
   const camera = useBook((state) => state.camera);
   const view = useBook((state) => state.view);
   const units = useBook((state) => state.units);
   const north = useBook((state) => state.document.storeys.get(state.storeyId ?? '')?.north_deg ?? null);
   return (
     <Painting
+      stage={stage}
       camera={camera}
       view={view}
       palette={palette}

@@ -30,10 +30,23 @@ const PAD_Y_PX = 4;
 export const LINE_PX = 16;
 const CLEARANCE_PX = 3;
 
+export interface PlateAsked {
+  readonly shape: RoomShape;
+  /** Entries the plate must not cover. */
+  readonly entries: readonly Entry[];
+  readonly text: PlateText;
+  readonly pxPerM: number;
+  readonly wallWidth_px: number;
+  /** False while the zoom is moving. */
+  readonly settled: boolean;
+  readonly measure: (words: string, of: 'name' | 'figure') => number;
+}
+
 interface Kept {
   readonly shape: RoomShape;
   readonly entries: readonly Entry[];
-  readonly key: string;
+  readonly words: string;
+  readonly scale: string;
   readonly plate: RoomPlate | null;
 }
 
@@ -50,19 +63,16 @@ export class RoomPlates {
     this.#fonts = fonts;
   }
 
-  place(
-    shape: RoomShape,
-    entries: readonly Entry[],
-    text: PlateText,
-    pxPerM: number,
-    wallWidth_px: number,
-    measure: (words: string, of: 'name' | 'figure') => number,
-  ): RoomPlate | null {
-    const key = `${this.#fonts}|${text.name}|${text.figure}|${text.standing}|${pxPerM}|${wallWidth_px}`;
+  /** While the zoom is still moving a plate stays where it was; it finds its new place when the zoom has settled. */
+  place(asked: PlateAsked): RoomPlate | null {
+    const { shape, entries, text, pxPerM, wallWidth_px, settled } = asked;
+    const words = `${this.#fonts}|${text.name}|${text.figure}|${text.standing}`;
     const before = this.#kept.get(shape.room.id);
-    if (before?.shape === shape && before.key === key && sameRows(before.entries, entries)) return before.plate;
-    const plate = placed(shape, entries, text, pxPerM, wallWidth_px, measure);
-    this.#kept.set(shape.room.id, { shape, entries, key, plate });
+    const same = before?.shape === shape && before.words === words && sameRows(before.entries, entries);
+    const scale = `${pxPerM}|${wallWidth_px}`;
+    if (same && (!settled || before.scale === scale)) return before.plate;
+    const plate = placed(asked);
+    this.#kept.set(shape.room.id, { shape, entries, words, scale, plate });
     return plate;
   }
 }
@@ -71,14 +81,7 @@ function sameRows(a: readonly Entry[], b: readonly Entry[]): boolean {
   return a === b || (a.length === b.length && a.every((entry, index) => entry === b[index]));
 }
 
-function placed(
-  shape: RoomShape,
-  entries: readonly Entry[],
-  text: PlateText,
-  pxPerM: number,
-  wallWidth_px: number,
-  measure: (words: string, of: 'name' | 'figure') => number,
-): RoomPlate | null {
+function placed({ shape, entries, text, pxPerM, wallWidth_px, measure }: PlateAsked): RoomPlate | null {
   const wish = interiorPoint(shape);
   if (wish === null) return null;
   const wordings = wordingsOf(text);
