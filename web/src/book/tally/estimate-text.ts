@@ -5,5 +5,6 @@ import type { Shown } from './use-quantity.ts';
 export function estimateText(estimate: Estimate, show: (value: number, unit: string) => Shown): string {
   if (estimate.value === null) return `never: ${estimate.never ?? 'it does not happen'}`;
   const { text, unit } = show(estimate.value, estimate.unit);
-  return unit === '' ? text : `${text} ${unit}`;
+  // A reader says the exponent; the sign that raises it on screen is not spoken.
+  return unit === '' ? text : `${text} ${unit.replaceAll('^', '')}`;
 }

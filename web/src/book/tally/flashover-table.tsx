@@ -20,7 +20,9 @@ export function FlashoverTable({ flashover }: { readonly flashover: RoomTally['r
             <th scope="col" data-align="end">
               Heat release
             </th>
-            <th scope="col">Made for</th>
+            <th scope="col" data-wide="yes">
+              Made for
+            </th>
             <th scope="col">Here</th>
           </tr>
         </thead>
@@ -30,11 +32,16 @@ export function FlashoverTable({ flashover }: { readonly flashover: RoomTally['r
             if (criterion === undefined) return null;
             return (
               <tr key={way}>
-                <th scope="row">{FLASHOVER_NAMES[way]}</th>
+                <th scope="row">
+                  {FLASHOVER_NAMES[way]}
+                  <span className="ledger-under" aria-hidden="true">
+                    <FormulaText>{plainUnits(criterion.range)}</FormulaText>
+                  </span>
+                </th>
                 <td data-align="end">
                   <Figure path={`room.flashover.${way}`} estimate={criterion} />
                 </td>
-                <td className="text-soft">
+                <td data-wide="yes" className="text-soft">
                   <FormulaText>{plainUnits(criterion.range)}</FormulaText>
                 </td>
                 <td>

@@ -1,4 +1,7 @@
-/** Square and cubic metres inside a sentence as they are written by hand. */
+/** Units inside a sentence as they are written by hand; a power is left for `FormulaText` to raise. */
 export function plainUnits(sentence: string): string {
-  return sentence.replaceAll(/\bm2\b/g, 'm²').replaceAll(/\bm3\b/g, 'm³');
+  return sentence
+    .replaceAll(/\bm2\b/g, 'm²')
+    .replaceAll(/\bm3\b/g, 'm³')
+    .replaceAll(/\bm-1\/2\b/g, 'm^−½');
 }

@@ -53,7 +53,7 @@ export function RoomWorkings({ document, roomId, limits }: RoomWorkingsProps) {
               <h3 id={`working-${path}`} className="text-body font-bold">
                 {name}
               </h3>
-              <WorkingView estimate={estimate} level={4} />
+              <WorkingView estimate={estimate} name={name} level={4} />
             </article>
           ))}
         </section>

@@ -95,7 +95,7 @@ export function RoomsList({ onChosen }: RoomsListProps) {
       ) : (
         storeys.map((storey) => (
           <section key={storey.id} aria-label={`Rooms, ${storey.name}`}>
-            {severalStoreys && <h3 className="pt-3 pb-1 text-small font-bold text-soft">{storey.name}</h3>}
+            {severalStoreys && <h2 className="pt-3 pb-1 text-small font-bold text-soft">{storey.name}</h2>}
             <ul>
               {rows
                 .filter((row) => row.room.storey_id === storey.id)
@@ -116,7 +116,7 @@ export function RoomsList({ onChosen }: RoomsListProps) {
                         }}
                       >
                         <span className="min-w-0">
-                          <span className="block truncate font-bold">{row.room.name}</span>
+                          <span className="block font-bold">{row.room.name}</span>
                           <span className="block text-small text-soft">
                             {area === null ? '' : `${area.text} ${area.unit} · `}
                             {row.entries === 1 ? '1 entry' : `${row.entries} entries`}

@@ -26,7 +26,7 @@ export function WorkingDialog({ roomId, asked, onClose }: WorkingDialogProps) {
       {estimate === null ? (
         <p>This number is not there any more: the room has changed since it was asked for.</p>
       ) : (
-        <WorkingView estimate={estimate} />
+        <WorkingView estimate={estimate} name={asked.name} />
       )}
     </Dialog>
   );

@@ -18,12 +18,14 @@ interface WorkingViewProps {
   /** Computed with workings. */
   readonly estimate: Estimate;
   /** Level of the headings inside. */
-  readonly level?: 3 | 4;
+  readonly level?: 2 | 4;
+  /** What the number is called; tells its table apart from those of other numbers. */
+  readonly name: string;
 }
 
 /** How one number came about: relation, what went in and where it came from, steps, sources, range, reasons. */
-export function WorkingView({ estimate, level = 3 }: WorkingViewProps) {
-  const Heading = level === 3 ? 'h3' : 'h4';
+export function WorkingView({ estimate, name, level = 2 }: WorkingViewProps) {
+  const Heading = level === 2 ? 'h2' : 'h4';
   const show = useQuantity();
   const value = estimate.value === null ? null : show(estimate.value, estimate.unit);
   const inputs = estimate.inputs ?? [];
@@ -57,14 +59,16 @@ export function WorkingView({ estimate, level = 3 }: WorkingViewProps) {
           </p>
         )}
       </section>
-      {inputs.length > 0 && <InputTable inputs={inputs} heading={<Heading>What went in</Heading>} />}
+      {inputs.length > 0 && <InputTable name={name} inputs={inputs} heading={<Heading>What went in</Heading>} />}
       {steps.length > 0 && (
         <section>
           <Heading>Step by step</Heading>
           <ol className="grid gap-1">
             {steps.map((step, index) => (
               <li key={`${String(index)} ${step.text}`} className="border-b border-rule pb-1">
-                <FormulaText>{plainUnits(step.text)}</FormulaText> <StepValue step={step} />
+                <FormulaText>{plainUnits(step.text)}</FormulaText>
+                {step.value != null && !step.text.trimEnd().endsWith('=') ? ' = ' : ' '}
+                <StepValue step={step} />
                 {step.equation !== undefined && (
                   <span className="working-equation">
                     <FormulaText>{step.equation}</FormulaText>
@@ -115,17 +119,18 @@ export function WorkingView({ estimate, level = 3 }: WorkingViewProps) {
 }
 
 interface InputTableProps {
+  readonly name: string;
   readonly inputs: readonly WorkingInput[];
   readonly heading: ReactNode;
 }
 
-function InputTable({ inputs, heading }: InputTableProps) {
+function InputTable({ name, inputs, heading }: InputTableProps) {
   return (
     <section>
       {heading}
-      <div role="region" aria-label="What went in" tabIndex={0} className="overflow-x-auto">
+      <div role="region" aria-label={`What went into: ${name}`} tabIndex={0} className="overflow-x-auto">
         <table className="working-table w-full">
-          <caption className="unseen">What went into this number</caption>
+          <caption className="unseen">What went into: {name}</caption>
           <thead>
             <tr>
               <th scope="col">Symbol</th>
@@ -141,7 +146,7 @@ function InputTable({ inputs, heading }: InputTableProps) {
             {inputs.map((input) => (
               <tr key={input.name}>
                 <th scope="row" className="whitespace-nowrap">
-                  <FormulaText>{input.symbol}</FormulaText>
+                  <FormulaText>{input.symbol === '' ? '–' : input.symbol}</FormulaText>
                 </th>
                 <td>
                   <FormulaText>{plainUnits(input.quantity)}</FormulaText>

@@ -1,6 +1,7 @@
 import type { Done, Refusal } from '@embertally/shared/survey/command';
 import { deleteEntries } from '@embertally/shared/survey/commands/delete-entries';
 import type { Entry } from '@embertally/shared/survey/survey-document';
+import { displayUnit } from '@embertally/shared/units/display-unit';
 import { formatQuantity } from '@embertally/shared/units/format-quantity';
 import { memo } from 'react';
 import { Button } from '../../../components/button.tsx';
@@ -80,7 +81,7 @@ export const EntryRow = memo(function EntryRow(props: EntryRowProps) {
         <td role="cell" data-label="How known">
           {EVIDENCE_WORDS[entry.evidence]}
         </td>
-        <td role="cell" data-label="Heat" data-align="end">
+        <td role="cell" data-label={`Heat, ${displayUnit('MJ', units)?.symbol ?? 'MJ'}`} data-align="end">
           {heat}
         </td>
         <td role="cell">{more}</td>
@@ -133,7 +134,7 @@ export const EntryRow = memo(function EntryRow(props: EntryRowProps) {
           run={(evidence) => edit(entry, { evidence })}
         />
       </td>
-      <td role="cell" data-label="Heat" data-align="end">
+      <td role="cell" data-label={`Heat, ${displayUnit('MJ', units)?.symbol ?? 'MJ'}`} data-align="end">
         {heat}
       </td>
       <td role="cell">

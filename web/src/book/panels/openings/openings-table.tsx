@@ -15,7 +15,7 @@ import { CommandQuantity } from '../command-quantity.tsx';
 import { useRunBack } from '../run-back.ts';
 import { useRowFocus } from '../use-row-focus.ts';
 import { OPENING_KINDS, OPENING_STATES, openingName } from './opening-words.ts';
-import { namedWalls } from './wall-words.ts';
+import { type NamedWall, namedWalls } from './wall-words.ts';
 
 interface OpeningsTableProps {
   readonly room: Room;
@@ -30,6 +30,9 @@ const LENGTHS: readonly { readonly field: Length; readonly label: string; readon
   { field: 'height_m', label: 'Height', minimum: 0.05 },
   { field: 'sill_m', label: 'Sill', minimum: 0 },
 ];
+
+const wallWords = (wall: NamedWall | undefined): string =>
+  wall === undefined ? '' : `${wall.side}, to ${wall.beyond.length === 0 ? 'outside' : wall.beyond.join(', ')}`;
 
 /** The openings of a room, changed where they stand. */
 export function OpeningsTable({ room, openings, canEdit }: OpeningsTableProps) {
@@ -46,45 +49,38 @@ export function OpeningsTable({ room, openings, canEdit }: OpeningsTableProps) {
 
   const columns: readonly Column<Opening>[] = [
     {
-      key: 'kind',
-      header: 'Opening',
+      key: 'what',
+      header: 'Opening and its wall',
       rowHeader: true,
       cell: (opening) =>
         canEdit ? (
-          <CommandChoice
-            label={`What ${openingName(opening)} is`}
-            labelUnseen
-            compact
-            value={opening.kind}
-            options={OPENING_KINDS}
-            run={(kind) => edit(opening, { kind })}
-          />
+          <div className="grid gap-1">
+            <CommandChoice
+              label={`What ${openingName(opening)} is`}
+              labelUnseen
+              compact
+              value={opening.kind}
+              options={OPENING_KINDS}
+              run={(kind) => edit(opening, { kind })}
+            />
+            <CommandChoice
+              label={`Wall of ${openingName(opening)}`}
+              labelUnseen
+              compact
+              value={wallKey(...opening.wall)}
+              options={walls.map((wall, index) => ({ value: wall.key, label: `${index + 1}: ${wallWords(wall)}` }))}
+              run={(key) => {
+                const wall = walls.find((candidate) => candidate.key === key)?.wall ?? opening.wall;
+                const input = { opening_id: opening.id, wall, offset_m: 0 };
+                return runBack(moveOpening, input, `Moved ${openingName(opening)}`);
+              }}
+            />
+          </div>
         ) : (
-          openingName(opening)
-        ),
-    },
-    {
-      key: 'wall',
-      header: 'Wall',
-      cell: (opening) =>
-        canEdit ? (
-          <CommandChoice
-            label={`Wall of ${openingName(opening)}`}
-            labelUnseen
-            compact
-            value={wallKey(...opening.wall)}
-            options={walls.map((wall, index) => ({
-              value: wall.key,
-              label: `${index + 1}: ${wall.side}, to ${wall.beyond.join(', ') || 'outside'}`,
-            }))}
-            run={(key) => {
-              const wall = walls.find((candidate) => candidate.key === key)?.wall ?? opening.wall;
-              const input = { opening_id: opening.id, wall, offset_m: 0 };
-              return runBack(moveOpening, input, `Moved ${openingName(opening)}`);
-            }}
-          />
-        ) : (
-          `${wallOf(opening)?.side ?? ''}, to ${wallOf(opening)?.beyond.join(', ') || 'outside'}`
+          <>
+            {openingName(opening)}
+            <span className="block font-normal text-soft">{wallWords(wallOf(opening))}</span>
+          </>
         ),
     },
     ...LENGTHS.map(({ field, label, minimum }): Column<Opening> => ({

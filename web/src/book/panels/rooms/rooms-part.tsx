@@ -70,20 +70,16 @@ export function RoomsPart() {
     },
     {
       key: 'known',
-      header: 'Linings and protection',
+      header: 'Linings, rating, protection',
       cell: (row) => (
         <span className="block min-w-40">
           {liningWords(row.room.lining)}
-          <span className="block text-soft">{protectionWords(row.room.protection)}</span>
+          <span className="block text-soft">
+            {row.room.rating_min === null ? 'Not rated' : `Rated ${row.room.rating_min} min`};{' '}
+            {protectionWords(row.room.protection)}
+          </span>
         </span>
       ),
-    },
-    {
-      key: 'rating',
-      header: 'Rating, min',
-      numeric: true,
-      sortBy: (row) => row.room.rating_min,
-      cell: (row) => row.room.rating_min ?? '–',
     },
     {
       key: 'density',
