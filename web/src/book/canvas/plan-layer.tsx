@@ -7,7 +7,7 @@ import type { PlanHost } from '../interaction/plan-host.ts';
 import { sceneOf } from '../interaction/scene.ts';
 import { useBook } from '../session/use-book.ts';
 import { useBookSession } from '../session/use-book-session.ts';
-import { loadBand } from '../tally/load-band.ts';
+import { loadBand } from '@embertally/shared/tally/density-band';
 import { EntryTiles } from './entry-tiles.ts';
 import { isCovering } from './is-covering.ts';
 import { paintOpenings } from './paint-openings.ts';

@@ -1,4 +1,4 @@
-import { LOAD_BAND_EDGES } from '../tally/load-band.ts';
+import { LOAD_BAND_EDGES } from '@embertally/shared/tally/density-band';
 
 /** What the shading of rooms means: bands of fire load density, pale to deep, with their hatch. */
 export function LoadLegend() {

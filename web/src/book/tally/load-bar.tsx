@@ -1,4 +1,4 @@
-import { loadBand } from './load-band.ts';
+import { loadBand } from '@embertally/shared/tally/density-band';
 
 /** Everything from here on fills the bar: the deepest band begins at it. */
 const FULL_MJ_M2 = 1600;

@@ -113,7 +113,7 @@ export function OpeningsTable({ room, openings, canEdit }: OpeningsTableProps) {
             labelUnseen
             compact
             value={opening.state}
-            options={OPENING_STATES}
+            options={OPENING_STATES.map(({ value, label }) => ({ value, label: value === 'fails' ? 'fails' : label }))}
             run={(state) => edit(opening, { state })}
           />
         ) : (

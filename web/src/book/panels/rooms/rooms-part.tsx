@@ -72,7 +72,7 @@ export function RoomsPart() {
       key: 'known',
       header: 'Linings, rating, protection',
       cell: (row) => (
-        <span className="block min-w-40">
+        <span className="block min-w-44">
           {liningWords(row.room.lining)}
           <span className="block text-soft">
             {row.room.rating_min === null ? 'Not rated' : `Rated ${row.room.rating_min} min`};{' '}
@@ -101,7 +101,7 @@ export function RoomsPart() {
       key: 'do',
       header: canEdit ? 'Change' : 'Read',
       cell: (row) => (
-        <span className="flex gap-x-3">
+        <span className="flex gap-x-1">
           <Button
             look="quiet"
             size="small"
