@@ -123,6 +123,7 @@ export class House {
     try {
       await this.sessions.removeExpired();
       await this.services.throttle.forgetOld();
+      await this.services.exports.failAbandoned();
       await this.services.summaries.sweep();
     } catch (error) {
       this.log.warn({ err: error }, 'housekeeping was put off');

@@ -77,6 +77,14 @@ export class ExportRepository extends SqlRepository {
     );
   }
 
+  /** Ends exports nobody has worked on since a moment; their progress is written down all the while somebody does. */
+  async failUntouchedSince(moment: Date, problem: string, at: Date): Promise<void> {
+    await this.rows(
+      `UPDATE export SET state = 'failed', problem = $2, updated_at = $3 WHERE state IN ('waiting', 'running') AND updated_at < $1`,
+      [moment, problem, at],
+    );
+  }
+
   async stop(id: string, at: Date): Promise<void> {
     await this.rows(
       `UPDATE export SET state = 'stopped', updated_at = $2 WHERE id = $1 AND state IN ('waiting', 'running')`,

@@ -17,7 +17,10 @@ import { reportInput } from './report-input-of.ts';
 const UNFINISHED_PER_PERSON = 5;
 /** How often progress is written down and a wish to stop is noticed, ms. */
 const CHECK_ms = 400;
+/** Longer than all tries of a job together, ms. */
+const ABANDONED_ms = 20 * 60 * 1000;
 const QUEUE = 'make-export';
+const NOT_MADE = 'The file could not be made. The survey is untouched; try again, and report it if it fails again.';
 
 interface ExportParts {
   readonly database: Database;
@@ -114,6 +117,13 @@ export class ExportService {
     return { name: row.file_name ?? 'report.pdf', bytes };
   }
 
+  /** Says of exports whose process died, and whose tries are used up, that they failed. */
+  async failAbandoned(): Promise<void> {
+    const now = this.parts.clock.now();
+    const moment = new Date(now.getTime() - ABANDONED_ms);
+    await new ExportRepository(this.parts.database.statements).failUntouchedSince(moment, NOT_MADE, now);
+  }
+
   private async find(id: string): Promise<ExportRow> {
     const row = await new ExportRepository(this.parts.database.statements).find(id);
     if (row === null) throw Fault.notFound();
@@ -149,11 +159,7 @@ export class ExportService {
     } catch (error) {
       if (stopping.signal.aborted) return;
       log.error({ err: error, exportId: id }, 'an export failed');
-      await exports.fail(
-        id,
-        'The file could not be made. The survey is untouched; try again, and report it if it fails again.',
-        clock.now(),
-      );
+      await exports.fail(id, NOT_MADE, clock.now());
     } finally {
       clearInterval(watch);
     }

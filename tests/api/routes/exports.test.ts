@@ -119,6 +119,20 @@ describe('an export', () => {
     expect(JSON.stringify(failed)).not.toContain('secret inner reason');
   });
 
+  it('whose process died for good is said to have failed, one being worked on is not', async () => {
+    make = () => Promise.resolve(PDF);
+    const [dead, alive] = [((await ask().expect(202)).body as Asked).id, ((await ask().expect(202)).body as Asked).id];
+    for (const id of [dead, alive]) await reaches(id, 'ready');
+    const leave = "UPDATE export SET state = 'running', updated_at = $2 WHERE id = $1";
+    const now = app.clock.now().getTime();
+    await app.owner.query(leave, [dead, new Date(now - 21 * 60 * 1000)]);
+    await app.owner.query(leave, [alive, new Date(now - 19 * 60 * 1000)]);
+    await app.house.services.exports.failAbandoned();
+    expect(await read(dead)).toMatchObject({ state: 'failed', problem: expect.stringMatching(/try again/) as string });
+    expect(await read(alive)).toMatchObject({ state: 'running' });
+    await app.owner.query("UPDATE export SET state = 'stopped' WHERE id = $1", [alive]);
+  });
+
   it.each([
     ['a tally of no room', { kind: 'room-tally', room_id: null }],
     ['a tally of a room elsewhere', { kind: 'room-tally', room_id: randomUUID() }],
