@@ -47,6 +47,7 @@ export function openedBook(
       newId: () => uid(`made ${(made += 1)}`),
       now: () => NOW,
       queue: (set) => queued.push(set),
+      keepSteps: () => undefined,
     },
   );
   session.setView(800, 600);

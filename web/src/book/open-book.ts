@@ -40,6 +40,9 @@ export async function openBook(surveyId: string, me: Me, signal: AbortSignal): P
       queue: (set) => {
         sync.enqueue(set);
       },
+      keepSteps: (steps) => {
+        sync.keepSteps(steps);
+      },
     },
   );
   const sync = new SurveySync(session, document, {

@@ -1,9 +1,11 @@
+import type { Step } from '@embertally/web/src/book/session/history.ts';
 import type { KeptSet } from '@embertally/web/src/book/sync/kept-set.ts';
 import type { Outbox } from '@embertally/web/src/book/sync/outbox.ts';
 
 /** The device's disk in a test: keeps what it is given across sessions, and can refuse to. */
 export class MemoryOutbox implements Outbox {
   readonly kept = new Map<string, KeptSet>();
+  steps: readonly Step[] = [];
   full = false;
 
   load(): Promise<readonly KeptSet[]> {
@@ -19,6 +21,15 @@ export class MemoryOutbox implements Outbox {
 
   remove(_surveyId: string, id: string): Promise<void> {
     this.kept.delete(id);
+    return Promise.resolve();
+  }
+
+  loadSteps(): Promise<readonly Step[]> {
+    return Promise.resolve(this.steps);
+  }
+
+  putSteps(_surveyId: string, steps: readonly Step[]): Promise<void> {
+    this.steps = structuredClone(steps);
     return Promise.resolve();
   }
 }

@@ -34,6 +34,9 @@ function opened(api: FakeSurveyApi, outbox: MemoryOutbox, document = api.documen
       queue: (set) => {
         sync.enqueue(set);
       },
+      keepSteps: (steps) => {
+        sync.keepSteps(steps);
+      },
     },
   );
   const sync = new SurveySync(session, document, {
@@ -139,6 +142,23 @@ test('a reload loses nothing: what waited is shown again and sent once', async (
   await again.sync.settled();
   expect(api.feed.map(({ label }) => label)).toEqual(['Counted 3', 'Drew a room']);
   expect(outbox.kept.size).toBe(0);
+});
+
+test('undo survives a reload, and what was undone stays undone', async () => {
+  const { api, outbox, session, sync } = await start();
+  count(session, 3);
+  count(session, 4);
+  session.undo();
+  await saved(session);
+  await sync.settled();
+  sync.stop();
+  const again = opened(api, outbox, api.document);
+  await again.sync.start();
+  expect(again.session.state.canUndo).toBe('Counted 3');
+  again.session.undo();
+  await saved(again.session);
+  expect(api.document.entries.get(A)?.count).toBe(1);
+  expect(again.session.state.canUndo).toBeNull();
 });
 
 test('an answer lost after the server took the set is not taken twice', async () => {

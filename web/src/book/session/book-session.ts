@@ -7,7 +7,7 @@ import type { SurveyDocument } from '@embertally/shared/survey/survey-document';
 import type { RoomInput } from '@embertally/shared/tally/room-input';
 import type { RoomTally } from '@embertally/shared/tally/room-tally';
 import type { BookMessage, BookPageName, BookState, Camera, Placing, Selected, ToolName, Units } from './book-state.ts';
-import { createHistory, type History } from './history.ts';
+import { createHistory, type History, type Step } from './history.ts';
 import { roomTallyMemo, type RoomTallyMemo } from './room-tally-memo.ts';
 import { NOTHING_TO_SAVE, type SavingStatus } from './saving-status.ts';
 
@@ -18,6 +18,8 @@ export interface BookSessionPorts {
   readonly now: () => string;
   /** Called once per gesture with what is to be saved; the session never waits for it. */
   readonly queue: (set: ChangeSetBody) => void;
+  /** Called with the own steps that can be taken back, oldest first, whenever they change. */
+  readonly keepSteps: (steps: readonly Step[]) => void;
 }
 
 export interface BookSessionStart {
@@ -99,6 +101,7 @@ export class BookSession {
     if (result.changes.length === 0) return result;
     this.#history.push({ label, changes: result.changes, selection: this.#state.selection });
     this.#commit(result.changes, label);
+    this.#ports.keepSteps(this.#history.steps());
     this.announce(label);
     return result;
   }
@@ -120,6 +123,13 @@ export class BookSession {
   /** After "take theirs" the way back would undo what others did, so it is closed and the interface says so. */
   forgetHistory(): void {
     this.#history.clear();
+    this.#ports.keepSteps([]);
+    this.#set({});
+  }
+
+  /** The way back as it was kept on the device before the page was loaded again. */
+  restoreSteps(steps: readonly Step[]): void {
+    this.#history.restore(steps);
     this.#set({});
   }
 
@@ -214,6 +224,7 @@ export class BookSession {
     const step = this.#history[direction](this.#state.document);
     if (step === null) return;
     if (step.changes.length > 0) this.#commit(step.changes, step.label);
+    this.#ports.keepSteps(this.#history.steps());
     this.select(step.selection);
     if (step.skipped.length > 0) this.say({ kind: 'notice', text: step.skipped.join(' ') });
     else this.announce(step.label);

@@ -1,8 +1,10 @@
 import { openDB, type DBSchema, type IDBPDatabase } from 'idb';
+import type { Step } from '../session/history.ts';
 import type { KeptSet } from './kept-set.ts';
 import type { Outbox } from './outbox.ts';
 
 interface BookDatabase extends DBSchema {
+  steps: { key: string; value: readonly Step[] };
   'change-sets': { key: [string, string]; value: KeptSet & { readonly surveyId: string; readonly id: string } };
 }
 
@@ -15,6 +17,7 @@ export function indexedDbOutbox(personId: string): Outbox {
     opened ??= openDB<BookDatabase>(`embertally-${personId}`, VERSION, {
       upgrade(made) {
         made.createObjectStore('change-sets', { keyPath: ['surveyId', 'id'] });
+        made.createObjectStore('steps');
       },
     });
     // A failed opening is tried again the next time something is to be kept.
@@ -34,6 +37,12 @@ export function indexedDbOutbox(personId: string): Outbox {
     },
     async remove(surveyId, id) {
       await (await database()).delete('change-sets', [surveyId, id]);
+    },
+    async loadSteps(surveyId) {
+      return (await (await database()).get('steps', surveyId)) ?? [];
+    },
+    async putSteps(surveyId, steps) {
+      await (await database()).put('steps', steps, surveyId);
     },
   };
 }

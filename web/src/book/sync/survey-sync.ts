@@ -5,6 +5,7 @@ import { sameValue } from '@embertally/shared/survey/same-value';
 import type { SurveyDocument } from '@embertally/shared/survey/survey-document';
 import { rowsOf } from '@embertally/shared/survey/rows';
 import type { BookSession } from '../session/book-session.ts';
+import type { Step } from '../session/history.ts';
 import { backOff_s } from './back-off.ts';
 import { dependsOn } from './depends-on.ts';
 import { keepMine } from './keep-mine.ts';
@@ -37,8 +38,11 @@ export class SurveySync {
   #unsent: readonly KeptSet[] = [];
   #why: 'offline' | 'signed-out' | 'server' | null = null;
   #savedAt: string | null = null;
-  #onDisk = true;
+  /** Unsent sets the device would not store: only in memory. */
+  readonly #inMemoryOnly = new Set<string>();
+  #readable = true;
   #order = 0;
+  #steps: readonly Step[] | null = null;
   #sending = false;
   #stopped = false;
   #wake: (() => void) | null = null;
@@ -54,13 +58,14 @@ export class SurveySync {
   /** Brings back what waited on the device since the last visit, shows it and goes on sending. */
   async start(): Promise<void> {
     try {
+      this.#session.restoreSteps(await this.#ports.outbox.loadSteps(this.#base.surveyId));
       const kept = await this.#ports.outbox.load(this.#base.surveyId);
       this.#unsent = [...kept, ...this.#unsent];
       this.#order = Math.max(this.#order, ...this.#unsent.map((set) => set.order));
       if (kept.length > 0) this.#show();
     } catch {
       // Nothing can be read from the device; the status says that changes are kept in memory only.
-      this.#onDisk = false;
+      this.#readable = false;
     }
     this.#publish();
     void this.#send();
@@ -79,6 +84,18 @@ export class SurveySync {
     this.#keep(set);
     this.#publish();
     void this.#send();
+  }
+
+  /** Keeps the way back on the device; of several in a row only the latest is written. */
+  keepSteps(steps: readonly Step[]): void {
+    const waiting = this.#steps !== null;
+    this.#steps = steps;
+    if (waiting) return;
+    this.#write(async () => {
+      const latest = this.#steps ?? [];
+      this.#steps = null;
+      await this.#ports.outbox.putSteps(this.#base.surveyId, latest);
+    });
   }
 
   /** The network is back, the tab is looked at again, or the person asks: do not wait for the next turn. */
@@ -236,29 +253,28 @@ export class SurveySync {
   }
 
   #keep(set: KeptSet): void {
-    this.#write(() => this.#ports.outbox.put(this.#base.surveyId, set));
+    const { id } = set.body;
+    this.#write(async () => {
+      this.#inMemoryOnly.add(id);
+      await this.#ports.outbox.put(this.#base.surveyId, set);
+      this.#inMemoryOnly.delete(id);
+    });
   }
 
   #forget(id: string): void {
-    this.#write(() => this.#ports.outbox.remove(this.#base.surveyId, id));
+    this.#write(async () => {
+      this.#inMemoryOnly.delete(id);
+      await this.#ports.outbox.remove(this.#base.surveyId, id);
+    });
   }
 
   /** Writes go to the device one after the other, so that a removal never overtakes its own set. */
   #write(act: () => Promise<void>): void {
-    this.#disk = this.#disk.then(act).then(
-      () => {
-        this.#setOnDisk(true);
-      },
-      () => {
-        this.#setOnDisk(false);
-      },
-    );
-  }
-
-  #setOnDisk(onDisk: boolean): void {
-    if (this.#onDisk === onDisk) return;
-    this.#onDisk = onDisk;
-    this.#publish();
+    const done = () => {
+      this.#publish();
+    };
+    // A write that fails shows in the status: its set stays among those that are in memory only.
+    this.#disk = this.#disk.then(act).then(done, done);
   }
 
   #editedRows(changes: Changes): KeptSet['rows'] {
@@ -273,7 +289,9 @@ export class SurveySync {
 
   #publish(): void {
     if (this.#stopped) return;
-    this.#session.setSaving(savingStatusOf(this.#unsent, this.#why, this.#savedAt, this.#onDisk));
+    this.#session.setSaving(
+      savingStatusOf(this.#unsent, this.#why, this.#savedAt, this.#readable && this.#inMemoryOnly.size === 0),
+    );
   }
 
   #isStopped(): boolean {
