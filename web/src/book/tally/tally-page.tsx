@@ -96,6 +96,7 @@ export function TallyPage() {
           <Skeleton label={`Adding up ${room.name}`} lines={8} />
         ) : (
           <TallyArgument
+            key={room.id}
             tally={tally}
             room={room}
             entries={document.entries}

@@ -224,7 +224,7 @@ function PartList({ entry }: { readonly entry: Entry }) {
   const show = useQuantity();
   return (
     <section>
-      <h3 className="border-b border-ink pb-1 font-bold">Made of</h3>
+      <h2 className="border-b border-ink pb-1 font-bold">Made of</h2>
       <ul className="text-small">
         {entry.parts.map((part, index) => {
           const heat = show(part.net_heat_MJ_kg, 'MJ/kg');
