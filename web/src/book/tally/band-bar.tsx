@@ -16,7 +16,7 @@ interface BandBarProps {
   readonly limits: readonly BandBarLimit[];
 }
 
-const WIDTH = 340;
+const WIDTH = 300;
 const LINE = 30;
 const TONES = { within: 'var(--ink)', near: 'var(--ochre)', over: 'var(--madder)', 'no limit set': 'var(--ink)' };
 
@@ -33,7 +33,7 @@ export function BandBar({ value, low, high, lowLabel, highLabel, limits }: BandB
   const shown = limits.filter((limit) => limit.bound <= scale.to).sort((a, b) => a.bound - b.bound);
   const apart = x(high) - x(low) > 76;
   return (
-    <svg viewBox={`0 0 ${WIDTH} 58`} className="block w-full max-w-[26rem]" aria-hidden="true" focusable="false">
+    <svg viewBox={`0 0 ${WIDTH} 58`} className="block w-full max-w-[21rem]" aria-hidden="true" focusable="false">
       <line x1={0} x2={WIDTH} y1={LINE} y2={LINE} stroke="var(--soft)" strokeWidth={1} />
       <rect
         x={x(low)}
@@ -57,16 +57,16 @@ export function BandBar({ value, low, high, lowLabel, highLabel, limits }: BandB
             strokeDasharray={limit.standing === 'over' ? '7 2' : '4 3'}
           />
           {index === 0 && (
-            <text x={x(limit.bound)} y={12} fontSize={13} stroke="none" textAnchor={anchorAt(x(limit.bound))}>
+            <text x={x(limit.bound)} y={12} fontSize={14} stroke="none" textAnchor={anchorAt(x(limit.bound))}>
               {limit.label}
             </text>
           )}
         </g>
       ))}
-      <text x={x(low)} y={56} fontSize={13} fill="var(--soft)" textAnchor={apart ? anchorAt(x(low)) : 'end'}>
+      <text x={x(low)} y={56} fontSize={14} fill="var(--soft)" textAnchor={apart ? anchorAt(x(low)) : 'end'}>
         {lowLabel}
       </text>
-      <text x={x(high)} y={56} fontSize={13} fill="var(--soft)" textAnchor={apart ? anchorAt(x(high)) : 'start'}>
+      <text x={x(high)} y={56} fontSize={14} fill="var(--soft)" textAnchor={apart ? anchorAt(x(high)) : 'start'}>
         {highLabel}
       </text>
     </svg>
