@@ -23,7 +23,7 @@ export function RoomWorkings({ document, roomId, limits }: RoomWorkingsProps) {
   );
   const sections = useMemo(() => allEstimates(tally), [tally]);
   return (
-    <div className="tally grid gap-8">
+    <div className="tally grid grid-cols-[minmax(0,1fr)] gap-8">
       <nav aria-label="Parts of the workings" className="print:hidden">
         <ol className="flex flex-wrap gap-x-5 gap-y-1">
           {sections.map((section, index) => (

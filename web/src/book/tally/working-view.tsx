@@ -65,7 +65,7 @@ export function WorkingView({ estimate, name, level = 2 }: WorkingViewProps) {
           <Heading>Step by step</Heading>
           <ol className="grid gap-1">
             {steps.map((step, index) => (
-              <li key={`${String(index)} ${step.text}`} className="border-b border-rule pb-1">
+              <li key={`${String(index)} ${step.text}`} className="border-b border-rule pb-1 break-words">
                 <FormulaText>{plainUnits(step.text)}</FormulaText>
                 {step.value != null && !step.text.trimEnd().endsWith('=') ? ' = ' : ' '}
                 <StepValue step={step} />
