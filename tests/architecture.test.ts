@@ -2,7 +2,9 @@ import { execFileSync } from 'node:child_process';
 import { existsSync, readFileSync, readdirSync } from 'node:fs';
 import { join } from 'node:path';
 import { describe, expect, it } from 'vitest';
+import { METHODS } from '@embertally/shared/methods/registry';
 import { findCycle, importsOf, root, sourceFiles } from './support/import-graph.ts';
+import { methodsTable } from './support/methods-table.ts';
 
 const files = sourceFiles('shared/src', 'api/src', 'api/scripts', 'web/src');
 const imports = new Map(files.map((file) => [file, importsOf(file)]));
@@ -141,5 +143,19 @@ describe('the tree', () => {
         /\b(to|href)=("|\{`)\/(?!assets|api)/.test(readFileSync(join(root, 'web/src', name), 'utf8')),
     );
     expect(wrong).toEqual([]);
+  });
+});
+
+describe('the methods', () => {
+  it('stand in the table of SAFETY.md as they are declared and held (npm run safety writes it)', async () => {
+    expect(readFileSync(join(root, 'SAFETY.md'), 'utf8')).toContain(await methodsTable());
+  });
+
+  it('are each held to at least one value from outside', async () => {
+    const table = await methodsTable();
+    const loose = METHODS.filter(
+      ({ id }) => !new RegExp(`\\| \`${id}\` \\|.*\\| \\d+ (published|independently|invariant)`).test(table),
+    );
+    expect(loose.map(({ id }) => id)).toEqual([]);
   });
 });
