@@ -55,7 +55,7 @@ export function openedBook(
   return { session, queued };
 }
 
-type Held = Partial<Pick<HostPointer, 'shift' | 'free' | 'type' | 'id' | 'pans'>>;
+type Held = Partial<Pick<HostPointer, 'shift' | 'free' | 'type' | 'id' | 'pans' | 'primary'>>;
 
 /** A hand on the plan: says where in metres, and the host hears pixels. */
 export class PlanDriver {
@@ -120,6 +120,7 @@ export class PlanDriver {
       shift: false,
       free: false,
       pans: false,
+      primary: (held.id ?? 1) === 1,
       ...held,
       at: toView(camera, view, { x_m, y_m }),
     };

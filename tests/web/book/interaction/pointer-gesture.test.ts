@@ -65,7 +65,7 @@ test('after two fingers a single one draws again', () => {
   driver.down(5, 5, { id: 2, type: 'touch' });
   driver.up(3, 3, { id: 1, type: 'touch' });
   driver.up(5, 5, { id: 2, type: 'touch' });
-  driver.drag([3, 3], [6, 6], { id: 3, type: 'touch' });
+  driver.drag([3, 3], [6, 6], { id: 3, type: 'touch', primary: true });
   expect(driver.document.rooms.size).toBe(1);
 });
 
@@ -87,4 +87,12 @@ test('the space bar or the middle button moves the view, whatever is under it', 
   expect(driver.session.state.camera.x_m).toBeLessThan(8);
   expect(driver.session.state.camera.y_m).toBeCloseTo(6, 9);
   expect(driver.document).toBe(document);
+});
+
+test('a second finger on the plan while the first is on a strip beside it draws nothing', () => {
+  const driver = new PlanDriver(groundFloor());
+  driver.session.setTool('draw-room');
+  driver.drag([3, 3], [6, 6], { id: 2, type: 'touch', primary: false });
+  expect(driver.document.rooms.size).toBe(0);
+  expect(driver.preview).toEqual(NO_PREVIEW);
 });

@@ -12,6 +12,8 @@ export interface HostPointer {
   readonly id: number;
   readonly type: 'mouse' | 'touch' | 'pen';
   readonly at: ViewPoint;
+  /** The first pointer of its type that is down. */
+  readonly primary: boolean;
   readonly shift: boolean;
   readonly free: boolean;
   /** Middle button, or the space bar held: the view moves, nothing is edited. */

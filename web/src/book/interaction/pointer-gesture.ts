@@ -4,6 +4,8 @@ export interface PointerFact {
   readonly id: number;
   readonly type: 'mouse' | 'touch' | 'pen';
   readonly at: ViewPoint;
+  /** The first finger of those down now, wherever on the screen it is. */
+  readonly primary: boolean;
 }
 
 /** What fingers do to the view. */
@@ -35,7 +37,9 @@ export class PointerGesture {
   readonly #palms = new Set<number>();
 
   press(pointer: PointerFact): GestureAnswer {
-    if (pointer.type === 'touch' && this.#hasPen()) {
+    // The hand rests: beside a pen, or its first finger is on a strip or a verb next to the plan.
+    const resting = this.#hasPen() || (!pointer.primary && this.#down.size === 0);
+    if (pointer.type === 'touch' && resting) {
       this.#palms.add(pointer.id);
       return { to: 'nobody' };
     }

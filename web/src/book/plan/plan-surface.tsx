@@ -32,10 +32,17 @@ export function PlanSurface({ host, children }: { readonly host: PlanHost; reado
     const lose = () => {
       host.lose();
     };
+    // A second finger beside the plan, on a strip or a verb, calls off what the first one began as well.
+    const second = (event: PointerEvent) => {
+      const beside = !(event.target instanceof Node && element.contains(event.target));
+      if (event.pointerType === 'touch' && !event.isPrimary && beside) host.lose();
+    };
     element.addEventListener('wheel', wheel, { passive: false });
+    window.addEventListener('pointerdown', second, true);
     window.addEventListener('blur', lose);
     return () => {
       element.removeEventListener('wheel', wheel);
+      window.removeEventListener('pointerdown', second, true);
       window.removeEventListener('blur', lose);
     };
   }, [host]);
@@ -46,6 +53,7 @@ export function PlanSurface({ host, children }: { readonly host: PlanHost; reado
       id: event.pointerId,
       type: event.pointerType === 'touch' ? 'touch' : event.pointerType === 'pen' ? 'pen' : 'mouse',
       at: { x: event.clientX - box.left, y: event.clientY - box.top },
+      primary: event.isPrimary,
       shift: event.shiftKey,
       free: event.altKey || event.ctrlKey,
       pans: event.button === 1 || spaceHeld.current,
