@@ -1,6 +1,6 @@
 import type { Standing } from '@embertally/shared/limits/standing';
 import { entriesOfRoom } from '@embertally/shared/survey/derive/entries-of-room';
-import { roomsOfStorey } from '@embertally/shared/survey/derive/rooms-of-storey';
+import { roomsInReadingOrder } from '@embertally/shared/survey/derive/rooms-in-reading-order';
 import { roomInput } from '@embertally/shared/survey/room-input';
 import { fromStored } from '@embertally/shared/survey/stored';
 import type { Room, Storey, SurveyDocument } from '@embertally/shared/survey/survey-document';
@@ -35,7 +35,7 @@ export function buildReportBook(input: ReportInput, onRoom: (fraction: number) =
   const storeys = [...document.storeys.values()].sort((a, b) => a.level_m - b.level_m || compare(a, b));
   const listed = storeys.map((storey) => ({
     storey,
-    rooms: [...roomsOfStorey(document, storey.id)].sort(compare),
+    rooms: roomsInReadingOrder(document, storey.id),
   }));
   const count = listed.reduce((sum, { rooms }) => sum + rooms.filter(wanted).length, 0);
   if (count === 0 && input.kind === 'room-tally') throw new RoomGoneError();

@@ -9,7 +9,7 @@ import { dock, limitOn, renderBookPart } from './render-book-part.tsx';
 function rooms(count: number): SurveyDocument {
   let document = groundFloor();
   for (let index = 0; index < count; index += 1) {
-    document = withRoom(document, `R${index}`, box((index % 10) * 6, Math.floor(index / 10) * 4, 6, 4));
+    document = withRoom(document, `R${index}`, box((index % 10) * 6, -Math.floor(index / 10) * 4, 6, 4));
   }
   return document;
 }

@@ -1,3 +1,4 @@
+import { roomsInReadingOrder } from '@embertally/shared/survey/derive/rooms-in-reading-order';
 import type { Limit } from '@embertally/shared/contracts/limits';
 import type { Survey } from '@embertally/shared/contracts/surveys';
 import { applyChanges } from '@embertally/shared/survey/apply-changes';
@@ -272,8 +273,7 @@ function groundStorey(document: SurveyDocument): string | null {
 }
 
 function firstRoom(document: SurveyDocument, storeyId: string | null): string | null {
-  for (const room of document.rooms.values()) if (room.storey_id === storeyId) return room.id;
-  return null;
+  return storeyId === null ? null : (roomsInReadingOrder(document, storeyId)[0]?.id ?? null);
 }
 
 /** Drops from the view what the document no longer holds. */

@@ -17,13 +17,15 @@ export interface LedgerRow {
   readonly running_MJ: number;
 }
 
-/** The ledger of a room: its entries in the order they were recorded, each with the sum so far. */
+/** The ledger of a room: its entries with the most heat first, each with the sum so far. */
 export function ledgerRows(
   byEntry: RoomTally['load']['byEntry'],
   entries: ReadonlyMap<string, Entry>,
 ): readonly LedgerRow[] {
   let running_MJ = 0;
-  return byEntry.flatMap((share, index) => {
+  const order = byEntry.map((share, index) => ({ share, index }));
+  order.sort((a, b) => (b.share.heat.value ?? 0) - (a.share.heat.value ?? 0));
+  return order.flatMap(({ share, index }) => {
     const entry = entries.get(share.id);
     if (entry === undefined) return [];
     running_MJ += share.heat.value ?? 0;

@@ -1,4 +1,5 @@
 import { useByKey as findUse } from '@embertally/shared/catalogue/uses';
+import { roomsOfBuildingInReadingOrder } from '@embertally/shared/survey/derive/rooms-in-reading-order';
 import { roomArea } from '@embertally/shared/survey/derive/room-area';
 import { roomHeight } from '@embertally/shared/survey/derive/room-height';
 import type { Room, SurveyDocument } from '@embertally/shared/survey/survey-document';
@@ -7,7 +8,7 @@ import type { UnitSystem } from '@embertally/shared/units/unit-system';
 
 /** "Room 1 of 14 · 96.0 m² · 4.20 m high · used as theatre store" */
 export function roomLine(document: SurveyDocument, room: Room, units: UnitSystem): string {
-  const ids = [...document.rooms.keys()];
+  const ids = roomsOfBuildingInReadingOrder(document).map(({ id }) => id);
   const area = roomArea(document, room.id);
   const shown = (value: number, unit: string): string => {
     const { text, unit: symbol } = formatQuantity(value, unit, units);

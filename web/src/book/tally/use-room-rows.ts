@@ -1,7 +1,10 @@
 import type { Standing } from '@embertally/shared/limits/standing';
 import { entriesOfRoom } from '@embertally/shared/survey/derive/entries-of-room';
 import { roomArea } from '@embertally/shared/survey/derive/room-area';
-import { roomsOfStorey } from '@embertally/shared/survey/derive/rooms-of-storey';
+import {
+  roomsInReadingOrder,
+  roomsOfBuildingInReadingOrder,
+} from '@embertally/shared/survey/derive/rooms-in-reading-order';
 import type { Room } from '@embertally/shared/survey/survey-document';
 import { useMemo } from 'react';
 import { useBook } from '../session/use-book.ts';
@@ -19,7 +22,7 @@ export interface RoomRow {
 }
 
 /**
- * The rooms with their headline, in the order they were drawn.
+ * The rooms with their headline, in the reading order of the plan.
  *
  * @param which of one storey, or of the whole building
  */
@@ -31,7 +34,11 @@ export function useRoomRows(which: 'storey' | 'building'): readonly RoomRow[] {
   const engineReady = useBook((state) => state.engineReady);
   return useMemo(() => {
     const rooms =
-      which === 'building' ? [...document.rooms.values()] : storeyId === null ? [] : roomsOfStorey(document, storeyId);
+      which === 'building'
+        ? roomsOfBuildingInReadingOrder(document)
+        : storeyId === null
+          ? []
+          : roomsInReadingOrder(document, storeyId);
     const limited = new Set(limits.map((limit) => limit.room_id));
     return rooms.map((room): RoomRow => {
       const tally = engineReady ? session.tally(room.id) : null;
