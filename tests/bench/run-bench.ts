@@ -4,11 +4,13 @@ import { benchApi } from './bench-api.ts';
 import { benchBundle } from './bench-bundle.ts';
 import { benchEstimateRoom } from './bench-estimate-room.ts';
 import { benchReport } from './bench-report.ts';
+import { benchSpread } from './bench-spread.ts';
 import { benchStart } from './bench-start.ts';
 
 /** Runs every benchmark one after the other and prints one table; `--json FILE` writes the rows as well. */
 const benches: readonly (() => Promise<readonly BenchRow[]>)[] = [
   benchEstimateRoom,
+  benchSpread,
   benchBundle,
   benchApi,
   benchReport,
