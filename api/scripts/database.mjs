@@ -2,7 +2,7 @@ import { spawn } from 'node:child_process';
 import { randomBytes } from 'node:crypto';
 import { existsSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
-import { clusterFolder, ensureDatabase, ensurePostgres, serverUrl, startCluster } from './postgres.mjs';
+import { clusterFolder, ensureDatabase, ensurePostgres, serverUrl, startCluster, stopCluster } from './postgres.mjs';
 
 /** Secrets are made once and stay in the data folder, readable by their owner only. */
 function secrets(dataFolder) {
@@ -33,22 +33,39 @@ export async function database(root, dataFolder) {
     folder: clusterFolder(dataFolder),
     passwordFile: join(dataFolder, 'postgres-password'),
   });
+  const keeper = join(dataFolder, 'cluster-keeper');
+  const ours = cluster.started || !isAlive(keeper);
+  if (ours) keep(root, keeper, cluster.folder);
   const { ownerPassword, appPassword } = secrets(dataFolder);
   await ensureDatabase({ ...cluster, database: 'embertally', ownerPassword, appPassword });
-  if (cluster.started) guard(root, cluster.folder);
   return {
     env: {
       DATABASE_URL: serverUrl('embertally_app', appPassword, cluster.port, 'embertally'),
       MIGRATION_DATABASE_URL: serverUrl('embertally_owner', ownerPassword, cluster.port, 'embertally'),
     },
     ours: true,
-    stop: cluster.stop,
+    stop: ours ? () => stopCluster(cluster.folder) : () => {},
   };
 }
 
-/** Stops the cluster even when this process is killed: the guard's input ends with us, however we end. */
-function guard(root, folder) {
-  spawn(process.execPath, [join(root, 'api', 'scripts', 'cluster-guard.mjs'), folder], {
+/** Whether the start command that keeps the running cluster still lives; one that was killed leaves it to the next. */
+function isAlive(keeper) {
+  if (!existsSync(keeper)) return false;
+  try {
+    process.kill(Number(readFileSync(keeper, 'utf8')), 0);
+    return true;
+  } catch (error) {
+    return error.code === 'EPERM';
+  }
+}
+
+/**
+ * Takes the cluster into this command's keeping and makes sure it is stopped even when the command is killed: the guard's
+ * input ends with us, however we end. It stops nothing that a later command has taken over by then.
+ */
+function keep(root, keeper, folder) {
+  writeFileSync(keeper, String(process.pid));
+  spawn(process.execPath, [join(root, 'api', 'scripts', 'cluster-guard.mjs'), folder, keeper, String(process.pid)], {
     stdio: ['pipe', 'ignore', 'ignore'],
     detached: true,
   }).unref();

@@ -1,6 +1,6 @@
 import { spawnSync } from 'node:child_process';
 import { createHash } from 'node:crypto';
-import { existsSync, readFileSync, writeFileSync } from 'node:fs';
+import { existsSync, readFileSync, statSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { Stop, asStop, say } from './say.mjs';
 
@@ -15,12 +15,22 @@ export function checkNode() {
   }
 }
 
+/** npm writes its own record of what it installed: one as new as the lock file means somebody ran npm themselves. */
+function installedByHand(root) {
+  const record = join(root, 'node_modules', '.package-lock.json');
+  return existsSync(record) && statSync(record).mtimeMs >= statSync(join(root, 'package-lock.json')).mtimeMs;
+}
+
 /** Installs the npm packages of the lock file when they are not the ones already there. */
 export function ensurePackages(root) {
   const lock = readFileSync(join(root, 'package-lock.json'));
   const wanted = createHash('sha256').update(lock).update(process.versions.node).digest('hex');
   const stamp = join(root, 'node_modules', '.embertally-stamp');
   if (existsSync(stamp) && readFileSync(stamp, 'utf8') === wanted) return;
+  if (!existsSync(stamp) && installedByHand(root)) {
+    writeFileSync(stamp, wanted);
+    return;
+  }
   say('Installing npm packages…');
   // What npm sets for a workspace run or a production install would leave half of the packages out.
   const env = Object.fromEntries(

@@ -80,8 +80,8 @@ async function main() {
       [bin('prettier'), ['--check', '--log-level', 'warn', '.']],
     ]),
     await vitest('unit', ['unit', 'web']),
-    await vitest('api', ['api']),
     await check('build', [[process.execPath, [join(root, 'api', 'scripts', 'build-web.mjs')]]]),
+    await vitest('api', ['api']),
     await vitest('e2e', ['e2e']),
   ];
   const total = (key) => results.reduce((sum, result) => sum + result[key], 0);
