@@ -8,14 +8,16 @@ const STEP = 0.1;
 
 /** Every window on a fine grid, each entry sampled by the true outline of its footprint: slow and plain. */
 function bruteForce(loads: readonly PlacedLoad[]): number {
+  const placed = loads.map(({ heat, footprint: rectangle }) => ({
+    heat,
+    ring: footprint(rectangle),
+    area: rectangle.width_m * rectangle.depth_m,
+  }));
   let best = 0;
   for (let x = -3; x <= 8; x += STEP) {
     for (let y = -3; y <= 8; y += STEP) {
       let heat = 0;
-      for (const load of loads) {
-        const { width_m, depth_m } = load.footprint;
-        heat += (load.heat * overlapArea(footprint(load.footprint), x, y, x + 2, y + 2)) / (width_m * depth_m);
-      }
+      for (const { heat: whole, ring, area } of placed) heat += (whole * overlapArea(ring, x, y, x + 2, y + 2)) / area;
       best = Math.max(best, heat / 4);
     }
   }
@@ -48,12 +50,12 @@ describe('the densest window', () => {
     );
   });
 
-  it('comes within two percent of a fine grid for turned footprints', () => {
+  it('comes within half a percent of a fine grid for turned footprints', () => {
     fc.assert(
       fc.property(fc.array(load(fc.integer({ min: 1, max: 89 })), { minLength: 1, maxLength: 5 }), (loads) => {
-        expect(densestWindow(loads).density).toBeGreaterThanOrEqual(bruteForce(loads) * 0.98);
+        expect(densestWindow(loads).density).toBeGreaterThanOrEqual(bruteForce(loads) * 0.995);
       }),
-      { numRuns: 25 },
+      { numRuns: 60 },
     );
   });
 

@@ -30,7 +30,8 @@ interface Position {
 }
 
 const SIDE_M = 2;
-const REFINED = 3;
+/** How many columns, and how many windows around a turned footprint, are improved step by step. */
+const REFINED = 8;
 /** A turn this close to a quarter, as a share of one, stands along the axes. */
 const ALONG_AXES = 1e-8;
 const FIRST_STEP_M = 0.25;
@@ -49,8 +50,18 @@ export function densestWindow(loads: readonly PlacedLoad[]): DensestWindow {
   const turned = boxes.some(({ ring }) => ring !== undefined);
   const swept = sweep(boxes, turned ? REFINED : 1);
   if (swept.length === 0) return { density: 0, x: 0, y: 0 };
-  const best = turned ? swept.map((position) => climb(boxes, position)).reduce(hotter) : swept.reduce(hotter);
+  const starts = turned ? [...swept, ...aroundTurned(boxes)] : swept;
+  const best = turned ? starts.map((position) => climb(boxes, position)).reduce(hotter) : swept.reduce(hotter);
   return { density: best.heat / (SIDE_M * SIDE_M), x: best.x, y: best.y };
+}
+
+/** Windows in the middle of the turned footprints with the most heat: a bounding box says little of a long, turned one. */
+function aroundTurned(boxes: readonly Box[]): Position[] {
+  return boxes
+    .filter(({ ring }) => ring !== undefined)
+    .sort((a, b) => b.heat - a.heat)
+    .slice(0, REFINED)
+    .map(({ heat, x0, x1, y0, y1 }) => ({ heat, x: (x0 + x1 - SIDE_M) / 2, y: (y0 + y1 - SIDE_M) / 2 }));
 }
 
 function hotter(a: Position, b: Position): Position {
@@ -184,6 +195,10 @@ function climb(all: readonly Box[], start: Position): Position {
       [-step, 0],
       [0, step],
       [0, -step],
+      [step, step],
+      [step, -step],
+      [-step, step],
+      [-step, -step],
     ]
       .map(([dx, dy]) => ({ x: best.x + dx!, y: best.y + dy! }))
       .map(({ x, y }) => ({ x, y, heat: heatInside(boxes, x, y) }))
