@@ -25,7 +25,7 @@ export const localPeak = defineMethod({
   ],
   assumptions: [
     'Each entry is spread evenly over its footprint; entries above one another add up.',
-    'Exact where footprints stand along the axes; with turned footprints found to within about two percent.',
+    'Exact where footprints stand along the axes; with turned footprints found to within half a percent of a fine grid.',
   ],
   why: 'A mean over the floor hides one tall stack; the window says how much stands in one place.',
   outOfRange: 'refuse',
