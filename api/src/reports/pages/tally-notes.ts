@@ -5,6 +5,7 @@ import { writeHeading } from '../layout/write-heading.ts';
 import { writeTable } from '../layout/write-table.ts';
 import { writeText } from '../layout/write-text.ts';
 import type { RoomReport } from '../report-book.ts';
+import { inputWords } from './input-words.ts';
 import { missingName } from './missing-name.ts';
 import { typeset } from './typeset.ts';
 import { superscript, type RoomNotes } from './room-notes.ts';
@@ -27,7 +28,7 @@ export function writeMissing(flow: Flow, { tally }: RoomReport): void {
     { title: 'Why', width: { share: 1.3 } },
   ];
   const rows = [...byReason.values()].map(({ names, input, why }) => ({
-    cells: [names.join('; '), input === 'engine' ? '–' : input, typeset(why)],
+    cells: [names.join('; '), inputWords(input), typeset(why)],
   }));
   writeTable(flow, columns, rows);
   flow.gap(14);

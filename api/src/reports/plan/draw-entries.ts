@@ -1,4 +1,5 @@
 import { footprint } from '@embertally/shared/geometry/footprint';
+import { isCovering } from '@embertally/shared/survey/derive/is-covering';
 import type { Entry } from '@embertally/shared/survey/survey-document';
 import { INK, LOAD_COLOURS, mixed, PAGE, SOFT } from '../layout/theme.ts';
 import type { FontBook } from '../pdf/font-book.ts';
@@ -14,7 +15,7 @@ export function entryOutline(frame: PlanFrame, entry: Entry): readonly Point[] {
 
 /**
  * The contents of a room: footprints with their line in the room's ledger where it fits. Each has a casing in the page's
- * colour so that it stands out on every band.
+ * colour so that it stands out on every band. Coverings of the floor lie under the rest, in outline.
  */
 export function drawEntries(
   sheet: Sheet,
@@ -26,13 +27,18 @@ export function drawEntries(
   const under = band === null ? PAGE : (LOAD_COLOURS[band] ?? PAGE);
   const fill = mixed(PAGE, under, 0.86);
   const k = frame.scale.pointsPerMetre;
-  for (const [index, entry] of entries.entries()) {
+  const lines = entries.map((entry, index) => ({ entry, number: String(index + 1) }));
+  const coverings = lines.filter(({ entry }) => isCovering(entry));
+  for (const { entry } of coverings) {
+    sheet.polygon([entryOutline(frame, entry)], { stroke: { colour: SOFT, width: 0.5 } });
+  }
+  for (const { entry, number } of lines) {
+    if (isCovering(entry)) continue;
     const outline = entryOutline(frame, entry);
     const [first, , third] = outline;
     if (first === undefined || third === undefined) continue;
     sheet.polygon([outline], { stroke: { colour: PAGE, width: 1.9 } });
     sheet.polygon([outline], { fill, stroke: { colour: INK, width: 0.6 } });
-    const number = String(index + 1);
     const [width, depth] = [entry.width_m * k, entry.depth_m * k];
     const fits = Math.min(width, depth) >= NUMBER_SIZE + 2 && width >= book.width(number, NUMBER_SIZE, 'regular') + 3;
     if (fits) {

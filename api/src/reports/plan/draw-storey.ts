@@ -2,6 +2,7 @@ import { clearRing } from '@embertally/shared/survey/derive/clear-ring';
 import { openingsOfStorey } from '@embertally/shared/survey/derive/openings-of-storey';
 import { roomRegion } from '@embertally/shared/survey/derive/room-region';
 import { walls } from '@embertally/shared/survey/derive/walls';
+import { isCovering } from '@embertally/shared/survey/derive/is-covering';
 import type { SurveyDocument } from '@embertally/shared/survey/survey-document';
 import { loadBand } from '@embertally/shared/tally/density-band';
 import { INK, PAGE } from '../layout/theme.ts';
@@ -30,7 +31,7 @@ export function drawStorey(
   const onSheet = rooms.map((report) => ({
     report,
     rings: outlineOf(document, report, frame),
-    obstacles: report.entries.map((entry) => entryOutline(frame, entry)),
+    obstacles: report.entries.filter((entry) => !isCovering(entry)).map((entry) => entryOutline(frame, entry)),
   }));
   for (const { report, rings } of onSheet) fillBand(sheet, rings, bandOf(report));
   const wallWidth = Math.max(storey.wall_thickness_m * frame.scale.pointsPerMetre, THINNEST_WALL);

@@ -1,6 +1,6 @@
+import { isCovering } from '@embertally/shared/survey/derive/is-covering';
 import type { Entry } from '@embertally/shared/survey/survey-document';
 import { footprint, type Footprint } from '@embertally/shared/geometry/footprint';
-import { isCovering } from './is-covering.ts';
 import { at, CASING_PX, SANS, traceRing, type Pen } from './pen.ts';
 
 const LABEL_PX = 12;

@@ -1,3 +1,4 @@
+import { isCovering } from '@embertally/shared/survey/derive/is-covering';
 import { applyChanges } from '@embertally/shared/survey/apply-changes';
 import { entriesOfRoom } from '@embertally/shared/survey/derive/entries-of-room';
 import { formatQuantity } from '@embertally/shared/units/format-quantity';
@@ -9,16 +10,14 @@ import { useBook } from '../session/use-book.ts';
 import { useBookSession } from '../session/use-book-session.ts';
 import { loadBand } from '@embertally/shared/tally/density-band';
 import { EntryTiles } from './entry-tiles.ts';
-import { isCovering } from './is-covering.ts';
 import { paintOpenings } from './paint-openings.ts';
-import { FIGURE_FONT, NAME_FONT, paintPlates } from './paint-plates.ts';
+import { PLATE_FONTS, paintPlates } from './paint-plates.ts';
 import { paintRooms } from './paint-rooms.ts';
 import { paintWalls, wallWidth_px } from './paint-walls.ts';
 import { Painting } from './painting.tsx';
 import type { Palette } from './palette.ts';
 import type { Pen } from './pen.ts';
-import { RoomPlates, type PlateText } from './room-plates.ts';
-import { useFontsReady } from './use-fonts-ready.ts';
+import type { PlateAsked, PlateText, RoomPlates } from './room-plates.ts';
 import { useSettled } from './use-settled.ts';
 import { worstStanding } from './worst-standing.ts';
 
@@ -29,10 +28,11 @@ interface PlanLayerProps {
   readonly stage: Stage;
   readonly host: PlanHost;
   readonly palette: Palette;
+  readonly plates: RoomPlates;
 }
 
 /** Rooms, contents, walls, openings and plates of the storey in view. */
-export function PlanLayer({ stage, host, palette }: PlanLayerProps) {
+export function PlanLayer({ stage, host, palette, plates }: PlanLayerProps) {
   const session = useBookSession();
   const document = useBook((state) => state.document);
   const storeyId = useBook((state) => state.storeyId);
@@ -50,9 +50,6 @@ export function PlanLayer({ stage, host, palette }: PlanLayerProps) {
     [document, changes],
   );
   const [tiles] = useState(() => new EntryTiles());
-  const fontsReady = useFontsReady();
-  // What was measured with another font is forgotten with its plates.
-  const plates = useMemo(() => new RoomPlates(fontsReady), [fontsReady]);
   const sharp = useSettled(camera.pxPerM, SHARP_AFTER_MS);
   const scene = storeyId === null ? null : sceneOf(shown, storeyId);
 
@@ -74,29 +71,18 @@ export function PlanLayer({ stage, host, palette }: PlanLayerProps) {
     tiles.paint(pen, scene.entries, hidden, sharp);
     paintWalls(pen, scene.rooms, thickness);
     paintOpenings(pen, scene.openings, thickness);
-    const measure = (words: string, of: 'name' | 'figure') => {
-      pen.context.font = of === 'name' ? NAME_FONT : FIGURE_FONT;
+    const measure: PlateAsked['measure'] = (words, of, size) => {
+      pen.context.font = PLATE_FONTS[size][of];
       return pen.context.measureText(words).width;
     };
     const width = wallWidth_px(pen, thickness);
-    paintPlates(
-      pen,
-      scene.rooms.flatMap((shape) => {
-        const { id, name } = shape.room;
-        const entries = entriesOfRoom(shown, id).filter((entry) => !isCovering(entry));
-        return (
-          plates.place({
-            shape,
-            entries,
-            text: textOf(id, name),
-            pxPerM: camera.pxPerM,
-            wallWidth_px: width,
-            settled: sharp,
-            measure,
-          }) ?? []
-        );
-      }),
-    );
+    const asked = scene.rooms.map((shape) => {
+      const { id, name } = shape.room;
+      const entries = entriesOfRoom(shown, id).filter((entry) => !isCovering(entry));
+      const text = textOf(id, name);
+      return { shape, entries, text, pxPerM: camera.pxPerM, wallWidth_px: width, settled: sharp, measure };
+    });
+    paintPlates(pen, plates.place(asked));
   };
 
   return <Painting stage={stage} camera={camera} view={view} palette={palette} paint={paint} />;

@@ -1,4 +1,4 @@
-import type { Entry } from '@embertally/shared/survey/survey-document';
+import type { Entry } from '../survey-document.ts';
 
 /** Thinner than this an entry is a covering of the floor, not a thing that stands on it, m. */
 const COVERING_M = 0.05;
