@@ -192,7 +192,10 @@ describe('roles on a site', () => {
       first.visitor.delete(`${roles}/${other}`),
       second.visitor.delete(`${roles}/${own}`),
     ]);
-    expect(answers.map((answer) => answer.status).sort()).toEqual([204, 409]);
+    const [through, kept] = answers.map((answer) => answer.status).sort();
+    expect(through).toBe(204);
+    // Whoever comes second is the last manager, or, when their own role went before they were let in, a stranger.
+    expect([404, 409]).toContain(kept);
   });
 
   it('of another site cannot be taken through this one', async () => {
