@@ -225,7 +225,11 @@ function capOf(factor: number): number {
   return factor > 0 ? OPENINGS_KW * factor : Infinity;
 }
 
-function timeOfHeat({ heats, points, heat }: RoomClock, wanted: number): number | null {
+/** Sums of heat that differ by no more than this share are the same. */
+const ROUNDING = 1e-9;
+
+function timeOfHeat({ heats, points, heat }: RoomClock, half: number): number | null {
+  const wanted = half * (1 - ROUNDING);
   if (!(wanted > 0) || heat < wanted) return null;
   const at = heats.findIndex((value) => value >= wanted);
   const [before, after] = [heats[at - 1] ?? 0, heats[at]!];

@@ -1,0 +1,75 @@
+import { en1991, recalled } from '../methods/sources.ts';
+import type { MethodSource } from '../methods/working.ts';
+
+const SOURCES: readonly MethodSource[] = [
+  en1991('E.4: growth, plateau and decay of each entry; the curve is extended where the air does not suffice'),
+  {
+    title: 'Fleury, Evaluation of thermal radiation models for fire spread between objects, University of Canterbury',
+    edition: '2010',
+    locator: 'abstract: the point source did best on average and was most robust',
+  },
+  {
+    title: 'Babrauskas, Will the second item ignite?, NBSIR 81-2271',
+    edition: '1981',
+    locator: 'abstract: flux of the first item against the ignitability of the second',
+  },
+  recalled('Smith & Green; Shields, Silcock & Murray', 'flux-time product, n = 1 thin, n = 2 thick', '1987, 1994'),
+  recalled('Quintiere & Harkleroad, New concepts for measuring flame spread properties', 'critical fluxes', '1984'),
+  recalled('Heskestad, Luminous heights of turbulent diffusion flames', 'L = 0.235 Q^0.4 − 1.02 D', '1983'),
+  recalled('McCaffrey, Quintiere & Harkleroad', 'hot layer', '1981'),
+  recalled('SFPE Handbook of Fire Protection Engineering', 'point source: above 5 kW/m2, safety factor 2'),
+];
+
+/** Which entry ignites which: what the model is made of, for screens, prints and workings. */
+export const SPREAD_METHOD = {
+  id: 'spread.simulation',
+  version: 1,
+  ref: 'spread.simulation@1',
+  title: 'Which entry ignites which',
+  equation:
+    'q_j = k_f Σ min(120; χ_r Q_i G_ij) + q_L;  Σ (q_j − q_cr)ⁿ Δt ≥ dose;  G = (1/N) Σ 1/(4πR²);  q_L = σ[(T_0 + ΔT)⁴ − T_0⁴]',
+  why: 'Among simple radiation models the point source came nearest to measured fluxes; cells keep long items right.',
+  sources: SOURCES,
+  assumptions: [
+    'Each entry burns by its own curve: t-squared growth to its peak, linear decay from 70 % of its heat.',
+    'A burning entry radiates a fixed share of its heat from 1 to 10 cells along its longer side; the target faces it at mid-flame height.',
+    'An entry lights when the flux above its critical value, to the power 1 or 2, has summed up to its dose; a dose does not fade.',
+    'What stands above a burning entry is heated from the middle of the flame and lights at once when the flame reaches it.',
+    'The hot layer heats everything alike, seen in full; it counts while its linings are known and the room is not large.',
+    'The openings feed 1500 kW per m5/2; above that every curve is stretched and no heat is lost.',
+    'At flashover everything that is not sealed lights, at least ultra-fast, and glass that would break is broken.',
+    'A closed cabinet lights at flashover only. A sealed and rated container never does.',
+    'A measured curve keeps its rates and is stretched in time to hold the entry’s heat.',
+    'Fluxes are taken in the middle of steps of one second, for four hours at most.',
+  ],
+  limits: [
+    'One room; nothing passes to the next.',
+    'No shading, no draught.',
+    'No flame spread over an item, over floor or linings.',
+    'Nothing falls, melts or runs.',
+    'No smouldering, no suppression.',
+    'Nearer than 2.5 diameters the point source leaves its tested range; such events are marked.',
+    'Times are right to a factor of two at best.',
+  ],
+} as const;
+
+/** For gaps: what they mean and what they leave out, beside the limits above. */
+export const GAP_METHOD = {
+  id: 'spread.gap',
+  version: 1,
+  ref: 'spread.gap@1',
+  title: 'Gap that would keep one entry from lighting another',
+  equation:
+    'gap at which Σ (k_f min(120; χ_r Q G) + q_L − q_cr)ⁿ Δt = dose;  long exposure: k_f χ_r Q_p G + q_L = q_cr',
+  why: 'A distance is asked for one pair; with three entries a larger gap can even light the third one sooner.',
+  sources: SOURCES,
+  assumptions: [
+    'Only the first entry burns; the second is moved straight away from it along the line of centres.',
+    'Enough: the same with twice the radiation. Long exposure: the peak held for ever, under the hottest layer of that fire.',
+    'When a smaller gap also does not light it, the gap is 0.',
+  ],
+  limits: [
+    'A gap on paper is no barrier: things fall, are moved and are put in between.',
+    'No gap helps where the hot layer alone lights the entry or the first entry alone brings flashover.',
+  ],
+} as const;
