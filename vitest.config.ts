@@ -10,6 +10,7 @@ export default defineConfig({
           include: ['tests/shared/**/*.test.ts', 'tests/reference/**/*.test.ts', 'tests/*.test.ts'],
           exclude: ['tests/reference/real-rooms.test.ts'],
           environment: 'node',
+          setupFiles: ['./tests/support/property-seed.ts'],
         },
       },
       {
@@ -17,7 +18,7 @@ export default defineConfig({
           name: 'web',
           include: ['tests/web/**/*.test.{ts,tsx}'],
           environment: 'jsdom',
-          setupFiles: ['./tests/support/web-setup.ts'],
+          setupFiles: ['./tests/support/web-setup.ts', './tests/support/property-seed.ts'],
         },
       },
       {
@@ -27,6 +28,7 @@ export default defineConfig({
           globalSetup: ['./tests/support/global-setup.ts'],
           include: ['tests/api/**/*.test.ts', 'tests/reference/real-rooms.test.ts'],
           environment: 'node',
+          setupFiles: ['./tests/support/property-seed.ts'],
           testTimeout: 30_000,
           hookTimeout: 60_000,
         },
