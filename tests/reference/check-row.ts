@@ -15,7 +15,12 @@ export function rowTitle({ id, method, origin, source, fromMemory }: ReferenceRo
   return `${id}: ${method} (${origin}: ${source}${fromMemory ? '; value from memory' : ''})`;
 }
 
-export function expectOutput(actual: unknown, expected: number | boolean | null, tolerance: Tolerance, name: string) {
+export function expectOutput(
+  actual: unknown,
+  expected: number | string | boolean | null,
+  tolerance: Tolerance,
+  name: string,
+) {
   if (typeof expected !== 'number') {
     expect(actual, name).toBe(expected);
     return;

@@ -7,7 +7,7 @@ export interface ReferenceRow {
   readonly method: string;
   readonly inputs: Readonly<Record<string, number | string | readonly number[]>>;
   /** By output name; `value` for a method of one result. */
-  readonly expected: Readonly<Record<string, number | boolean | null>>;
+  readonly expected: Readonly<Record<string, number | string | boolean | null>>;
   readonly tolerance: Tolerance;
   /** Printed in the source; computed by another implementation or by hand; or true of every right implementation. */
   readonly origin: 'published' | 'independent' | 'invariant';

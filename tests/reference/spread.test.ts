@@ -15,7 +15,9 @@ import { spreadGaps } from '@embertally/shared/spread/spread-gaps';
 import type { SpreadEntry } from '@embertally/shared/spread/spread-entry';
 import type { SpreadRoom } from '@embertally/shared/spread/spread-room';
 import { areaOf, HALL, spreadCase, spreadEntry } from '../support/spread-samples.ts';
-import { ROW_RADIATIVE_FRACTION, SPREAD_ROWS, type SpreadRow, type SpreadRowRoom } from './rows/spread-rows.ts';
+import { SPREAD_ROWS, type SpreadRow, type SpreadRowRoom } from './rows/spread-rows.ts';
+
+const ROW_RADIATIVE_FRACTION = 0.35;
 
 function entriesOf(row: SpreadRow): SpreadEntry[] {
   return row.entries.map(({ id, at, size, E, peak, growth, lights, enclosure, base_m, height_m }) =>

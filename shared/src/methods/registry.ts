@@ -57,6 +57,31 @@ import { parametricCurve } from './burnout/parametric-curve.ts';
 import { smallRoomWeight } from './burnout/small-room-weight.ts';
 import { thermalInertia } from './burnout/thermal-inertia.ts';
 import { ventilationWeight } from './burnout/ventilation-weight.ts';
+import { basisDetector } from './chemistry/basis-detector.ts';
+import { boie } from './chemistry/boie.ts';
+import { channiwalaParikh } from './chemistry/channiwala-parikh.ts';
+import { combustionEfficiency } from './chemistry/combustion-efficiency.ts';
+import { completeCombustion } from './chemistry/complete-combustion.ts';
+import { gasMoles } from './chemistry/gas-moles.ts';
+import { heatFromEquation } from './chemistry/heat-from-equation.ts';
+import { heatFromFormation } from './chemistry/heat-from-formation.ts';
+import { netOfFormula } from './chemistry/net-of-formula.ts';
+import { oxygenDemand } from './chemistry/oxygen-demand.ts';
+import { substanceMass } from './chemistry/substance-mass.ts';
+import { thornton } from './chemistry/thornton.ts';
+import { airBuoyancy } from './calorimetry/air-buoyancy.ts';
+import { bombAcceptance } from './calorimetry/bomb-acceptance.ts';
+import { bombCalibration } from './calorimetry/bomb-calibration.ts';
+import { bombGross } from './calorimetry/bomb-gross.ts';
+import { calibrationMean } from './calorimetry/calibration-mean.ts';
+import { constantPressure, constantVolume } from './calorimetry/constant-pressure.ts';
+import { effectiveHeat } from './calorimetry/effective-heat.ts';
+import { netFromCondensate } from './calorimetry/net-from-condensate.ts';
+import { orificeConstant } from './calorimetry/orifice-constant.ts';
+import { oxygenCarbon } from './calorimetry/oxygen-carbon.ts';
+import { oxygenConsumption } from './calorimetry/oxygen-consumption.ts';
+import { waterEfficiency } from './calorimetry/water-efficiency.ts';
+import { waterHeat } from './calorimetry/water-heat.ts';
 import type { MethodSummary } from './define-method.ts';
 
 /** A method whose inputs and result are known only when it runs. */
@@ -128,6 +153,32 @@ export const METHODS: readonly AnyMethod[] = [
   smallRoomWeight,
   thermalInertia,
   ventilationWeight,
+  basisDetector,
+  boie,
+  channiwalaParikh,
+  combustionEfficiency,
+  completeCombustion,
+  gasMoles,
+  heatFromEquation,
+  heatFromFormation,
+  netOfFormula,
+  oxygenDemand,
+  substanceMass,
+  thornton,
+  airBuoyancy,
+  bombAcceptance,
+  bombCalibration,
+  bombGross,
+  calibrationMean,
+  constantPressure,
+  constantVolume,
+  effectiveHeat,
+  netFromCondensate,
+  orificeConstant,
+  oxygenCarbon,
+  oxygenConsumption,
+  waterEfficiency,
+  waterHeat,
 ];
 
 const byRef = new Map(METHODS.map((method) => [method.ref, method]));

@@ -1,6 +1,6 @@
 import type { IgnitionClass } from '@embertally/shared/spread/ignition-class';
 
-/** A room of a row: `null` is a hall without hot layer, flashover or a cap that is reached. */
+/** A rectangular room with one door. */
 export interface SpreadRowRoom {
   readonly width_m: number;
   readonly depth_m: number;
@@ -28,9 +28,11 @@ export interface SpreadRowEntry {
   readonly height_m?: number;
 }
 
-/** One fire worked out outside this book. Times within 1 s unless the row says otherwise. */
+/** One fire worked out outside this book, radiative fraction 0.35 throughout. Times within 1 s unless the row says otherwise. */
 export interface SpreadRow {
   readonly id: string;
+  readonly method: 'spread.simulation';
+  /** null: a hall without hot layer, flashover or a cap that is reached */
   readonly room: SpreadRowRoom | null;
   readonly first: string;
   readonly entries: readonly SpreadRowEntry[];
@@ -66,10 +68,8 @@ const PLASTER_ROOM: SpreadRowRoom = {
   exposure_s: 600,
 };
 
-/** Radiative fraction of every row. */
-export const ROW_RADIATIVE_FRACTION = 0.35;
-
 const CHAIN = {
+  method: 'spread.simulation',
   room: null,
   first: 'A',
   tolerance_s: 2,
@@ -91,6 +91,7 @@ const CHAIN_B = { id: 'B', size: [0.6, 0.6], E: 40, peak: 300, growth: 'ultra-fa
 export const SPREAD_ROWS: readonly SpreadRow[] = [
   {
     id: 'S2-pair-ignites',
+    method: 'spread.simulation',
     room: null,
     first: 'A',
     entries: [
@@ -110,6 +111,7 @@ export const SPREAD_ROWS: readonly SpreadRow[] = [
   },
   {
     id: 'S3-too-far-no-ignition',
+    method: 'spread.simulation',
     room: null,
     first: 'A',
     entries: [
@@ -128,6 +130,7 @@ export const SPREAD_ROWS: readonly SpreadRow[] = [
   },
   {
     id: 'S4-too-short-no-ignition',
+    method: 'spread.simulation',
     room: null,
     first: 'A',
     entries: [
@@ -147,6 +150,7 @@ export const SPREAD_ROWS: readonly SpreadRow[] = [
   },
   {
     id: 'S5-hot-layer-easy-yes-normal-no',
+    method: 'spread.simulation',
     room: PLASTER_ROOM,
     first: 'A',
     entries: [
@@ -167,6 +171,7 @@ export const SPREAD_ROWS: readonly SpreadRow[] = [
   },
   {
     id: 'S6-chain-to-flashover',
+    method: 'spread.simulation',
     room: PLASTER_ROOM,
     first: 'A',
     entries: [
@@ -208,6 +213,7 @@ export const SPREAD_ROWS: readonly SpreadRow[] = [
   },
   {
     id: 'S7-openings-cap',
+    method: 'spread.simulation',
     room: PLASTER_ROOM,
     first: 'X0',
     entries: [0, 1, 2, 3].map((k) => ({
@@ -232,6 +238,7 @@ export const SPREAD_ROWS: readonly SpreadRow[] = [
   },
   {
     id: 'S8-long-source-needs-cells',
+    method: 'spread.simulation',
     room: null,
     first: 'S',
     entries: [
@@ -244,6 +251,7 @@ export const SPREAD_ROWS: readonly SpreadRow[] = [
   },
   {
     id: 'S9-flame-reaches-overhead',
+    method: 'spread.simulation',
     room: null,
     first: 'P',
     entries: [

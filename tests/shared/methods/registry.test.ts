@@ -4,6 +4,8 @@ import { fileURLToPath } from 'node:url';
 import { describe, expect, it } from 'vitest';
 import { methodByRef, METHODS } from '@embertally/shared/methods/registry';
 import { BURNOUT_ROWS } from '../../reference/rows/burnout-rows.ts';
+import { CALORIMETRY_ROWS } from '../../reference/rows/calorimetry-rows.ts';
+import { CHEMISTRY_ROWS } from '../../reference/rows/chemistry-rows.ts';
 import { GROWTH_ROWS } from '../../reference/rows/growth-rows.ts';
 import { HEAT_ROWS } from '../../reference/rows/heat-rows.ts';
 import { LOAD_ROWS } from '../../reference/rows/load-rows.ts';
@@ -13,6 +15,8 @@ import { UNCERTAINTY_ROWS } from '../../reference/rows/uncertainty-rows.ts';
 
 const rows = [
   ...BURNOUT_ROWS,
+  ...CALORIMETRY_ROWS,
+  ...CHEMISTRY_ROWS,
   ...GROWTH_ROWS,
   ...HEAT_ROWS,
   ...LOAD_ROWS,
