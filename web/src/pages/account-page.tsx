@@ -10,6 +10,7 @@ import { currentSessionQuery } from '../features/session/api/current-session.ts'
 import { signOut } from '../features/session/api/sign-out.ts';
 import { MeForm } from '../features/session/me-form.tsx';
 import { ThemeChoice } from '../features/session/theme-choice.tsx';
+import { dateWords } from '../lib/date-words.ts';
 import { paths } from '../lib/paths.ts';
 
 export function AccountPage() {
@@ -43,7 +44,6 @@ export function AccountPage() {
       </Page>
     );
   }
-  const until = new Intl.DateTimeFormat(undefined, { dateStyle: 'full', timeStyle: 'short' });
   return (
     <Page
       title="Account"
@@ -57,7 +57,7 @@ export function AccountPage() {
           </Part>
           <Part title="Session">
             <p className="py-4">
-              If the book is not used before then, this session ends on {until.format(new Date(me.session.expires_at))}.
+              If the book is not used before then, this session ends on {dateWords(me.session.expires_at, 'moment')}.
             </p>
             <Button onClick={() => void signOut(client).then(() => navigate(paths.signIn(), { replace: true }))}>
               Sign out

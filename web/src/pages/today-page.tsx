@@ -10,13 +10,14 @@ import { currentSessionQuery } from '../features/session/api/current-session.ts'
 import { sitesQuery } from '../features/sites/api/sites.ts';
 import { RecentBooks } from '../features/sites/recent-books.tsx';
 import { WaitingList } from '../features/sites/waiting-list.tsx';
+import { dateWords } from '../lib/date-words.ts';
 import { paths } from '../lib/paths.ts';
 
 export function TodayPage() {
   const sites = useInfiniteQuery(sitesQuery(''));
   const me = useQuery(currentSessionQuery()).data;
   const acting = me?.members.find((member) => member.id === me.member_id);
-  const today = new Intl.DateTimeFormat(undefined, { dateStyle: 'full' }).format(new Date());
+  const today = dateWords(new Date().toISOString(), 'weekday');
   const lead = acting === undefined ? today : `${today} · ${me?.person.name ?? ''}, ${acting.organisation_name}`;
 
   if (sites.isPending) {

@@ -1,4 +1,5 @@
 import type { Clash } from '@embertally/shared/survey/change';
+import { dateWords } from '../../lib/date-words.ts';
 import { clashValue } from './clash-value.ts';
 
 /** Both sides of a clash, field by field: what it was, what they made of it and when, what this person made of it. */
@@ -34,9 +35,6 @@ export function ClashTable({ clashes }: { readonly clashes: readonly Clash[] }) 
 }
 
 function whoAndWhen({ by, at }: Clash): string {
-  const when =
-    at === null
-      ? ''
-      : new Intl.DateTimeFormat('en-GB', { dateStyle: 'medium', timeStyle: 'short' }).format(new Date(at));
+  const when = at === null ? '' : dateWords(at, 'moment');
   return [by, when].filter((part) => part !== null && part !== '').join(', ');
 }

@@ -4,10 +4,11 @@ import { Quantity } from '../../components/quantity.tsx';
 import { Skeleton } from '../../components/skeleton.tsx';
 import { StandingMark } from '../../components/standing-mark.tsx';
 import { Table, type Column } from '../../components/table.tsx';
+import { dateWords } from '../../lib/date-words.ts';
+import { LIMIT_QUANTITIES, LIMIT_SOURCES } from '../../lib/limit-words.ts';
 import { roomSummariesQuery } from '../../lib/room-summaries.ts';
 import { limitsQuery } from './api/limits.ts';
 import { limitRows, type LimitRow } from './limit-rows.ts';
-import { LIMIT_QUANTITIES, LIMIT_SOURCES } from '../../lib/limit-words.ts';
 
 interface BuildingLimitsProps {
   readonly buildingId: string;
@@ -57,7 +58,7 @@ const COLUMNS: readonly Column<LimitRow>[] = [
       <>
         {row.limit.set_by}
         <span className="block text-small text-soft">
-          {LIMIT_SOURCES[row.limit.source]}, since {row.limit.since}
+          {LIMIT_SOURCES[row.limit.source]}, since {dateWords(row.limit.since, 'day')}
         </span>
       </>
     ),

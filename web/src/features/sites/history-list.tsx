@@ -3,6 +3,7 @@ import { useInfiniteQuery } from '@tanstack/react-query';
 import { Button } from '../../components/button.tsx';
 import { LoadFailed } from '../../components/load-failed.tsx';
 import { Skeleton } from '../../components/skeleton.tsx';
+import { dateWords } from '../../lib/date-words.ts';
 import { useUnits } from '../../lib/units-context.ts';
 import { siteHistoryQuery } from './api/site-history.ts';
 import { historySentence } from './history-sentence.ts';
@@ -37,7 +38,6 @@ export function HistoryList({ siteId, timeZone, people }: HistoryListProps) {
     units,
     memberName: (id: string) => people.find((person) => person.member_id === id)?.name,
   };
-  const time = new Intl.DateTimeFormat(undefined, { dateStyle: 'medium', timeStyle: 'short', timeZone });
   return (
     <>
       <ol>
@@ -46,7 +46,7 @@ export function HistoryList({ siteId, timeZone, people }: HistoryListProps) {
             <p>{historySentence(event, reader)}</p>
             <p className="text-small text-soft">
               {event.by === null ? '' : `${event.by.organisation_name} · `}
-              <time dateTime={event.at}>{time.format(new Date(event.at))}</time>
+              <time dateTime={event.at}>{dateWords(event.at, 'moment', timeZone)}</time>
             </p>
           </li>
         ))}

@@ -3,6 +3,7 @@ import { useQueries } from '@tanstack/react-query';
 import { Link } from 'react-router-dom';
 import { LoadFailed } from '../../components/load-failed.tsx';
 import { Skeleton } from '../../components/skeleton.tsx';
+import { dateWords } from '../../lib/date-words.ts';
 import { paths } from '../../lib/paths.ts';
 import { siteQuery } from './api/site.ts';
 
@@ -50,8 +51,6 @@ export function RecentBooks({ sites }: RecentBooksProps) {
   );
 }
 
-const DAY = new Intl.DateTimeFormat(undefined, { dateStyle: 'medium' });
-
 function BookLine({ building, site }: { readonly building: BuildingSummary; readonly site: string }) {
   return (
     <li className="flex flex-wrap items-baseline justify-between gap-x-6 border-b border-rule py-3.5">
@@ -62,7 +61,7 @@ function BookLine({ building, site }: { readonly building: BuildingSummary; read
         <p className="text-small text-soft">{site}</p>
       </div>
       <p className="text-small text-soft">
-        changed <time dateTime={building.updated_at}>{DAY.format(new Date(building.updated_at))}</time>
+        changed <time dateTime={building.updated_at}>{dateWords(building.updated_at, 'day')}</time>
       </p>
     </li>
   );

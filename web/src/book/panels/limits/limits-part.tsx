@@ -11,6 +11,7 @@ import { Quantity } from '../../../components/quantity.tsx';
 import { StandingMark } from '../../../components/standing-mark.tsx';
 import { type Column, Table } from '../../../components/table.tsx';
 import { call } from '../../../lib/api-client.ts';
+import { dateWords } from '../../../lib/date-words.ts';
 import { useBook } from '../../session/use-book.ts';
 import { useBookSession } from '../../session/use-book-session.ts';
 import { useRoomTally } from '../../session/use-room-tally.ts';
@@ -18,8 +19,6 @@ import { LimitForm } from './limit-form.tsx';
 import { limitFailure, type LimitFailure } from './limit-failure.ts';
 import { maySetLimit } from './may-set-limit.ts';
 import { readLimits } from './read-limits.ts';
-
-const day = new Intl.DateTimeFormat('en-GB', { day: 'numeric', month: 'long', year: 'numeric', timeZone: 'UTC' });
 
 interface Row {
   readonly limit: Limit;
@@ -86,7 +85,7 @@ export function LimitsPart() {
       cell: ({ limit }) => (
         <>
           {limitSourceNames[limit.source]}: {limit.set_by}
-          <span className="block text-soft">since {day.format(new Date(`${limit.since}T00:00:00Z`))}</span>
+          <span className="block text-soft">since {dateWords(limit.since, 'day')}</span>
         </>
       ),
     },
