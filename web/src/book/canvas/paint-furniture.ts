@@ -1,10 +1,10 @@
 import { paintText } from './paint-text.ts';
-import { FIGURES, SANS, type Pen } from './pen.ts';
+import { SANS, type Pen } from './pen.ts';
 
 const NICE_M = [0.1, 0.2, 0.5, 1, 2, 5, 10, 20, 50, 100, 200, 500];
 const LONGEST_PX = 170;
 const MARGIN_PX = 24;
-const FONT = `13px ${FIGURES}`;
+const FONT = `13px ${SANS}`;
 
 /** The scale bar at the lower right and, where north is known, its arrow at the upper right. */
 export function paintFurniture(pen: Pen, north_deg: number | null, lengthText: (length_m: number) => string): void {

@@ -5,8 +5,9 @@ import type { SurveyDocument } from '@embertally/shared/survey/survey-document';
 import { handlesOf } from '../interaction/handles.ts';
 import { sceneOf } from '../interaction/scene.ts';
 import type { Selected } from '../session/book-state.ts';
-import { paintLength } from './paint-text.ts';
-import { at, CASING_PX, FIGURES, traceLine, traceRing, type Pen } from './pen.ts';
+import { lengthPlace, paintText, type LengthPlace } from './paint-text.ts';
+import type { RoomPlate } from './room-plates.ts';
+import { at, CASING_PX, SANS, traceLine, traceRing, type Pen } from './pen.ts';
 
 export interface SelectionLook {
   readonly document: SurveyDocument;
@@ -17,10 +18,13 @@ export interface SelectionLook {
   readonly canEdit: boolean;
   /** The room whose tally is read: a line around it ties the two pages together. */
   readonly roomInHand: string | null;
+  /** Lengths stand clear of them. */
+  readonly plates: readonly RoomPlate[];
 }
 
-const FONT = `13px ${FIGURES}`;
+const FONT = `13px ${SANS}`;
 const LENGTH_AWAY_PX = 16;
+const LENGTH_HEIGHT_PX = 16;
 
 /** What is picked, in indigo: outline, handles and lengths. */
 export function paintSelection(pen: Pen, look: SelectionLook): void {
@@ -44,7 +48,15 @@ export function paintSelection(pen: Pen, look: SelectionLook): void {
           traceRing(pen, shape.ring);
           for (const hole of shape.holes) traceRing(pen, hole);
         });
-        paintRingLengths(pen, shape.ring, look.lengthText);
+        for (const [a, b] of outsideEdges(shape.ring))
+          clearLength(
+            pen,
+            [
+              [a, b],
+              [b, a],
+            ],
+            look,
+          );
         if (look.canEdit) for (const corner of shape.ring) paintHandle(pen, corner, 'round');
         break;
       }
@@ -80,7 +92,10 @@ export function paintSelection(pen: Pen, look: SelectionLook): void {
           traceRing(pen, ring);
         });
         if (look.selection.length > 1) break;
-        paintRingLengths(pen, ring.slice(0, 3), look.lengthText, 2);
+        const [first, second, third, fourth] = outsideEdges(ring);
+        if (first === undefined || second === undefined || third === undefined || fourth === undefined) break;
+        clearLength(pen, [first, third], look);
+        clearLength(pen, [second, fourth], look);
         if (!look.canEdit) break;
         for (const handle of handlesOf(entry, pen.camera.pxPerM))
           paintHandle(pen, handle.at, handle.action === 'turn' ? 'knob' : 'square');
@@ -103,24 +118,48 @@ function outline(pen: Pen, trace: () => void, width = 3): void {
   context.stroke();
 }
 
-/** Lengths stand outside the ring, whichever way round it runs. */
-function paintRingLengths(
-  pen: Pen,
-  ring: readonly Point[],
-  lengthText: SelectionLook['lengthText'],
-  edges = ring.length,
-): void {
+type Edge = readonly [Point, Point];
+
+/** The edges of a ring, each turned so that what stands on its left stands outside, whichever way round the ring runs. */
+function outsideEdges(ring: readonly Point[]): readonly Edge[] {
   const anticlockwise = signedArea(ring) > 0;
-  for (const [index, a] of ring.slice(0, edges).entries()) {
+  return ring.map((a, index) => {
     const b = ring[(index + 1) % ring.length] ?? a;
-    if (anticlockwise) lengthBeside(pen, b, a, lengthText);
-    else lengthBeside(pen, a, b, lengthText);
-  }
+    return anticlockwise ? [b, a] : [a, b];
+  });
+}
+
+/** A length at the first of its edges where it stands clear of every plate; at the first edge when none is clear. */
+function clearLength(pen: Pen, edges: readonly Edge[], look: SelectionLook): void {
+  const [first] = edges;
+  if (first === undefined) return;
+  const words = look.lengthText(lengthOf(first));
+  pen.context.font = FONT;
+  const width = pen.context.measureText(words).width;
+  const places = edges.flatMap(([a, b]) => lengthPlace(at(pen, a), at(pen, b), LENGTH_AWAY_PX) ?? []);
+  const place =
+    places.find((candidate) => !look.plates.some((plate) => meets(pen, candidate, width, plate))) ?? places[0];
+  if (place !== undefined) paintText(pen, words, place.at, FONT, pen.palette.indigo, place.angle);
+}
+
+/** Whether words of this width would touch a plate. */
+function meets(pen: Pen, { at: middle, angle }: LengthPlace, width: number, plate: RoomPlate): boolean {
+  const centre = at(pen, plate.centre);
+  const across = Math.abs(Math.cos(angle)) * width + Math.abs(Math.sin(angle)) * LENGTH_HEIGHT_PX;
+  const down = Math.abs(Math.sin(angle)) * width + Math.abs(Math.cos(angle)) * LENGTH_HEIGHT_PX;
+  return (
+    Math.abs(middle.x - centre.x) < (across + plate.width_px) / 2 &&
+    Math.abs(middle.y - centre.y) < (down + plate.height_px) / 2
+  );
+}
+
+function lengthOf([a, b]: Edge): number {
+  return Math.hypot(b.x_m - a.x_m, b.y_m - a.y_m);
 }
 
 export function lengthBeside(pen: Pen, a: Point, b: Point, lengthText: SelectionLook['lengthText']): void {
-  const length_m = Math.hypot(b.x_m - a.x_m, b.y_m - a.y_m);
-  paintLength(pen, lengthText(length_m), at(pen, a), at(pen, b), FONT, pen.palette.indigo, LENGTH_AWAY_PX);
+  const place = lengthPlace(at(pen, a), at(pen, b), LENGTH_AWAY_PX);
+  if (place !== null) paintText(pen, lengthText(lengthOf([a, b])), place.at, FONT, pen.palette.indigo, place.angle);
 }
 
 export function paintHandle(pen: Pen, point: Point, look: 'round' | 'square' | 'knob' | 'filled'): void {

@@ -19,22 +19,20 @@ export function paintText(pen: Pen, words: string, at: ViewPoint, font: string, 
   context.restore();
 }
 
-/** Words beside the middle of a line, on its left seen from a to b, never upside down. */
-export function paintLength(
-  pen: Pen,
-  words: string,
-  a: ViewPoint,
-  b: ViewPoint,
-  font: string,
-  colour: string,
-  away_px: number,
-): void {
+export interface LengthPlace {
+  readonly at: ViewPoint;
+  /** Radians; never upside down. */
+  readonly angle: number;
+}
+
+/** Where the length of a line stands: beside its middle, on its left seen from a to b. Null for a line too short for it. */
+export function lengthPlace(a: ViewPoint, b: ViewPoint, away_px: number): LengthPlace | null {
   const dx = b.x - a.x;
   const dy = b.y - a.y;
   const span = Math.hypot(dx, dy);
-  if (span < 24) return;
+  if (span < 24) return null;
   const at = { x: (a.x + b.x) / 2 + (dy / span) * away_px, y: (a.y + b.y) / 2 - (dx / span) * away_px };
   let angle = Math.atan2(dy, dx);
   if (angle > Math.PI / 2 + 0.01 || angle <= -Math.PI / 2 + 0.01) angle += Math.PI;
-  paintText(pen, words, at, font, colour, angle);
+  return { at, angle };
 }

@@ -1,5 +1,5 @@
 import { formatQuantity } from '@embertally/shared/units/format-quantity';
-import { useSyncExternalStore } from 'react';
+import { useMemo, useSyncExternalStore } from 'react';
 import type { Stage } from 'konva/lib/Stage';
 import type { PlanHost } from '../interaction/plan-host.ts';
 import { useBook } from '../session/use-book.ts';
@@ -11,6 +11,8 @@ import { paintSelection } from './paint-selection.ts';
 import { Painting } from './painting.tsx';
 import type { Palette } from './palette.ts';
 import { PlanLayer } from './plan-layer.tsx';
+import { RoomPlates } from './room-plates.ts';
+import { useFontsReady } from './use-fonts-ready.ts';
 import { usePalette } from './use-palette.ts';
 import { useStage } from './use-stage.ts';
 
@@ -19,13 +21,16 @@ export function PlanStage({ host }: { readonly host: PlanHost }) {
   const view = useBook((state) => state.view);
   const palette = usePalette();
   const { stage, mount } = useStage(view);
+  const fontsReady = useFontsReady();
+  // What was measured with another font is forgotten with its plates.
+  const plates = useMemo(() => new RoomPlates(fontsReady), [fontsReady]);
   return (
     <div ref={mount}>
       {stage === null ? null : (
         <>
           <Backdrop stage={stage} palette={palette} />
-          <PlanLayer stage={stage} host={host} palette={palette} />
-          <Active stage={stage} host={host} palette={palette} />
+          <PlanLayer stage={stage} host={host} palette={palette} plates={plates} />
+          <Active stage={stage} host={host} palette={palette} plates={plates} />
           <Overlay stage={stage} palette={palette} />
         </>
       )}
@@ -45,7 +50,12 @@ function Backdrop({ stage, palette }: LayerProps) {
 }
 
 /** What is picked and what a gesture would do. */
-function Active({ stage, host, palette }: LayerProps & { readonly host: PlanHost }) {
+function Active({
+  stage,
+  host,
+  palette,
+  plates,
+}: LayerProps & { readonly host: PlanHost; readonly plates: RoomPlates }) {
   const camera = useBook((state) => state.camera);
   const view = useBook((state) => state.view);
   const document = useBook((state) => state.document);
@@ -71,7 +81,7 @@ function Active({ stage, host, palette }: LayerProps & { readonly host: PlanHost
       palette={palette}
       paint={(pen) => {
         if (storeyId !== null && !busy)
-          paintSelection(pen, { document, storeyId, selection, lengthText, canEdit, roomInHand });
+          paintSelection(pen, { document, storeyId, selection, lengthText, canEdit, roomInHand, plates: plates.shown });
         paintPreview(pen, preview, { wallThickness_m, lengthText });
         if (crosshair !== null) paintCrosshair(pen, crosshair);
       }}

@@ -1,5 +1,5 @@
 import { useEffect, useState } from 'react';
-import { FIGURE_FONT, NAME_FONT } from './paint-plates.ts';
+import { PLATE_FONTS } from './paint-plates.ts';
 
 /** Whether the plan's fonts are here: words measured before are measured again with them. */
 export function useFontsReady(): boolean {
@@ -10,7 +10,7 @@ export function useFontsReady(): boolean {
       if (!left) setReady(true);
     };
     // A font that cannot be fetched leaves the system's; its words are measured as they are drawn.
-    Promise.all([NAME_FONT, FIGURE_FONT].map((font) => document.fonts.load(font))).then(done, done);
+    Promise.all(Object.values(PLATE_FONTS.usual).map((font) => document.fonts.load(font))).then(done, done);
     return () => {
       left = true;
     };
