@@ -37,7 +37,13 @@ export function PlanPage({ host }: { readonly host: PlanHost }) {
         <PlanVerbs actions={TABLE_ACTIONS} world={world} />
       </div>
       <PlanSurface host={host}>
-        <ToolOptions focusPlan={focusPlan} />
+        <ToolOptions
+          focusPlan={focusPlan}
+          leave={() => {
+            host.cancel();
+            focusPlan();
+          }}
+        />
         {empty ? <EmptyPlan world={world} /> : null}
         <SelectionStrip host={host} />
         <PlanMessage />

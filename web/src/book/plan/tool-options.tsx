@@ -1,4 +1,5 @@
-import { lazy, Suspense } from 'react';
+import { lazy, Suspense, useState } from 'react';
+import { TextField } from '../../components/text-field.tsx';
 import { useBook } from '../session/use-book.ts';
 import { OpeningKinds } from './opening-kinds.tsx';
 
@@ -11,8 +12,14 @@ const HINTS = {
   measure: 'Press twice, or drag. Nothing is changed.',
 } as const;
 
+interface ToolOptionsProps {
+  readonly focusPlan: () => void;
+  /** Puts the tool down. */
+  readonly leave: () => void;
+}
+
 /** What the tool in hand asks, in one line under the verbs. */
-export function ToolOptions({ focusPlan }: { readonly focusPlan: () => void }) {
+export function ToolOptions({ focusPlan, leave }: ToolOptionsProps) {
   const tool = useBook((state) => state.tool);
   switch (tool) {
     case 'select':
@@ -26,10 +33,15 @@ export function ToolOptions({ focusPlan }: { readonly focusPlan: () => void }) {
       );
     case 'contents':
       return (
-        <div className="tool-options">
-          <Suspense fallback={<p className="text-small text-soft">Opening the catalogue…</p>}>
-            <ContentsPicker onPicked={focusPlan} />
-          </Suspense>
+        <div
+          className="tool-options"
+          onKeyDownCapture={(event) => {
+            // The list of the picker closes first.
+            const listOpen = event.target instanceof Element && event.target.ariaExpanded === 'true';
+            if (event.key === 'Escape' && !listOpen) leave();
+          }}
+        >
+          <ContentsOptions focusPlan={focusPlan} />
         </div>
       );
     case 'draw-room':
@@ -40,4 +52,21 @@ export function ToolOptions({ focusPlan }: { readonly focusPlan: () => void }) {
         </div>
       );
   }
+}
+
+/** What is typed while the catalogue is on its way arrives in the picker, and is not taken for keys of the plan. */
+function ContentsOptions({ focusPlan }: { readonly focusPlan: () => void }) {
+  const [typed, setTyped] = useState('');
+  return (
+    <Suspense
+      fallback={
+        <div className="contents-picker">
+          <TextField label="Kind or material" autoFocus autoComplete="off" value={typed} onChange={setTyped} />
+          <p className="text-small text-soft">Opening the catalogue…</p>
+        </div>
+      }
+    >
+      <ContentsPicker typed={typed} onType={setTyped} onPicked={focusPlan} />
+    </Suspense>
+  );
 }

@@ -11,6 +11,7 @@ import { SelectField } from '../../../components/select-field.tsx';
 import { TextField } from '../../../components/text-field.tsx';
 import { type FieldErrors, useForm } from '../../../components/use-form.ts';
 import { useUnits } from '../../../lib/units-context.ts';
+import { catalogueItem } from '../../plan/catalogue-item.ts';
 import { readCount } from '../../plan/read-count.ts';
 import { withMass } from '../../plan/with-mass.ts';
 import { useBook } from '../../session/use-book.ts';
@@ -43,7 +44,6 @@ const START: Values = {
   evidence: 'counted',
 };
 const FIELDS = { label: 'what', count: 'count', parts: 'mass', mass_kg: 'mass', keeping: 'keeping' } as const;
-/** Enough to hold a piece of this mass; only where nothing better is known. */
 const NOWHERE = { id: '', room_id: '', x_m: 0, y_m: 0, recorded_by: null, recorded_at: null };
 
 /** Records an entry in the room in hand: something of the catalogue, or anything else with a heat of its own. */
@@ -178,14 +178,10 @@ export function AddEntryForm({ room }: { readonly room: Room }) {
               if (hit !== null && hit.row.label !== text && text === '') setHit(null);
               form.set('what', text);
             }}
-            items={hits.map((one) => ({
-              id: `${one.type} ${one.row.key}`,
-              label: one.row.label,
-              detail: one.type === 'kind' ? 'kind' : 'material',
-            }))}
+            items={hits.map(catalogueItem)}
             nothing="Nothing in the catalogue answers to that: give its heat below."
             onPick={(item) => {
-              const chosen = hits.find((one) => `${one.type} ${one.row.key}` === item.id);
+              const chosen = hits.find((one) => catalogueItem(one).id === item.id);
               if (chosen !== undefined) pick(chosen);
             }}
           />
