@@ -16,6 +16,8 @@ export interface Action {
   readonly keys: readonly string[];
   /** Where it stands in the list of keys. */
   readonly group: 'draw' | 'change' | 'look';
+  /** Not offered to a person who may only read. */
+  readonly edits?: boolean;
   readonly isAvailable: (state: BookState) => boolean;
   /** Whether it is what is being done now (a tool in hand). */
   readonly isOn?: (state: BookState) => boolean;

@@ -13,12 +13,18 @@ const entryPicked = (state: BookState) => state.canEdit && state.selection.some(
 const anyPicked = (state: BookState) => state.canEdit && state.selection.length > 0;
 const hasRoom = (state: BookState) => state.roomInHand !== null;
 
-function tool(name: ToolName, label: string, key: string, isAvailable: Action['isAvailable']): Action {
+function tool(
+  name: Exclude<ToolName, 'select'>,
+  label: string,
+  key: string,
+  isAvailable: Action['isAvailable'],
+): Action {
   return {
     id: name,
     label,
     keys: [key],
     group: 'draw',
+    edits: name !== 'measure',
     isAvailable,
     isOn: (state) => state.tool === name,
     run: ({ session }) => {
@@ -56,6 +62,7 @@ export const TOOL_ACTIONS: readonly Action[] = [
 export const HISTORY_ACTIONS: readonly Action[] = [
   {
     id: 'undo',
+    edits: true,
     label: 'Undo',
     keys: ['Control+Z'],
     group: 'change',
@@ -66,6 +73,7 @@ export const HISTORY_ACTIONS: readonly Action[] = [
   },
   {
     id: 'redo',
+    edits: true,
     label: 'Redo',
     keys: ['Control+Shift+Z', 'Control+Y'],
     group: 'change',

@@ -10,11 +10,13 @@ interface PlanVerbsProps {
   readonly keysShown?: boolean;
 }
 
-/** The row of verbs above the plan: what can be done next, each with its key. */
+/** The row of verbs above the plan: what this person can do next, each with its key. */
 export function PlanVerbs({ actions, world, keysShown = true }: PlanVerbsProps) {
+  const canEdit = useBook((state) => state.canEdit);
+  const offered = actions.filter(({ edits }) => canEdit || edits !== true);
   return (
     <>
-      {actions.map((action) => (
+      {offered.map((action) => (
         <Verb key={action.id} action={action} world={world} keyShown={keysShown} />
       ))}
     </>
