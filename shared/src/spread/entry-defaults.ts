@@ -15,6 +15,10 @@ const FREE_BURNING_S = 1200;
 const USUAL_HEIGHT_M = 1;
 const USUAL_RADIATIVE_FRACTION = 0.35;
 const KJ_PER_MJ = 1000;
+/** A curve that holds a thousand times more or less heat than the entry is of something else. */
+const MOST_STRETCH = 1000;
+/** Within this the curve is taken for the entry’s own without a word. */
+const UNSAID_STRETCH = 0.1;
 
 /** What the room has to say about an entry that says nothing itself. */
 export interface EntryGiven {
@@ -45,8 +49,14 @@ export function peakOf({ entry, heat_MJ, note }: EntryGiven): number {
   return USUAL_RATE_KW_M2 * area;
 }
 
-export function growthOf({ entry, parts, roomAlpha_kW_s2, alphaOf, note }: EntryGiven): SpreadEntry['growth'] {
-  if (entry.curve != null && areaUnder(entry.curve) > 0) return { by: 'measured', points: measuredCurve(entry.curve) };
+export function growthOf({ entry, heat_MJ, parts, roomAlpha_kW_s2, alphaOf, note }: EntryGiven): SpreadEntry['growth'] {
+  if (entry.curve != null) {
+    const stretch = (heat_MJ * KJ_PER_MJ) / areaUnder(entry.curve);
+    const fits = stretch > 1 / MOST_STRETCH && stretch < MOST_STRETCH;
+    if (!fits) note('CURVE_NOT_USED');
+    else if (Math.abs(stretch - 1) > UNSAID_STRETCH) note('CURVE_STRETCHED');
+    if (fits) return { by: 'measured', points: measuredCurve(entry.curve) };
+  }
   if (entry.growth != null) return { by: 't-squared', alpha_kW_s2: alphaOf(entry.growth) };
   if (isFluid(parts)) {
     note('GROWTH_AT_ONCE');

@@ -45,7 +45,7 @@ export class ExposedEntries {
   private readonly waiting: Int32Array;
   private left = 0;
   private readonly lit: Uint8Array;
-  /** Radiation on each entry and, last, the rate of all entries: c0 + c1 T + c2 T². */
+  /** Radiation on each entry, c0 + c1 T + c2 T², kW/m². */
   private readonly c0: Float64Array;
   private readonly c1: Float64Array;
   private readonly c2: Float64Array;
@@ -60,7 +60,7 @@ export class ExposedEntries {
     private readonly rules: ExposureRules,
   ) {
     const count = scene.entries.length;
-    const perEntry = () => new Float64Array(count + 1);
+    const perEntry = () => new Float64Array(count);
     [this.dose, this.highestFlux, this.beside, this.flameShare] = [perEntry(), perEntry(), perEntry(), perEntry()];
     [this.c0, this.c1, this.c2, this.critical, this.neededDose] = [
       perEntry(),
@@ -104,8 +104,8 @@ export class ExposedEntries {
     const { fluxFactor } = this.rules;
     const middle = T + dT / 2;
     while (this.clock.next <= middle) this.takeChange();
-    const all = this.scene.entries.length;
-    const demand = Math.max(0, this.c0[all]! + middle * (this.c1[all]! + middle * this.c2[all]!));
+    const { c0, c1, c2 } = this.clock.total;
+    const demand = Math.max(0, c0 + middle * (c1 + middle * c2));
     const share = Math.min(1, cap / demand);
     const dt = dT / share;
     const layer = this.scene.layer?.(share * demand, t + dt / 2) ?? 0;
@@ -139,10 +139,6 @@ export class ExposedEntries {
   private takeChange(): void {
     const { index, c0, c1, c2 } = this.clock.take();
     const { weights } = this.scene.view(index);
-    const all = weights.length;
-    this.c0[all]! += c0;
-    this.c1[all]! += c1;
-    this.c2[all]! += c2;
     for (let k = 0; k < this.left; k += 1) {
       const j = this.waiting[k]!;
       const weight = weights[j]!;
@@ -206,7 +202,9 @@ export class ExposedEntries {
       if (given > most) [from, most] = [source, given];
     };
     for (let i = 0; i < this.scene.entries.length; i += 1) {
-      if (this.clock.isBurning(i)) offer(i, this.scene.view(i).weights[target]! * this.ownRate(i, T));
+      if (!this.clock.isBurning(i)) continue;
+      const weight = this.scene.view(i).weights[target]!;
+      if (weight * this.clock.curveOf(i)!.peak > most) offer(i, weight * this.ownRate(i, T));
     }
     for (const pair of this.special) {
       if (pair.target === target) offer(pair.source, this.specialFlux(pair, T, 1));

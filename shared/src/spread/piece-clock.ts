@@ -1,15 +1,15 @@
 import type { OwnCurve } from './own-curve.ts';
 
-/** How the sum of all curves changes at one moment: its polynomial in burning time T grows by these, kW. */
-export interface PieceChange {
-  index: number;
-  /** Burning time of the change, s. */
-  at: number;
+/** c0 + c1 T + c2 T², kW over burning time, s. */
+export interface Polynomial {
   c0: number;
   c1: number;
   c2: number;
-  /** The curve has come to its end. */
-  ended: boolean;
+}
+
+/** By how much the rate of one curve changes at one moment. */
+export interface PieceChange extends Polynomial {
+  index: number;
 }
 
 /**
@@ -22,17 +22,29 @@ export class PieceClock {
   next = Infinity;
   /** Curves that have begun and not ended. */
   burning = 0;
+  /** Length of the shortest piece in burning that is no straight line, s; Infinity when all are straight. */
+  shortestCurved = Infinity;
+  /** Rate of all curves together; summed anew at each change, so that nothing of a curve is left when it has ended. */
+  readonly total: Polynomial = { c0: 0, c1: 0, c2: 0 };
   private nextIndex = -1;
   private readonly nextAt: Float64Array;
   private readonly begun: Float64Array;
   private readonly piece: Int32Array;
+  /** Length of the piece that burns now if it is no straight line, s; else Infinity. */
+  private readonly curved: Float64Array;
   private readonly curves: (OwnCurve | undefined)[];
-  private readonly change: PieceChange = { index: 0, at: 0, c0: 0, c1: 0, c2: 0, ended: false };
+  /** The piece of each curve that burns now, in burning time. */
+  private readonly c0: Float64Array;
+  private readonly c1: Float64Array;
+  private readonly c2: Float64Array;
+  private readonly change: PieceChange = { index: 0, c0: 0, c1: 0, c2: 0 };
 
   constructor(count: number) {
     this.nextAt = new Float64Array(count).fill(Infinity);
     this.begun = new Float64Array(count);
     this.piece = new Int32Array(count).fill(-1);
+    this.curved = new Float64Array(count).fill(Infinity);
+    [this.c0, this.c1, this.c2] = [new Float64Array(count), new Float64Array(count), new Float64Array(count)];
     this.curves = new Array<OwnCurve | undefined>(count).fill(undefined);
   }
 
@@ -42,7 +54,7 @@ export class PieceClock {
     this.begun[index] = T;
     this.nextAt[index] = T;
     this.burning += 1;
-    this.findNext();
+    this.lookOver();
   }
 
   curveOf(index: number): OwnCurve | undefined {
@@ -57,51 +69,46 @@ export class PieceClock {
     return this.curves[index] !== undefined && this.nextAt[index] !== Infinity;
   }
 
-  /** Length of the shortest growing or curved piece that burns now, s; Infinity when all are straight. */
-  shortestCurvedPiece(): number {
-    let least = Infinity;
-    for (const [index, curve] of this.curves.entries()) {
-      const piece = this.piece[index]!;
-      if (curve === undefined || piece < 0 || piece >= curve.pieces.length || curve.pieces[piece]![2] === 0) continue;
-      least = Math.min(least, curve.starts[piece + 1]! - curve.starts[piece]!);
-    }
-    return least;
-  }
-
   /** Takes the change at `next`. The object is the same every time. */
   take(): PieceChange {
     const { change, nextIndex: index } = this;
     const curve = this.curves[index]!;
-    const from = this.piece[index]!;
-    const to = from + 1;
+    const piece = this.piece[index]! + 1;
+    const ended = piece === curve.pieces.length;
+    const began = this.begun[index]!;
+    const [a0, a1, a2] = ended ? NOTHING : curve.pieces[piece]!;
+    const c0 = a0 - a1 * began + a2 * began * began;
+    const c1 = a1 - 2 * a2 * began;
     change.index = index;
-    change.at = this.next;
-    change.c0 = change.c1 = change.c2 = 0;
-    if (from >= 0) this.add(curve.pieces[from]!, index, -1);
-    change.ended = to === curve.pieces.length;
-    if (!change.ended) this.add(curve.pieces[to]!, index, 1);
-    this.piece[index] = to;
-    this.nextAt[index] = change.ended ? Infinity : this.begun[index]! + curve.starts[to + 1]!;
-    if (change.ended) this.burning -= 1;
-    this.findNext();
+    change.c0 = c0 - this.c0[index]!;
+    change.c1 = c1 - this.c1[index]!;
+    change.c2 = a2 - this.c2[index]!;
+    this.c0[index] = c0;
+    this.c1[index] = c1;
+    this.c2[index] = a2;
+    this.piece[index] = piece;
+    this.nextAt[index] = ended ? Infinity : began + curve.starts[piece + 1]!;
+    this.curved[index] = a2 === 0 ? Infinity : curve.starts[piece + 1]! - curve.starts[piece]!;
+    if (ended) this.burning -= 1;
+    this.lookOver();
     return change;
   }
 
-  /** A piece in time since ignition, written in burning time. */
-  private add([c0, c1, c2]: readonly [number, number, number], index: number, sign: number): void {
-    const began = this.begun[index]!;
-    this.change.c0 += sign * (c0 - c1 * began + c2 * began * began);
-    this.change.c1 += sign * (c1 - 2 * c2 * began);
-    this.change.c2 += sign * c2;
-  }
-
-  private findNext(): void {
-    this.next = Infinity;
+  private lookOver(): void {
+    const { total } = this;
+    this.next = this.shortestCurved = Infinity;
+    total.c0 = total.c1 = total.c2 = 0;
     for (let i = 0; i < this.nextAt.length; i += 1) {
       if (this.nextAt[i]! < this.next) {
         this.next = this.nextAt[i]!;
         this.nextIndex = i;
       }
+      if (this.curved[i]! < this.shortestCurved) this.shortestCurved = this.curved[i]!;
+      total.c0 += this.c0[i]!;
+      total.c1 += this.c1[i]!;
+      total.c2 += this.c2[i]!;
     }
   }
 }
+
+const NOTHING = [0, 0, 0] as const;

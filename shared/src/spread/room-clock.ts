@@ -1,4 +1,4 @@
-import type { PieceChange } from './piece-clock.ts';
+import type { Polynomial } from './piece-clock.ts';
 
 /** Why the room's clock stopped before the burning time it was sent to. */
 export type ClockStop = 'flashover' | 'starved' | 'time';
@@ -46,16 +46,9 @@ export class RoomClock {
     return this.marks.cap_kW;
   }
 
-  change({ c0, c1, c2 }: PieceChange): void {
-    this.c0 += c0;
-    this.c1 += c1;
-    this.c2 += c2;
-    this.record();
-  }
-
-  /** Nothing burns any more; what rounding left of the sums goes too. */
-  rest(): void {
-    this.c0 = this.c1 = this.c2 = 0;
+  /** From now on the entries ask for this. */
+  follow({ c0, c1, c2 }: Polynomial): void {
+    [this.c0, this.c1, this.c2] = [c0, c1, c2];
     this.record();
   }
 
@@ -63,6 +56,7 @@ export class RoomClock {
   flashed(cap_kW: number): void {
     this.marks.cap_kW = cap_kW;
     this.marks.flashover_kW = Infinity;
+    this.record();
   }
 
   record(): void {

@@ -11,6 +11,8 @@ export const LONGEST_S = 4 * 3600;
 /** A growth phase is drawn in at least this many pieces, which makes its area at most 0.03 % too large. */
 const GROWTH_PIECES = 40;
 const KJ_PER_MJ = 1000;
+/** Share of the burning time below which a step would be lost in rounding: openings of a hair’s breadth ask for such. */
+const LEAST_STEP = 1e-12;
 
 export type SpreadCause = 'first' | 'radiation' | 'layer' | 'flame' | 'flashover' | 'starved';
 
@@ -146,7 +148,7 @@ class Run {
   private step(): ClockStop | undefined {
     const { room, exposed } = this;
     const { t, T } = room;
-    const dT = this.rules.step_s * Math.min(1, room.cap / room.demand);
+    const dT = Math.max(T * LEAST_STEP, this.rules.step_s * Math.min(1, room.cap / room.demand));
     const lighting =
       exposed.any && this.flashover_s === null ? exposed.step({ t, T, dT, cap: room.cap }) : NOTHING_LIGHTS;
     for (const one of lighting) {
@@ -163,12 +165,10 @@ class Run {
     while (pieces.next <= T) {
       const stop = this.runSmoothly(pieces.next);
       if (stop !== undefined) return stop;
-      room.change(pieces.take());
-      this.longestPiece = pieces.shortestCurvedPiece() / GROWTH_PIECES;
-      if (pieces.burning === 0) {
-        room.rest();
-        if (mayEnd) return undefined;
-      }
+      pieces.take();
+      room.follow(pieces.total);
+      this.longestPiece = pieces.shortestCurved / GROWTH_PIECES;
+      if (mayEnd && pieces.burning === 0) return undefined;
     }
     return this.runSmoothly(T);
   }

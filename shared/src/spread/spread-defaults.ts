@@ -4,6 +4,8 @@ export const SPREAD_DEFAULTS = {
   PEAK_FROM_FOOTPRINT: 'No peak is given: 500 kW/m2 × the footprint (common practice).',
   PEAK_FROM_HEAT:
     'Neither peak nor footprint is given: the heat over 1200 s of free burning (Law & O’Brien, from memory).',
+  CURVE_STRETCHED: 'The measured curve holds other heat than the entry: its rates are kept, its times stretched.',
+  CURVE_NOT_USED: 'The measured curve holds no heat, or heat of another order than the entry: it is left aside.',
   GROWTH_FROM_KIND: 'No growth class is given: the one usual for the kind.',
   GROWTH_FROM_ROOM: 'No growth class is given: the one of the room.',
   GROWTH_AT_ONCE: 'Mostly liquid or gas and no growth class is given: it burns at its peak from the start.',

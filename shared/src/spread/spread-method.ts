@@ -1,7 +1,12 @@
+import type { MethodSummary } from '../methods/define-method.ts';
 import { en1991, recalled } from '../methods/sources.ts';
-import type { MethodSource } from '../methods/working.ts';
 
-const SOURCES: readonly MethodSource[] = [
+/** What a method of many parts says of itself, with what it leaves out. */
+export interface SpreadMethod extends MethodSummary {
+  readonly limits: readonly string[];
+}
+
+const SOURCES: MethodSummary['sources'] = [
   en1991('E.4: growth, plateau and decay of each entry; the curve is extended where the air does not suffice'),
   {
     title: 'Fleury, Evaluation of thermal radiation models for fire spread between objects, University of Canterbury',
@@ -20,12 +25,25 @@ const SOURCES: readonly MethodSource[] = [
   recalled('SFPE Handbook of Fire Protection Engineering', 'point source: above 5 kW/m2, safety factor 2'),
 ];
 
+const INPUTS = {
+  Q: { symbol: 'Q_i', unit: 'kW', quantity: 'Heat release rate of a burning entry', valid: [0, Infinity] },
+  chi_r: { symbol: 'χ_r', unit: '', quantity: 'Share of it that radiates', valid: [0, 1] },
+  G: { symbol: 'G_ij', unit: 'm-2', quantity: 'View of the target', valid: [0, Infinity] },
+  k_f: { symbol: 'k_f', unit: '', quantity: 'Flux factor: 1 for events, 2 for enough of a gap', valid: [1, 2] },
+  q_cr: { symbol: 'q_cr', unit: 'kW/m2', quantity: 'Critical flux of the target', valid: [0, 200] },
+  dose: { symbol: 'dose', unit: '(kW/m2)^n s', quantity: 'Dose that lights the target', valid: [0, Infinity] },
+} as const satisfies MethodSummary['inputs'];
+
 /** Which entry ignites which: what the model is made of, for screens, prints and workings. */
-export const SPREAD_METHOD = {
+export const SPREAD_METHOD: SpreadMethod = {
   id: 'spread.simulation',
   version: 1,
   ref: 'spread.simulation@1',
   title: 'Which entry ignites which',
+  symbol: 't',
+  unit: 's',
+  inputs: INPUTS,
+  outOfRange: 'warn',
   equation:
     'q_j = k_f Σ min(120; χ_r Q_i G_ij) + q_L;  Σ (q_j − q_cr)ⁿ Δt ≥ dose;  G = (1/N) Σ 1/(4πR²);  q_L = σ[(T_0 + ΔT)⁴ − T_0⁴]',
   why: 'Among simple radiation models the point source came nearest to measured fluxes; cells keep long items right.',
@@ -51,14 +69,18 @@ export const SPREAD_METHOD = {
     'Nearer than 2.5 diameters the point source leaves its tested range; such events are marked.',
     'Times are right to a factor of two at best.',
   ],
-} as const;
+};
 
 /** For gaps: what they mean and what they leave out, beside the limits above. */
-export const GAP_METHOD = {
+export const GAP_METHOD: SpreadMethod = {
   id: 'spread.gap',
   version: 1,
   ref: 'spread.gap@1',
   title: 'Gap that would keep one entry from lighting another',
+  symbol: 'gap',
+  unit: 'm',
+  inputs: INPUTS,
+  outOfRange: 'warn',
   equation:
     'gap at which Σ (k_f min(120; χ_r Q G) + q_L − q_cr)ⁿ Δt = dose;  long exposure: k_f χ_r Q_p G + q_L = q_cr',
   why: 'A distance is asked for one pair; with three entries a larger gap can even light the third one sooner.',
@@ -72,4 +94,4 @@ export const GAP_METHOD = {
     'A gap on paper is no barrier: things fall, are moved and are put in between.',
     'No gap helps where the hot layer alone lights the entry or the first entry alone brings flashover.',
   ],
-} as const;
+};

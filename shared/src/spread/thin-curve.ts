@@ -8,7 +8,7 @@ const AREA = 0.0005;
 /** A curve of `[s, kW]` with the points left out that a straight line replaces; its area stays within 0.05 %. */
 export function thinCurve(points: readonly CurvePoint[]): readonly CurvePoint[] {
   if (points.length < 3) return points;
-  const tolerance = NEAREST * Math.max(...points.map(([, rate]) => rate));
+  const tolerance = NEAREST * points.reduce((peak, [, rate]) => Math.max(peak, rate), 0);
   const kept: CurvePoint[] = [points[0]!];
   let anchor = 0;
   let [steepest, flattest] = [Infinity, -Infinity];

@@ -44,6 +44,11 @@ describe('a thinned curve', () => {
   });
 });
 
+it('a curve of half a million points is thinned as well', () => {
+  const long = Array.from({ length: 500_000 }, (_, k): [number, number] => [k / 100, 700]);
+  expect(thinCurve(long)).toHaveLength(2);
+});
+
 describe('a measured curve', () => {
   it('of many points keeps its heat in 60 pieces', () => {
     fc.assert(

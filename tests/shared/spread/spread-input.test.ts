@@ -179,22 +179,34 @@ describe('an entry that does not say everything', () => {
     expect(one.growth).toEqual({ by: 'step' });
   });
 
-  it('with a measured curve burns by it, and one of zeros counts as none', () => {
+  it.each([
+    [128, []],
+    [256, ['CURVE_STRETCHED']],
+  ])('with a measured curve burns by it: %f MJ of its own', (mass_kg, codes) => {
     const curve = [
       [0, 0],
-      [60, 900],
-      [300, 0],
+      [128, 1000],
+      [256, 0],
     ];
-    const measured = only({ curve, growth: null, peak_kW: null });
-    expect(measured.entry).toMatchObject({ peak_kW: 900, growth: { by: 'measured', points: curve } });
-    expect(measured.codes).toEqual([]);
-    const nothing = only({
-      curve: [
-        [0, 0],
-        [9, 0],
-      ],
+    const parts = [{ net_heat_MJ_kg: 1, mass_kg, heat_basis: 'effective' }];
+    const measured = only({ curve, parts, growth: null, peak_kW: null });
+    expect(measured.entry).toMatchObject({
+      heat_MJ: mass_kg,
+      peak_kW: 1000,
+      growth: { by: 'measured', points: curve },
     });
-    expect(nothing.entry).toMatchObject({ peak_kW: 700, growth: { by: 't-squared' } });
+    expect(measured.codes).toEqual(codes);
+  });
+
+  it.each([0, 0.001])('with a measured curve of another order of heat goes by peak and class: %f kW', (rate) => {
+    const curve = [
+      [0, 0],
+      [60, rate],
+      [90, 0],
+    ];
+    const { entry: one, codes } = only({ curve });
+    expect(one).toMatchObject({ peak_kW: 700, growth: { by: 't-squared' } });
+    expect(codes).toEqual(['CURVE_NOT_USED']);
   });
 
   it('lists a default once, with every entry it was used for', () => {
