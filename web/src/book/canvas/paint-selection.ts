@@ -1,10 +1,12 @@
 import { footprint } from '@embertally/shared/geometry/footprint';
 import type { Point } from '@embertally/shared/geometry/point';
+import { insetRing } from '@embertally/shared/geometry/inset-ring';
 import { signedArea } from '@embertally/shared/geometry/signed-area';
 import type { SurveyDocument } from '@embertally/shared/survey/survey-document';
 import { handlesOf } from '../interaction/handles.ts';
 import { sceneOf } from '../interaction/scene.ts';
 import type { Selected } from '../session/book-state.ts';
+import { wallWidth_px } from './paint-walls.ts';
 import { lengthPlace, paintText, type LengthPlace } from './paint-text.ts';
 import type { RoomPlate } from './room-plates.ts';
 import { at, CASING_PX, SANS, traceLine, traceRing, type Pen } from './pen.ts';
@@ -23,6 +25,7 @@ export interface SelectionLook {
 }
 
 const FONT = `13px ${SANS}`;
+const IN_HAND_PX = 2;
 const LENGTH_AWAY_PX = 16;
 const LENGTH_HEIGHT_PX = 16;
 
@@ -31,14 +34,18 @@ export function paintSelection(pen: Pen, look: SelectionLook): void {
   const scene = sceneOf(look.document, look.storeyId);
   if (scene === null) return;
   const inHand = scene.rooms.find(({ room }) => room.id === look.roomInHand);
-  if (inHand !== undefined)
+  if (inHand !== undefined) {
+    // Within the walls: they and their openings stay as they are drawn.
+    const within_px = wallWidth_px(pen, scene.storey.wall_thickness_m) / 2 + IN_HAND_PX + CASING_PX;
+    const within = insetRing(inHand.ring, within_px / pen.camera.pxPerM) ?? inHand.ring;
     outline(
       pen,
       () => {
-        traceRing(pen, inHand.ring);
+        traceRing(pen, within);
       },
-      1.5,
+      IN_HAND_PX,
     );
+  }
   for (const picked of look.selection) {
     switch (picked.kind) {
       case 'room': {
