@@ -11,6 +11,8 @@ export const LONGEST_S = 4 * 3600;
 /** A growth phase is drawn in at least this many pieces, which makes its area at most 0.03 % too large. */
 const GROWTH_PIECES = 40;
 const KJ_PER_MJ = 1000;
+/** With nothing left to light only the curve is followed, which is exact for any step, s. */
+const IDLE_STEP_S = 20;
 /** Share of the burning time below which a step would be lost in rounding: openings of a hair’s breadth ask for such. */
 const LEAST_STEP = 1e-12;
 
@@ -148,9 +150,10 @@ class Run {
   private step(): ClockStop | undefined {
     const { room, exposed } = this;
     const { t, T } = room;
-    const dT = Math.max(T * LEAST_STEP, this.rules.step_s * Math.min(1, room.cap / room.demand));
-    const lighting =
-      exposed.any && this.flashover_s === null ? exposed.step({ t, T, dT, cap: room.cap }) : NOTHING_LIGHTS;
+    const waits = exposed.any && this.flashover_s === null;
+    const step_s = waits ? this.rules.step_s : IDLE_STEP_S;
+    const dT = Math.max(T * LEAST_STEP, step_s * Math.min(1, room.cap / room.demand));
+    const lighting = waits ? exposed.step({ t, T, dT, cap: room.cap }) : NOTHING_LIGHTS;
     for (const one of lighting) {
       const stop = this.runTo(T + one.share * dT);
       if (stop !== undefined) return stop;
