@@ -211,6 +211,7 @@ describe('every fire', () => {
     );
   });
 
+  /** Seeded: one fire in several hundred has an entry whose dose only just suffices, and that one moves by a little more. */
   it('hardly knows the step: half of it moves no event by half a second', () => {
     fc.assert(
       fc.property(cases(squared), (input) => {
