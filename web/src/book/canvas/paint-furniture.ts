@@ -1,21 +1,28 @@
 import { paintText } from './paint-text.ts';
 import { SANS, type Pen } from './pen.ts';
 
-const NICE_M = [0.1, 0.2, 0.5, 1, 2, 5, 10, 20, 50, 100, 200, 500];
+const NICE = [0.1, 0.2, 0.5, 1, 2, 5, 10, 20, 50, 100, 200, 500, 1000];
 const LONGEST_PX = 170;
 const MARGIN_PX = 24;
 const FONT = `13px ${SANS}`;
 
+/** What the scale bar counts in. */
+interface ScaleUnit {
+  readonly unit: string;
+  readonly unit_m: number;
+}
+
 /** The scale bar at the lower right and, where north is known, its arrow at the upper right. */
-export function paintFurniture(pen: Pen, north_deg: number | null, lengthText: (length_m: number) => string): void {
-  paintScaleBar(pen, lengthText);
+export function paintFurniture(pen: Pen, north_deg: number | null, scale: ScaleUnit): void {
+  paintScaleBar(pen, scale);
   if (north_deg !== null) paintNorth(pen, north_deg);
 }
 
-function paintScaleBar(pen: Pen, lengthText: (length_m: number) => string): void {
+function paintScaleBar(pen: Pen, { unit, unit_m }: ScaleUnit): void {
   const { context, view, camera, palette } = pen;
-  const length_m = NICE_M.findLast((nice) => nice * camera.pxPerM <= LONGEST_PX) ?? 0.1;
-  const span = length_m * camera.pxPerM;
+  const perUnit_px = unit_m * camera.pxPerM;
+  const length = NICE.findLast((nice) => nice * perUnit_px <= LONGEST_PX) ?? 0.1;
+  const span = length * perUnit_px;
   const right = Math.round(view.width - MARGIN_PX) + 0.5;
   const left = right - span;
   const y = Math.round(view.height - 30) + 0.5;
@@ -36,7 +43,7 @@ function paintScaleBar(pen: Pen, lengthText: (length_m: number) => string): void
     context.stroke();
   }
   paintText(pen, '0', { x: left, y: y + 16 }, FONT, palette.ink);
-  paintText(pen, lengthText(length_m), { x: right - 14, y: y + 16 }, FONT, palette.ink);
+  paintText(pen, `${length} ${unit}`, { x: right - 14, y: y + 16 }, FONT, palette.ink);
 }
 
 function paintNorth(pen: Pen, north_deg: number): void {

@@ -16,6 +16,8 @@ import { useFontsReady } from './use-fonts-ready.ts';
 import { usePalette } from './use-palette.ts';
 import { useStage } from './use-stage.ts';
 
+const FOOT_M = 0.3048;
+
 /** The plan as a picture: four layers, drawn and never asked. */
 export function PlanStage({ host }: { readonly host: PlanHost }) {
   const view = useBook((state) => state.view);
@@ -68,7 +70,10 @@ function Active({
   const crosshair = useSyncExternalStore(host.crosshair.subscribe, host.crosshair.get);
   const wallThickness_m = (storeyId === null ? null : document.storeys.get(storeyId)?.wall_thickness_m) ?? 0;
   const lengthText = (length_m: number) => {
-    const { text, unit } = formatQuantity(Math.round(length_m * 1000) / 1000, 'm', units, { figures: 'as entered' });
+    const step_m = units === 'US' ? FOOT_M / 100 : 0.001;
+    const { text, unit } = formatQuantity(Math.round(length_m / step_m) * step_m, 'm', units, {
+      figures: 'as entered',
+    });
     return `${text} ${unit}`;
   };
   // While things are being moved the handles would only be in the way.
@@ -102,10 +107,7 @@ function Overlay({ stage, palette }: LayerProps) {
       view={view}
       palette={palette}
       paint={(pen) => {
-        paintFurniture(pen, north, (length_m) => {
-          const { text, unit } = formatQuantity(length_m, 'm', units, { figures: 'as entered' });
-          return `${text} ${unit}`;
-        });
+        paintFurniture(pen, north, units === 'US' ? { unit: 'ft', unit_m: FOOT_M } : { unit: 'm', unit_m: 1 });
       }}
     />
   );
