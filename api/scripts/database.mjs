@@ -1,7 +1,7 @@
 import { spawn } from 'node:child_process';
 import { randomBytes } from 'node:crypto';
 import { existsSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs';
-import { join } from 'node:path';
+import { dirname, join } from 'node:path';
 import { clusterFolder, ensureDatabase, ensurePostgres, serverUrl, startCluster, stopCluster } from './postgres.mjs';
 
 /** Secrets are made once and stay in the data folder, readable by their owner only. */
@@ -29,13 +29,12 @@ export async function database(root, dataFolder) {
     };
   }
   ensurePostgres();
-  const cluster = await startCluster({
-    folder: clusterFolder(dataFolder),
-    passwordFile: join(dataFolder, 'postgres-password'),
-  });
+  const folder = clusterFolder(dataFolder);
   const keeper = join(dataFolder, 'cluster-keeper');
-  const ours = cluster.started || !isAlive(keeper);
-  if (ours) keep(root, keeper, cluster.folder);
+  // Written before the cluster is touched: the guard of a command that was killed lets go of it at once.
+  const ours = !isAlive(keeper);
+  if (ours) keep(root, keeper, folder);
+  const cluster = await startCluster({ folder, passwordFile: join(dataFolder, 'postgres-password') });
   const { ownerPassword, appPassword } = secrets(dataFolder);
   await ensureDatabase({ ...cluster, database: 'embertally', ownerPassword, appPassword });
   return {
@@ -64,6 +63,7 @@ function isAlive(keeper) {
  * input ends with us, however we end. It stops nothing that a later command has taken over by then.
  */
 function keep(root, keeper, folder) {
+  mkdirSync(dirname(keeper), { recursive: true });
   writeFileSync(keeper, String(process.pid));
   spawn(process.execPath, [join(root, 'api', 'scripts', 'cluster-guard.mjs'), folder, keeper, String(process.pid)], {
     stdio: ['pipe', 'ignore', 'ignore'],

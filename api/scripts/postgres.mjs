@@ -143,8 +143,12 @@ export async function startCluster({ folder, passwordFile, throwaway = false }) 
   const log = join(folder, 'server.log');
   const begin = () => run('pg_ctl', ['-D', folder, '-l', log, '-w', '-t', '60', '-o', options, 'start']);
   let done = begin();
-  // Children of a killed server need a moment to leave its shared memory.
-  for (let attempt = 0; done.status !== 0 && attempt < 20 && /shared memory block/.test(tail(log)); attempt += 1) {
+  // Children of a killed server need a moment to leave its shared memory, and its guard may just have been stopping it.
+  for (
+    let attempt = 0;
+    done.status !== 0 && attempt < 20 && /shared memory block|shutdown request/.test(tail(log));
+    attempt += 1
+  ) {
     await new Promise((wake) => setTimeout(wake, 250));
     done = begin();
   }
