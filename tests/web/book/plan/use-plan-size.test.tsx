@@ -24,7 +24,7 @@ function Surface() {
   const session = useBookSession();
   const element = useRef<HTMLDivElement>(null);
   usePlanSize(element, session);
-  return <div ref={element} />;
+  return <div ref={element} data-testid="plan" />;
 }
 
 function open() {
@@ -62,4 +62,19 @@ test('once a person has moved the plan it stays as they left it', () => {
   });
   resizeTo(500, 700);
   expect(session.state.camera).toBe(own);
+});
+
+test('a plan somebody has pressed on does not move under their hand', () => {
+  const session = open();
+  const before = session.state.camera;
+  document.querySelector('[data-testid="plan"]')?.dispatchEvent(new Event('pointerdown', { bubbles: true }));
+  resizeTo(700, 540);
+  expect(session.state.camera).toBe(before);
+});
+
+test('a row of options that takes height from the plan does not move it', () => {
+  const session = open();
+  const before = session.state.camera;
+  resizeTo(800, 540);
+  expect(session.state.camera).toBe(before);
 });
