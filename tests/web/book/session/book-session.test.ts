@@ -130,3 +130,15 @@ test('readers hear of a change once, and not after they left', () => {
   session.select([]);
   expect(heard).toBe(1);
 });
+
+test('taking up another tool lets go of what was picked, keeping the tool does not', () => {
+  const { session } = openedBook(store());
+  session.select([{ kind: 'entry', id: uid('a') }]);
+  session.setTool('contents');
+  expect(session.state.selection).toEqual([]);
+  session.select([{ kind: 'entry', id: uid('a') }]);
+  session.setTool('contents');
+  expect(session.state.selection).toHaveLength(1);
+  session.setTool('select');
+  expect(session.state.selection).toHaveLength(1);
+});

@@ -171,7 +171,9 @@ export class BookSession {
   }
 
   setTool(tool: ToolName, placing: Partial<Placing> = {}): void {
-    this.#set({ tool, placing: { ...this.#state.placing, ...placing }, message: null });
+    // What was picked is let go when another tool is taken up: its strip of fields would lie over the floor to work on.
+    const selection = tool === 'select' || tool === this.#state.tool ? this.#state.selection : [];
+    this.#set({ tool, selection, placing: { ...this.#state.placing, ...placing }, message: null });
   }
 
   /** Turns to a page; on a wide screen plan and tally both lie open already. */
