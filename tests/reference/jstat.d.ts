@@ -2,6 +2,10 @@
 declare module 'jstat' {
   export const jStat: {
     readonly lognormal: { inv(p: number, mu: number, sigma: number): number };
+    readonly beta: {
+      cdf(x: number, alpha: number, beta: number): number;
+      inv(p: number, alpha: number, beta: number): number;
+    };
     readonly normal: { cdf(x: number, mean: number, deviation: number): number };
   };
 }

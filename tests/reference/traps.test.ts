@@ -2,6 +2,21 @@ import { describe, expect, it } from 'vitest';
 import { openingsPlateau } from '@embertally/shared/methods/growth/openings-plateau';
 import { parametricCurve, parametricTemperature } from '@embertally/shared/methods/burnout/parametric-curve';
 import { thermalInertia } from '@embertally/shared/methods/burnout/thermal-inertia';
+import { heatFromEquation } from '@embertally/shared/methods/chemistry/heat-from-equation';
+import { heatFromFormation } from '@embertally/shared/methods/chemistry/heat-from-formation';
+import { airBuoyancy } from '@embertally/shared/methods/calorimetry/air-buoyancy';
+import { constantVolume } from '@embertally/shared/methods/calorimetry/constant-pressure';
+import { gradingClass } from '@embertally/shared/methods/load/grading-class';
+import { olderUnits } from '@embertally/shared/methods/load/older-units';
+import { ceilingJet } from '@embertally/shared/methods/plume/ceiling-jet';
+import { rtiFromFeet } from '@embertally/shared/methods/plume/rti-from-feet';
+import { POOL_FUELS } from '@embertally/shared/methods/pool/pool-fuels';
+import { viewCylinder } from '@embertally/shared/methods/radiation/view-cylinder';
+import { visibility } from '@embertally/shared/methods/smoke/visibility';
+import { lithiumBattery } from '@embertally/shared/methods/storage/lithium-battery';
+import { palletStack } from '@embertally/shared/methods/storage/pallet-stack';
+import { rangeFaults } from '@embertally/shared/methods/range-faults';
+import { pointSource } from '@embertally/shared/methods/radiation/point-source';
 import { growthCoefficient } from '@embertally/shared/methods/growth/growth-coefficient';
 import { moistureEn } from '@embertally/shared/methods/heat/moisture-en';
 import { moistureWetBasis } from '@embertally/shared/methods/heat/moisture-wet-basis';
@@ -11,6 +26,7 @@ import { openings } from '@embertally/shared/methods/room/openings';
 import { ventilationLimit } from '@embertally/shared/methods/room/ventilation-limit';
 import { estimateRoom } from '@embertally/shared/tally/estimate-room';
 import type { RoomInput } from '@embertally/shared/tally/room-input';
+import { atoms } from './atoms.ts';
 import { SCENERY_DOCK } from '../shared/tally/scenery-dock.ts';
 
 const withOptions = (options: RoomInput['options']): RoomInput => ({
@@ -116,5 +132,82 @@ describe('traps', () => {
     expect([flashover.thomas, flashover.babrauskas, flashover.mqh].every((one) => (one?.range.length ?? 0) > 0)).toBe(
       true,
     );
+  });
+
+  it('an equation for two moles is divided by two once, not never and not twice', () => {
+    const octane = atoms({ C: 8, H: 18 });
+    const { net } = heatFromEquation.run({ ...octane, n: 2, dH: -10_148.8, water: 'vapour' });
+    expect(net).toBeCloseTo(44.42, 1);
+    expect(heatFromEquation.run({ ...octane, n: 1, dH: -10_148.8, water: 'vapour' }).net).toBeCloseTo(88.84, 1);
+  });
+
+  it('gross and net are 18 % apart for hydrogen, 11 % for methane', () => {
+    const gap = (formula: ReturnType<typeof atoms>, dH_f: number) => {
+      const { gross, net } = heatFromFormation.run({ ...formula, dH_f });
+      return gross / net - 1;
+    };
+    expect(gap(atoms({ H: 2 }), 0)).toBeCloseTo(0.182, 2);
+    expect(gap(atoms({ C: 1, H: 4 }), -74.6)).toBeCloseTo(0.11, 2);
+  });
+
+  it('from a table to a bomb: isooctane passes 47.81, 47.71 and 47.79 MJ/kg on the way to the printed value', () => {
+    const { grossPerMole, gross } = heatFromFormation.run({ ...atoms({ C: 8, H: 18 }), dH_f: -259.2 });
+    expect(gross).toBeCloseTo(47.809, 2);
+    const inBomb = -constantVolume.run({ dH: -grossPerMole, dn: -4.5, T: 298.15 }) * (gross / grossPerMole);
+    expect(inBomb).toBeCloseTo(47.712, 2);
+    expect(airBuoyancy.run({ H_vac: inBomb, rho_s: 0.6878, rho_w: 8.4, rho_a: 0.0012 })).toBeCloseTo(47.788, 2);
+  });
+
+  it('kilocalories and British units of one table are 1.3 % apart and can fall into other classes', () => {
+    const kcal = olderUnits.run({ value: 275_000, unit: 'kcal-thermochemical/m2' });
+    expect(kcal / olderUnits.run({ value: 100_000, unit: 'Btu/ft2' })).toBeCloseTo(1.013, 3);
+    expect(gradingClass.run({ q: kcal }).grade).toBe('moderate');
+  });
+
+  it('the ceiling jet counts the whole rate: the convective share alone would read 20 % low', () => {
+    const rise = (Q: number) => ceilingJet.run({ Q, H: 4, r: 3, place: 'free' }).rise;
+    expect(rise(1000)).toBeCloseTo(64.66, 1);
+    expect(rise(700) / rise(1000)).toBeCloseTo(0.788, 2);
+  });
+
+  it('a response time index in feet is nearly half as large in metres', () => {
+    expect(rtiFromFeet.run({ RTI_ft: 1 })).toBeCloseTo(0.552, 3);
+  });
+
+  it('the distance to a cylinder of flame counts from its axis', () => {
+    const at = (L: number) => viewCylinder.run({ L, H: 9, D: 4 }).most;
+    expect(at(6)).toBeCloseTo(0.18301, 4);
+    expect(at(8)).toBeLessThan(at(6) * 0.8);
+    expect(() => at(2)).toThrow(/axis/);
+  });
+
+  it('optical density to base ten and extinction are 2.303 apart', () => {
+    const { extinction, density } = visibility.run({ m: 0.05, V: 150 });
+    expect(extinction / density).toBeCloseTo(2.303, 3);
+  });
+
+  it('alcohols in the table of pools carry no kβ of 100, liquid hydrogen is 0.169', () => {
+    const fuel = (key: string) => POOL_FUELS.find((one) => one.key === key);
+    expect(fuel('methanol')?.kBeta).toBeNull();
+    expect(fuel('ethanol')?.kBeta).toBeNull();
+    expect(fuel('liquid-hydrogen')?.rate).toBe(0.169);
+    expect(POOL_FUELS.every(({ kBeta }) => kBeta === null || kBeta < 10)).toBe(true);
+  });
+
+  it('both moisture coefficients of pallets are kept apart: 2 % at 6 %, 5 % at 12 %', () => {
+    const ratio = (M: number) =>
+      palletStack.run({ h_p: 2, M, A: 1, reading: '0.027' }).perArea /
+      palletStack.run({ h_p: 2, M, A: 1, reading: '0.03' }).perArea;
+    expect(ratio(6) - 1).toBeCloseTo(0.022, 3);
+    expect(ratio(12) - 1).toBeCloseTo(0.056, 3);
+  });
+
+  it('the heat of a lithium battery knows no state of charge', () => {
+    expect(Object.keys(lithiumBattery.inputs)).toEqual(['E']);
+  });
+
+  it('a relation outside its range still gives a plausible number, so its range is named', () => {
+    const faults = rangeFaults(pointSource, { Q: 1000, chi_r: 0.35, R: 0.5, ratio: 0.5 });
+    expect(faults.map(({ input }) => input)).toEqual(['ratio']);
   });
 });

@@ -12,6 +12,9 @@ export interface CombustionProducts {
   readonly HBr: number;
 }
 
+/** Less oxygen than this per mole is taken as none. */
+const LEAST_OXYGEN = 1e-9;
+
 export type Combustion =
   { readonly ok: true; readonly products: CombustionProducts } | { readonly ok: false; readonly message: string };
 
@@ -28,7 +31,7 @@ export function combustionProducts(atoms: Atoms): Combustion {
       message: `Hydrogen runs out: ${halogen} halogen atoms against ${atoms.H} of hydrogen. Such substances are not covered; give a measured heat.`,
     };
   const O2 = atoms.C + atoms.S + hydrogen / 4 - atoms.O / 2;
-  if (!(O2 > 0))
+  if (!(O2 > LEAST_OXYGEN))
     return {
       ok: false,
       message:

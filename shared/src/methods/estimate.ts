@@ -83,7 +83,8 @@ export function estimateOutputs<S extends MethodInputs, R extends object>(
     of(output) {
       const spec = method.outputs?.[output];
       const value: unknown = result[output];
-      if (!spec || typeof value !== 'number') throw new TypeError(`${method.ref} has no output ${output}.`);
+      if (!spec || (typeof value !== 'number' && value !== null))
+        throw new TypeError(`${method.ref} has no output ${output}.`);
       return assemble(method, inputs, spec, value, result, warnings, context);
     },
   };
@@ -107,13 +108,13 @@ function assemble<S extends MethodInputs, R>(
   method: Method<S, R>,
   inputs: InputValues<S>,
   output: Pick<MethodOutput, 'symbol' | 'unit'>,
-  value: number,
+  value: number | null,
   result: R,
   warnings: readonly EstimateWarning[],
   context: EstimateContext<S>,
 ): Estimate {
   const never = context.never;
-  if (never === undefined && !Number.isFinite(value)) {
+  if (never === undefined && (value === null || !Number.isFinite(value))) {
     throw new OutOfRangeError(`${method.ref} has no finite result for these inputs.`);
   }
   const plain = { value: never === undefined ? value : null, unit: output.unit, method: method.ref, warnings };

@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { estimate, estimateOutputs, OutOfRangeError } from '@embertally/shared/methods/estimate';
 import { designFire } from '@embertally/shared/methods/growth/design-fire';
 import { perFloor } from '@embertally/shared/methods/load/per-floor';
+import { detectorSteady } from '@embertally/shared/methods/plume/detector-steady';
 import { flashoverThomas } from '@embertally/shared/methods/room/flashover-thomas';
 
 describe('an estimate', () => {
@@ -49,5 +50,12 @@ describe('an estimate', () => {
     expect(run.of('end').unit).toBe('s');
     expect(run.of('end').method).toBe('growth.design-fire-2002@1');
     expect(() => run.of('plateauReached')).toThrow(TypeError);
+  });
+
+  it('an event that a method says never comes needs its reason, and is never a number', () => {
+    const cool = { RTI: 50, rise: 12, u: 1, T_a: 20, T_act: 68 };
+    const never = 'The gas does not get warm enough.';
+    expect(estimateOutputs(detectorSteady, cool, { never }).of('time')).toMatchObject({ value: null, never });
+    expect(() => estimateOutputs(detectorSteady, cool).of('time')).toThrow(OutOfRangeError);
   });
 });
