@@ -82,6 +82,58 @@ import { oxygenCarbon } from './calorimetry/oxygen-carbon.ts';
 import { oxygenConsumption } from './calorimetry/oxygen-consumption.ts';
 import { waterEfficiency } from './calorimetry/water-efficiency.ts';
 import { waterHeat } from './calorimetry/water-heat.ts';
+import { closedRoom } from './temperature/closed-room.ts';
+import { dealBeylerTransfer } from './temperature/deal-beyler-transfer.ts';
+import { forcedDealBeyler } from './temperature/forced-deal-beyler.ts';
+import { forcedFpa } from './temperature/forced-fpa.ts';
+import { ceilingJet } from './plume/ceiling-jet.ts';
+import { detectorResponse } from './plume/detector-response.ts';
+import { detectorSteady } from './plume/detector-steady.ts';
+import { farField } from './plume/far-field.ts';
+import { flameHeight } from './plume/flame-height.ts';
+import { localisedAtCeiling } from './plume/localised-at-ceiling.ts';
+import { localisedBelowCeiling } from './plume/localised-below-ceiling.ts';
+import { plumeMassFlow } from './plume/plume-mass-flow.ts';
+import { plumeTemperature } from './plume/plume-temperature.ts';
+import { plumeVelocity } from './plume/plume-velocity.ts';
+import { rtiFromFeet } from './plume/rti-from-feet.ts';
+import { smokeIndicator } from './plume/smoke-indicator.ts';
+import { sprinklerLimited } from './plume/sprinkler-limited.ts';
+import { travellingTime } from './plume/travelling-time.ts';
+import { virtualOrigin } from './plume/virtual-origin.ts';
+import { emissivePower } from './radiation/emissive-power.ts';
+import { externalFlame } from './radiation/external-flame.ts';
+import { openingRadiation, boundaryRadiation } from './radiation/opening-radiation.ts';
+import { pointSource } from './radiation/point-source.ts';
+import { shokriBeyler } from './radiation/shokri-beyler.ts';
+import { solidFlame } from './radiation/solid-flame.ts';
+import { viewCylinder } from './radiation/view-cylinder.ts';
+import { viewRectangle } from './radiation/view-rectangle.ts';
+import { poolFire } from './pool/pool-fire.ts';
+import { spillArea } from './pool/spill-area.ts';
+import { thinSpill } from './pool/thin-spill.ts';
+import { carbonMonoxide } from './smoke/carbon-monoxide.ts';
+import { layerFillingSteady, layerFillingGrowing } from './smoke/layer-filling.ts';
+import { massForVisibility } from './smoke/mass-for-visibility.ts';
+import { oxygenLimitedHeat } from './smoke/oxygen-limited-heat.ts';
+import { sootMass } from './smoke/soot-mass.ts';
+import { visibility } from './smoke/visibility.ts';
+import { balanceFlow } from './water/balance-flow.ts';
+import { heatUptake } from './water/heat-uptake.ts';
+import { observedFlowLondon, ruleOfIowa, jetsUsed } from './water/observed-flows.ts';
+import { cableRun } from './storage/cable-run.ts';
+import { cableTray } from './storage/cable-tray.ts';
+import { charringHeat } from './storage/charring-heat.ts';
+import { gasCylinder } from './storage/gas-cylinder.ts';
+import { liningHeat } from './storage/lining-heat.ts';
+import { lithiumBattery } from './storage/lithium-battery.ts';
+import { palletStack } from './storage/pallet-stack.ts';
+import { storageHeight } from './storage/storage-height.ts';
+import { designLoadItalian } from './load/design-load-italian.ts';
+import { gradingClass } from './load/grading-class.ts';
+import { olderUnits } from './load/older-units.ts';
+import { pertFractile } from './statistics/pert-fractile.ts';
+import { triangularFractile } from './statistics/triangular-fractile.ts';
 import type { MethodSummary } from './define-method.ts';
 
 /** A method whose inputs and result are known only when it runs. */
@@ -179,6 +231,62 @@ export const METHODS: readonly AnyMethod[] = [
   oxygenConsumption,
   waterEfficiency,
   waterHeat,
+  closedRoom,
+  dealBeylerTransfer,
+  forcedDealBeyler,
+  forcedFpa,
+  ceilingJet,
+  detectorResponse,
+  detectorSteady,
+  farField,
+  flameHeight,
+  localisedAtCeiling,
+  localisedBelowCeiling,
+  plumeMassFlow,
+  plumeTemperature,
+  plumeVelocity,
+  rtiFromFeet,
+  smokeIndicator,
+  sprinklerLimited,
+  travellingTime,
+  virtualOrigin,
+  emissivePower,
+  externalFlame,
+  openingRadiation,
+  boundaryRadiation,
+  pointSource,
+  shokriBeyler,
+  solidFlame,
+  viewCylinder,
+  viewRectangle,
+  poolFire,
+  spillArea,
+  thinSpill,
+  carbonMonoxide,
+  layerFillingSteady,
+  layerFillingGrowing,
+  massForVisibility,
+  oxygenLimitedHeat,
+  sootMass,
+  visibility,
+  balanceFlow,
+  heatUptake,
+  observedFlowLondon,
+  ruleOfIowa,
+  jetsUsed,
+  cableRun,
+  cableTray,
+  charringHeat,
+  gasCylinder,
+  liningHeat,
+  lithiumBattery,
+  palletStack,
+  storageHeight,
+  designLoadItalian,
+  gradingClass,
+  olderUnits,
+  pertFractile,
+  triangularFractile,
 ];
 
 const byRef = new Map(METHODS.map((method) => [method.ref, method]));

@@ -11,6 +11,15 @@ import { HEAT_ROWS } from '../../reference/rows/heat-rows.ts';
 import { LOAD_ROWS } from '../../reference/rows/load-rows.ts';
 import { ROOM_ROWS } from '../../reference/rows/room-rows.ts';
 import { STATISTICS_ROWS } from '../../reference/rows/statistics-rows.ts';
+import { TEMPERATURE_ROWS } from '../../reference/rows/temperature-rows.ts';
+import { PLUME_ROWS } from '../../reference/rows/plume-rows.ts';
+import { RADIATION_ROWS } from '../../reference/rows/radiation-rows.ts';
+import { POOL_ROWS } from '../../reference/rows/pool-rows.ts';
+import { SMOKE_ROWS } from '../../reference/rows/smoke-rows.ts';
+import { WATER_ROWS } from '../../reference/rows/water-rows.ts';
+import { STORAGE_ROWS } from '../../reference/rows/storage-rows.ts';
+import { SCHEME_ROWS } from '../../reference/rows/scheme-rows.ts';
+import { DISTRIBUTION_ROWS } from '../../reference/rows/distribution-rows.ts';
 import { UNCERTAINTY_ROWS } from '../../reference/rows/uncertainty-rows.ts';
 
 const rows = [
@@ -22,6 +31,15 @@ const rows = [
   ...LOAD_ROWS,
   ...ROOM_ROWS,
   ...STATISTICS_ROWS,
+  ...TEMPERATURE_ROWS,
+  ...PLUME_ROWS,
+  ...RADIATION_ROWS,
+  ...POOL_ROWS,
+  ...SMOKE_ROWS,
+  ...WATER_ROWS,
+  ...STORAGE_ROWS,
+  ...SCHEME_ROWS,
+  ...DISTRIBUTION_ROWS,
   ...UNCERTAINTY_ROWS,
 ];
 const folder = join(dirname(fileURLToPath(import.meta.url)), '../../../shared/src/methods');
