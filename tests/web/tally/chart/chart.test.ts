@@ -1,9 +1,9 @@
 import { burnoutChart } from '@embertally/web/src/book/tally/burnout-chart.ts';
-import type { CurveChart } from '@embertally/web/src/book/tally/chart/curve-chart.ts';
-import { curveCsv } from '@embertally/web/src/book/tally/chart/curve-csv.ts';
-import { curveRows } from '@embertally/web/src/book/tally/chart/curve-rows.ts';
-import { type Box, placeLabels } from '@embertally/web/src/book/tally/chart/place-labels.ts';
-import { readCurve } from '@embertally/web/src/book/tally/chart/read-curve.ts';
+import type { CurveChart } from '@embertally/web/src/components/chart/curve-chart.ts';
+import { curveCsv } from '@embertally/web/src/components/chart/curve-csv.ts';
+import { curveRows } from '@embertally/web/src/components/chart/curve-rows.ts';
+import { type Box, placeLabels } from '@embertally/web/src/components/chart/place-labels.ts';
+import { readCurve } from '@embertally/web/src/components/chart/read-curve.ts';
 import { releaseChart } from '@embertally/web/src/book/tally/release-chart.ts';
 import { estimateRoom } from '@embertally/shared/tally/estimate-room';
 import { roomInput } from '@embertally/shared/survey/room-input';

@@ -4,7 +4,7 @@ import { convert } from '@embertally/shared/units/convert';
 import { displayUnit } from '@embertally/shared/units/display-unit';
 import { formatQuantity } from '@embertally/shared/units/format-quantity';
 import type { UnitSystem } from '@embertally/shared/units/unit-system';
-import type { CurveChart, CurveSeries } from './chart/curve-chart.ts';
+import type { CurveChart, CurveSeries } from '../../components/chart/curve-chart.ts';
 
 const STEPS = 60;
 

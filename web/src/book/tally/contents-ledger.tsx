@@ -7,7 +7,7 @@ import { useUnits } from '../../lib/units-context.ts';
 import { EVIDENCE_WORDS, KEEPING_WORDS } from './entry-words.ts';
 import { Figure } from './figure.tsx';
 import type { LedgerRow } from './ledger-rows.ts';
-import { useQuantity } from './use-quantity.ts';
+import { useQuantity } from '../../lib/use-quantity.ts';
 
 const FIRST = 60;
 

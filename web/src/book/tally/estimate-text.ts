@@ -1,5 +1,5 @@
 import type { Estimate } from '@embertally/shared/methods/estimate';
-import type { Shown } from './use-quantity.ts';
+import type { Shown } from '../../lib/use-quantity.ts';
 
 /** An estimate as words: its figure and unit, or why the event never comes. */
 export function estimateText(estimate: Estimate, show: (value: number, unit: string) => Shown): string {

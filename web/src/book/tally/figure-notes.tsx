@@ -1,5 +1,5 @@
 import type { Estimate } from '@embertally/shared/methods/estimate';
-import { WarningList } from './warning-list.tsx';
+import { WarningList } from '../../components/working/warning-list.tsx';
 
 /** The notes of several numbers, each said once, right below them. */
 export function FigureNotes({ of }: { readonly of: readonly (Estimate | undefined)[] }) {

@@ -2,8 +2,8 @@ import type { Estimate } from '@embertally/shared/methods/estimate';
 import { figureName } from '@embertally/shared/tally/figure-name';
 import { use } from 'react';
 import { estimateText } from './estimate-text.ts';
-import { UnitText } from './unit-text.tsx';
-import { useQuantity } from './use-quantity.ts';
+import { UnitText } from '../../components/working/unit-text.tsx';
+import { useQuantity } from '../../lib/use-quantity.ts';
 import { WorkingContext } from './working-context.ts';
 
 interface FigureProps {

@@ -1,8 +1,8 @@
 import type { RoomTally } from '@embertally/shared/tally/room-tally';
 import { Figure } from './figure.tsx';
 import { FigureNotes } from './figure-notes.tsx';
-import { FormulaText } from './formula-text.tsx';
-import { plainUnits } from './plain-units.ts';
+import { FormulaText } from '../../components/working/formula-text.tsx';
+import { plainUnits } from '../../lib/plain-units.ts';
 import { FLASHOVER_NAMES, FLASHOVER_WAYS, lowestFlashover } from './lowest-flashover.ts';
 
 /** Flashover three ways, side by side, each with the range it was made for. */

@@ -1,7 +1,7 @@
 import type { RoomTally } from '@embertally/shared/tally/room-tally';
 import { useMemo } from 'react';
 import { useUnits } from '../../lib/units-context.ts';
-import { ChartFigure } from './chart/chart-figure.tsx';
+import { ChartFigure } from '../../components/chart/chart-figure.tsx';
 import { FigureList } from './figure-list.tsx';
 import { fileSlug } from './file-slug.ts';
 import { releaseChart } from './release-chart.ts';

@@ -1,6 +1,6 @@
 import type { MaterialShare } from '@embertally/shared/tally/room-tally';
 import { Figure } from './figure.tsx';
-import { useQuantity } from './use-quantity.ts';
+import { useQuantity } from '../../lib/use-quantity.ts';
 
 const LISTED = 6;
 

@@ -1,9 +1,9 @@
 import type { Missing } from '@embertally/shared/tally/room-tally';
 import { Button } from '../../components/button.tsx';
 import type { TablePart } from '../panels/tables-context.ts';
-import { FormulaText } from './formula-text.tsx';
+import { FormulaText } from '../../components/working/formula-text.tsx';
 import { missingGroups } from './missing-groups.ts';
-import { plainUnits } from './plain-units.ts';
+import { plainUnits } from '../../lib/plain-units.ts';
 import { TallySection } from './tally-section.tsx';
 
 interface MissingListProps {

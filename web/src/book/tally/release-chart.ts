@@ -4,7 +4,7 @@ import { displayUnit } from '@embertally/shared/units/display-unit';
 import { formatNumber } from '@embertally/shared/units/format-number';
 import { formatQuantity } from '@embertally/shared/units/format-quantity';
 import type { UnitSystem } from '@embertally/shared/units/unit-system';
-import type { CurveChart, CurveMark, CurveThreshold } from './chart/curve-chart.ts';
+import type { CurveChart, CurveMark, CurveThreshold } from '../../components/chart/curve-chart.ts';
 import { lowestFlashover } from './lowest-flashover.ts';
 
 /** Large fires are read in MW, small ones in kW; in US customary units in Btu/s. */

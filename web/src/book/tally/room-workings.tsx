@@ -6,7 +6,7 @@ import { useMemo } from 'react';
 import { allEstimates } from './all-estimates.ts';
 import { MissingList } from './missing-list.tsx';
 import { TallyCautions } from './tally-cautions.tsx';
-import { WorkingView } from './working-view.tsx';
+import { WorkingView } from '../../components/working/working-view.tsx';
 import './tally.css';
 
 interface RoomWorkingsProps {

@@ -9,7 +9,7 @@ import { useBook } from '../session/use-book.ts';
 import { useBookSession } from '../session/use-book-session.ts';
 import { findInSurvey } from './find-in-survey.ts';
 import { LoadBar } from './load-bar.tsx';
-import { useQuantity } from './use-quantity.ts';
+import { useQuantity } from '../../lib/use-quantity.ts';
 import { useRoomRows } from './use-room-rows.ts';
 import './thumb-index.css';
 

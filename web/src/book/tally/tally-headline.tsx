@@ -6,7 +6,7 @@ import { StandingMark } from '../../components/standing-mark.tsx';
 import { BandBar } from './band-bar.tsx';
 import { Figure } from './figure.tsx';
 import { FigureNotes } from './figure-notes.tsx';
-import { useQuantity } from './use-quantity.ts';
+import { useQuantity } from '../../lib/use-quantity.ts';
 
 interface TallyHeadlineProps {
   readonly tally: RoomTally;

@@ -6,7 +6,7 @@ import { useOpenTables } from '../panels/tables-context.ts';
 import { useBook } from '../session/use-book.ts';
 import { useBookSession } from '../session/use-book-session.ts';
 import { LoadBar } from './load-bar.tsx';
-import { useQuantity } from './use-quantity.ts';
+import { useQuantity } from '../../lib/use-quantity.ts';
 import { useRoomRows } from './use-room-rows.ts';
 import './thumb-index.css';
 

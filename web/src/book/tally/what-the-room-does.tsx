@@ -3,7 +3,7 @@ import { useMemo } from 'react';
 import { useUnits } from '../../lib/units-context.ts';
 import { burnoutChart } from './burnout-chart.ts';
 import { BurnoutTable } from './burnout-table.tsx';
-import { ChartFigure } from './chart/chart-figure.tsx';
+import { ChartFigure } from '../../components/chart/chart-figure.tsx';
 import { FigureList } from './figure-list.tsx';
 import { fileSlug } from './file-slug.ts';
 import { FlashoverTable } from './flashover-table.tsx';

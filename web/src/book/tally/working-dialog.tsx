@@ -5,7 +5,7 @@ import { Dialog } from '../../components/dialog.tsx';
 import { useBook } from '../session/use-book.ts';
 import { estimateAt } from './estimate-at.ts';
 import type { WorkingAsked } from './working-context.ts';
-import { WorkingView } from './working-view.tsx';
+import { WorkingView } from '../../components/working/working-view.tsx';
 
 interface WorkingDialogProps {
   readonly roomId: string;

@@ -6,7 +6,7 @@ import { Dialog } from '../../../components/dialog.tsx';
 import { useBook } from '../../session/use-book.ts';
 import { useBookSession } from '../../session/use-book-session.ts';
 import { ENCLOSURE_WORDS, EVIDENCE_WORDS, KEEPING_WORDS } from '../../tally/entry-words.ts';
-import { useQuantity } from '../../tally/use-quantity.ts';
+import { useQuantity } from '../../../lib/use-quantity.ts';
 import { CommandChoice } from '../command-choice.tsx';
 import { CommandQuantity } from '../command-quantity.tsx';
 import { CommandText } from '../command-text.tsx';

@@ -9,7 +9,7 @@ import { useUnits } from '../../../lib/units-context.ts';
 import { withMass } from '../../plan/with-mass.ts';
 import { useBookSession } from '../../session/use-book-session.ts';
 import { EVIDENCE_WORDS, KEEPING_WORDS } from '../../tally/entry-words.ts';
-import { useQuantity } from '../../tally/use-quantity.ts';
+import { useQuantity } from '../../../lib/use-quantity.ts';
 import { CommandChoice } from '../command-choice.tsx';
 import { CommandQuantity } from '../command-quantity.tsx';
 import { CountField } from './count-field.tsx';

@@ -9,7 +9,7 @@ import { type FieldErrors, useForm } from '../../../components/use-form.ts';
 import { useUnits } from '../../../lib/units-context.ts';
 import { useBook } from '../../session/use-book.ts';
 import { useBookSession } from '../../session/use-book-session.ts';
-import { useQuantity } from '../../tally/use-quantity.ts';
+import { useQuantity } from '../../../lib/use-quantity.ts';
 import { FormQuantity } from '../form-quantity.tsx';
 import { readQuantity } from '../read-quantity.ts';
 import { refusalFields } from '../refusal-fields.ts';

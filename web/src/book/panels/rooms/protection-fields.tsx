@@ -36,6 +36,15 @@ export function ProtectionFields({ protection, run }: ProtectionFieldsProps) {
       {sprinklers !== null && (
         <>
           <CommandQuantity
+            label="Response time index"
+            hint="From the sprinkler’s data sheet: fast 50 (m·s)^½ or less, standard 80 to 350."
+            unit="(m s)1/2"
+            value={sprinklers.rti}
+            minimum={1}
+            maximum={1000}
+            run={(rti) => set({ sprinklers: { ...sprinklers, rti } })}
+          />
+          <CommandQuantity
             label="Sprinkler temperature"
             unit="°C"
             value={sprinklers.activation_C}

@@ -11,7 +11,7 @@ import { type Column, Table } from '../../../components/table.tsx';
 import { useUnits } from '../../../lib/units-context.ts';
 import { useBook } from '../../session/use-book.ts';
 import { useBookSession } from '../../session/use-book-session.ts';
-import { useQuantity } from '../../tally/use-quantity.ts';
+import { useQuantity } from '../../../lib/use-quantity.ts';
 import { type RoomRow, useRoomRows } from '../../tally/use-room-rows.ts';
 import { useOpenTables } from '../tables-context.ts';
 import { AddRoomForm } from './add-room-form.tsx';

@@ -1,4 +1,4 @@
-import { readToken } from '../../../lib/theme-tokens.ts';
+import { readToken } from '../../lib/theme-tokens.ts';
 import type { ChartTone } from './curve-chart.ts';
 
 export interface ChartColours {

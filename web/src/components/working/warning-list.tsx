@@ -1,6 +1,6 @@
 import type { EstimateWarning } from '@embertally/shared/methods/estimate';
 import { FormulaText } from './formula-text.tsx';
-import { plainUnits } from './plain-units.ts';
+import { plainUnits } from '../../lib/plain-units.ts';
 
 /** Notes that stand with numbers, each said once. */
 export function WarningList({ warnings }: { readonly warnings: readonly EstimateWarning[] }) {

@@ -1,6 +1,6 @@
 import { formatQuantity } from '@embertally/shared/units/format-quantity';
 import { useCallback } from 'react';
-import { useUnits } from '../../lib/units-context.ts';
+import { useUnits } from './units-context.ts';
 
 export interface Shown {
   readonly text: string;

@@ -1,10 +1,11 @@
 import type { ReactNode } from 'react';
 import type { Estimate, InputOrigin, WorkingInput, WorkingStep } from '@embertally/shared/methods/estimate';
 import { FormulaText } from './formula-text.tsx';
-import { plainUnits } from './plain-units.ts';
+import { plainUnits } from '../../lib/plain-units.ts';
 import { UnitText } from './unit-text.tsx';
-import { useQuantity } from './use-quantity.ts';
+import { useQuantity } from '../../lib/use-quantity.ts';
 import { WarningList } from './warning-list.tsx';
+import './working.css';
 
 const ORIGINS: Readonly<Record<InputOrigin, string>> = {
   given: 'recorded in the survey',

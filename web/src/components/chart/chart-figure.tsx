@@ -1,10 +1,11 @@
 import { lazy, Suspense, useId, useRef, useState } from 'react';
-import { Button } from '../../../components/button.tsx';
+import { Button } from '../button.tsx';
 import type { CurveChart } from './curve-chart.ts';
 import { curveCsv } from './curve-csv.ts';
 import { CurveTable } from './curve-table.tsx';
 import { readCurve } from './read-curve.ts';
 import { saveFile } from './save-file.ts';
+import './chart.css';
 
 const CurveCanvas = lazy(() => import('./curve-canvas.tsx').then((module) => ({ default: module.CurveCanvas })));
 

@@ -10,7 +10,7 @@ import {
 } from 'chart.js';
 import { useEffect, useLayoutEffect, useMemo, useRef } from 'react';
 import { Line } from 'react-chartjs-2';
-import { useThemeRevision } from '../../../lib/theme-tokens.ts';
+import { useThemeRevision } from '../../lib/theme-tokens.ts';
 import { type ChartColours, chartColours } from './chart-colours.ts';
 import type { CurveChart } from './curve-chart.ts';
 import { labelPlugin } from './label-plugin.ts';
