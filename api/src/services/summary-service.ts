@@ -100,7 +100,7 @@ export class SummaryService {
 }
 
 function headline(document: SurveyDocument, roomId: string, limits: readonly Limit[]): Omit<ComputedSummary, 'mark'> {
-  const tally = estimateRoom(roomInput(document, roomId, limits));
+  const tally = estimateRoom(roomInput(document, roomId, limits), { spread: false });
   const { standing, ratio } = worstStanding(tally.limits);
   let entries = 0;
   for (const entry of document.entries.values()) if (entry.room_id === roomId) entries += 1;

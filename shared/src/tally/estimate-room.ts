@@ -15,12 +15,18 @@ import { roomSection } from './room-section.ts';
 import type { RoomTally } from './room-tally.ts';
 import type { TallyContext } from './tally-context.ts';
 
+export interface TallyOptions {
+  readonly workings?: boolean;
+  readonly spread?: boolean;
+}
+
 /**
  * The tally of one room: synchronous and pure. What cannot be computed is absent and listed in `missing`, never zero.
  * @param input as `parseRoomInput` returns it, or as built from the survey document
- * @param options `workings: true` adds inputs, steps and sources to every estimate
+ * @param options `workings: true` adds inputs, steps and sources to every estimate; `spread: false` leaves out which entry
+ * ignites which, for callers that need the rest many times a second
  */
-export function estimateRoom(input: RoomInput, options: { readonly workings?: boolean } = {}): RoomTally {
+export function estimateRoom(input: RoomInput, options: TallyOptions = {}): RoomTally {
   const context: TallyContext = { workings: options.workings ?? false, missing: [] };
   const areas = roomAreas(input.room, context);
   const openings = roomOpenings(input.room, areas, context);
@@ -32,12 +38,14 @@ export function estimateRoom(input: RoomInput, options: { readonly workings?: bo
   const room = roomSection({ input, areas, openings, linings, growth }, context);
   const burnout = burnoutSection({ input, areas, openings, linings, heats, growth: chosen.growth, load }, context);
   const limits = limitsSection(input, { load, growth, burnout }, context);
-  noteLaterSections(context);
+  noteLaterSections(context, options.spread ?? true);
   return {
     room,
     load,
     growth,
     burnout,
+    response: {},
+    air: {},
     limits,
     cautions: cautionsFor(['load', 'growth', 'room', 'burnout', 'limits']).map(({ id }) => id),
     missing: context.missing,

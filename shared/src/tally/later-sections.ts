@@ -12,6 +12,7 @@ const LATER = [
 ] as const;
 
 /** Names the parts of the contract that this version of the engine does not compute. */
-export function noteLaterSections(context: TallyContext): void {
-  for (const path of LATER) noteMissing(context, path, 'engine', 'Not computed by this version.');
+export function noteLaterSections(context: TallyContext, spread: boolean): void {
+  const paths = LATER.filter((path) => spread || !path.startsWith('spread.'));
+  for (const path of paths) noteMissing(context, path, 'engine', 'Not computed by this version.');
 }

@@ -1,4 +1,5 @@
 import type { Estimate } from '../methods/estimate.ts';
+import type { SpreadDefault } from '../spread/spread-defaults.ts';
 
 /** The tally of one room: names and units of the estimate contract. A section's absent number is listed in `missing`. */
 export interface RoomTally {
@@ -60,11 +61,86 @@ export interface RoomTally {
     readonly asKept?: BurnoutCase;
     readonly design?: BurnoutCase;
   };
+  /** On the design curve of the room. */
+  readonly response: {
+    readonly sprinkler?: Estimate;
+    /** The first of the detectors that are there. */
+    readonly detector?: Estimate;
+    /** Each on its own where heat and smoke detectors are both there. */
+    readonly heatDetector?: Estimate;
+    readonly smokeDetector?: Estimate;
+  };
+  /** What the air of the room allows and what becomes of it, every opening taken as closed. */
+  readonly air: {
+    /** To 13 % oxygen, MJ; then to 15 % and to 10 %. */
+    readonly oxygenLimitedHeat?: Estimate;
+    readonly oxygenLimitedHeatAt15?: Estimate;
+    readonly oxygenLimitedHeatAt10?: Estimate;
+    /** When the design curve has used up that heat, s; only where no opening is open or would break. */
+    readonly oxygenEnd?: Estimate;
+    /** Mass burnt at which signs that reflect, or that shine, are seen 10 m away, kg. */
+    readonly massForVisibility10m?: Estimate;
+    readonly massForVisibility10mShining?: Estimate;
+    /** At the oxygen limit, ppm: with the yields of a fire with enough air, and with 0.2 kg/kg. */
+    readonly carbonMonoxide?: Estimate;
+    readonly carbonMonoxideShortOfAir?: Estimate;
+  };
+  /** Which entry ignites which; left out where it was not asked for. */
+  readonly spread?: SpreadTally;
   readonly limits: readonly LimitStanding[];
   readonly cautions: readonly string[];
   readonly missing: readonly Missing[];
   /** Engine id and version, kept with stored summaries. */
   readonly engine: string;
+}
+
+export interface SpreadTally {
+  /** In order of time. */
+  readonly events?: readonly SpreadTallyEvent[];
+  /** Pairs that stand nearer than what is enough, largest shortfall first. */
+  readonly gaps?: readonly SpreadTallyGap[];
+  /** Ordered pairs within 10 m that were looked at. */
+  readonly pairs?: number;
+  /** `[[s, kW], …]`; its area equals `heatReleased` within 0.1 %. */
+  readonly curve?: readonly (readonly [number, number])[];
+  /** Id of the entry that burns first. */
+  readonly first?: string;
+  readonly firstChosen?: 'given' | 'worst';
+  /** s, or never */
+  readonly flashover?: Estimate;
+  /** kW */
+  readonly peak?: Estimate;
+  /** s */
+  readonly end?: Estimate;
+  /** MJ */
+  readonly heatReleased?: Estimate;
+  /** Heat of entries that stay unlit or that the air does not suffice for, MJ. */
+  readonly unburnt?: Estimate;
+  readonly defaults?: readonly SpreadDefault[];
+  readonly layerIncluded?: boolean;
+}
+
+export interface SpreadTallyEvent {
+  /** The entry that lights; null for `starved`, which is the room's. */
+  readonly id: string | null;
+  readonly t: Estimate;
+  readonly cause: 'first' | 'radiation' | 'layer' | 'flame' | 'flashover' | 'starved';
+  /** At ignition, kW/m²; absent where no flux lit it. */
+  readonly flux?: Estimate;
+  /** The burning entry that radiated most onto it. */
+  readonly from?: string | null;
+  /** Nearer than 2.5 diameters, where the point source has not been tested. */
+  readonly nearField?: boolean;
+}
+
+/** Clear distances on the plan, m; `never` where no distance helps. */
+export interface SpreadTallyGap {
+  readonly from: string;
+  readonly to: string;
+  readonly gap_m: Estimate;
+  readonly just_not_m: Estimate;
+  readonly enough_m: Estimate;
+  readonly long_exposure_m: Estimate;
 }
 
 export interface FlashoverCriterion extends Estimate {

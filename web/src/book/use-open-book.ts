@@ -38,7 +38,7 @@ export function useOpenBook(surveyId: string): Opening {
       setOpening({ state: 'open', ...book });
       // The engine and its catalogue come after the plan: one can draw before they are here.
       const { estimateRoom } = await import('@embertally/shared/tally/estimate-room');
-      book.session.provideEngine((input) => estimateRoom(input));
+      book.session.provideEngine((input) => estimateRoom(input, { spread: false }));
     };
     open().catch((error: unknown) => {
       if (stop.signal.aborted) return;
