@@ -1,0 +1,14 @@
+import { z } from 'zod/mini';
+
+/** Text of at least one and at most `most` characters. */
+export const someText = (most: number) => z.string().check(z.minLength(1), z.maxLength(most));
+
+export const positive = (most: number) => z.number().check(z.positive(), z.maximum(most));
+
+export const atLeastZero = (most: number) => z.number().check(z.minimum(0), z.maximum(most));
+
+/** A share of a mass in percent. */
+export const percent = z.number().check(z.minimum(0), z.maximum(100));
+
+/** Largest heat of any fuel with room to spare, MJ/kg: hydrogen has 142 gross. */
+export const MOST_MJ_KG = 150;
