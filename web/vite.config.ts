@@ -17,6 +17,9 @@ export default defineConfig({
     // Names every chunk and what it imports: the size figures are computed from it.
     manifest: true,
     rolldownOptions: {
+      // Reading a property does nothing in any module we have; without this the parts of the chart library that are
+      // never registered stay, because they copy each other's defaults.
+      treeshake: { propertyReadSideEffects: false },
       output: {
         codeSplitting: {
           groups: [

@@ -19,9 +19,12 @@ function kilobytes(files: ReadonlySet<string>): number {
   return bytes / 1000;
 }
 
+/** Another page, fetched when it is gone to: its script is no part of the page that links there. */
+const isPage = (key: string): boolean => /\/pages\/[a-z-]+-page\.tsx$/.test(key);
+
 /**
  * Script a browser loads on the way: the entry and the sign-in page; the entry and the Book's page (the plan can be
- * edited); the Book with everything it loads afterwards.
+ * edited); the Book with everything it loads afterwards, its worker included.
  */
 export function benchBundle(): Promise<readonly BenchRow[]> {
   const manifest = JSON.parse(readFileSync(join(dist, '.vite', 'manifest.json'), 'utf8')) as Record<string, Chunk>;
@@ -34,7 +37,7 @@ export function benchBundle(): Promise<readonly BenchRow[]> {
       seen.add(key);
       files.add(chunk.file);
       chunk.imports?.forEach(visit);
-      if (dynamic) chunk.dynamicImports?.forEach(visit);
+      if (dynamic) chunk.dynamicImports?.filter((below) => !isPage(below)).forEach(visit);
     };
     starts.forEach(visit);
     return files;

@@ -281,6 +281,14 @@ describe('the table of contents', () => {
     const table = screen.getByRole('table', { name: /5000 entries in Dock/ });
     expect(table.getAttribute('aria-rowcount')).toBe('5001');
     expect(table.querySelectorAll('tr').length).toBeLessThan(120);
+    expect(screen.queryByRole('button', { name: 'E2500' })).toBeNull();
+
+    const box = screen.getByRole('region', { name: 'Contents of Dock' });
+    box.scrollTop = 2500 * 46;
+    fireEvent.scroll(box);
+    expect(screen.getByRole('button', { name: 'E2500' })).toBeTruthy();
+    expect(screen.queryByRole('button', { name: 'E0' })).toBeNull();
+    expect(table.querySelectorAll('tr').length).toBeLessThan(120);
   });
 });
 

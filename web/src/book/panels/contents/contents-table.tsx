@@ -1,20 +1,19 @@
 import { editEntries } from '@embertally/shared/survey/commands/edit-entries';
 import type { Entry, Room } from '@embertally/shared/survey/survey-document';
 import { displayUnit } from '@embertally/shared/units/display-unit';
-import { useVirtualizer } from '@tanstack/react-virtual';
 import { lazy, Suspense, useCallback, useMemo, useRef, useState } from 'react';
 import { useUnits } from '../../../lib/units-context.ts';
 import { useBook } from '../../session/use-book.ts';
 import { useRoomTally } from '../../session/use-room-tally.ts';
 import { useRunBack } from '../run-back.ts';
 import { useRowFocus } from '../use-row-focus.ts';
+import { useRowsInView } from '../use-rows-in-view.ts';
 import { EntryRow } from './entry-row.tsx';
 
 const EntryDialog = lazy(() => import('./entry-dialog.tsx').then((module) => ({ default: module.EntryDialog })));
 
 /** From so many rows on only those in sight are in the page. */
 const LONG = 200;
-const ROW_PX = 46;
 
 interface ContentsTableProps {
   readonly room: Room;
@@ -37,22 +36,15 @@ export function ContentsTable({ room, entries, canEdit }: ContentsTableProps) {
     [tally],
   );
   const pickedIds = useMemo(() => new Set(picked.map((one) => one.id)), [picked]);
-  const virtual = useVirtualizer({
-    count: entries.length,
-    getScrollElement: () => scroll.current,
-    estimateSize: () => ROW_PX,
-    overscan: 12,
-    enabled: long,
-  });
+  const inView = useRowsInView(scroll, entries.length);
+  const { from, to } = long ? inView : { from: 0, to: entries.length };
+  const before_px = long ? inView.before_px : 0;
+  const after_px = long ? inView.after_px : 0;
   const edit = useCallback(
     (entry: Entry, patch: Partial<Omit<Entry, 'id' | 'room_id'>>) =>
       runBack(editEntries, { entry_ids: [entry.id], patch }, `Changed ${entry.label}`),
     [runBack],
   );
-  const items = virtual.getVirtualItems();
-  const before = long ? (items[0]?.start ?? 0) : 0;
-  const after = long ? virtual.getTotalSize() - (items.at(-1)?.end ?? 0) : 0;
-  const shown = long ? items.map((item) => item.index) : entries.map((_entry, index) => index);
   const symbol = (unit: string): string => displayUnit(unit, units)?.symbol ?? unit;
   const opened = open === null ? undefined : entries.find((entry) => entry.id === open);
 
@@ -96,31 +88,27 @@ export function ContentsTable({ room, entries, canEdit }: ContentsTableProps) {
             </tr>
           </thead>
           <tbody role="rowgroup">
-            {before > 0 && (
+            {before_px > 0 && (
               <tr aria-hidden="true">
-                <td colSpan={7} style={{ height: before, padding: 0 }} />
+                <td colSpan={7} style={{ height: before_px, padding: 0 }} />
               </tr>
             )}
-            {shown.map((index) => {
-              const entry = entries[index];
-              if (entry === undefined) return null;
-              return (
-                <EntryRow
-                  key={entry.id}
-                  entry={entry}
-                  heat_MJ={heats.get(entry.id) ?? null}
-                  canEdit={canEdit}
-                  picked={pickedIds.has(entry.id)}
-                  rowIndex={long ? index + 2 : undefined}
-                  edit={edit}
-                  onOpen={setOpen}
-                  onLeave={focusAfter}
-                />
-              );
-            })}
-            {after > 0 && (
+            {entries.slice(from, to).map((entry, index) => (
+              <EntryRow
+                key={entry.id}
+                entry={entry}
+                heat_MJ={heats.get(entry.id) ?? null}
+                canEdit={canEdit}
+                picked={pickedIds.has(entry.id)}
+                rowIndex={long ? from + index + 2 : undefined}
+                edit={edit}
+                onOpen={setOpen}
+                onLeave={focusAfter}
+              />
+            ))}
+            {after_px > 0 && (
               <tr aria-hidden="true">
-                <td colSpan={7} style={{ height: after, padding: 0 }} />
+                <td colSpan={7} style={{ height: after_px, padding: 0 }} />
               </tr>
             )}
           </tbody>
