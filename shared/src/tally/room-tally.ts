@@ -1,4 +1,5 @@
 import type { Estimate } from '../methods/estimate.ts';
+import type { RoomUncertainty } from '../uncertainty/room-uncertainty.ts';
 import type { SpreadDefault } from '../spread/spread-defaults.ts';
 
 /** The tally of one room: names and units of the estimate contract. A section's absent number is listed in `missing`. */
@@ -87,6 +88,8 @@ export interface RoomTally {
   };
   /** Which entry ignites which; left out where it was not asked for. */
   readonly spread?: SpreadTally;
+  /** Only with `options.samples`. */
+  readonly uncertainty?: RoomUncertainty;
   readonly limits: readonly LimitStanding[];
   readonly cautions: readonly string[];
   readonly missing: readonly Missing[];

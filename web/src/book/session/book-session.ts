@@ -222,6 +222,11 @@ export class BookSession {
     return this.#tallies.read(this.#state.document, roomId, this.#state.limits);
   }
 
+  /** What that tally is made from, for calculations in the background; the same object until the room changes. */
+  roomInput(roomId: string): RoomInput | null {
+    return this.#tallies.input(this.#state.document, roomId, this.#state.limits);
+  }
+
   #step(direction: 'undo' | 'redo'): void {
     if (!this.#state.canEdit) return;
     const step = this.#history[direction](this.#state.document);

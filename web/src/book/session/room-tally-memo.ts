@@ -10,11 +10,14 @@ import type { RoomTally } from '@embertally/shared/tally/room-tally';
 export interface RoomTallyMemo {
   use(estimate: (input: RoomInput) => RoomTally): void;
   read(document: SurveyDocument, roomId: string, limits: readonly Limit[]): RoomTally | null;
+  /** What the tally is made from; the same object until something it is made of changes. */
+  input(document: SurveyDocument, roomId: string, limits: readonly Limit[]): RoomInput | null;
 }
 
 interface Kept {
   readonly parts: readonly unknown[];
-  readonly tally: RoomTally;
+  readonly input: RoomInput;
+  tally: RoomTally | null;
 }
 
 /**
@@ -24,6 +27,15 @@ interface Kept {
 export function roomTallyMemo(): RoomTallyMemo {
   const kept = new Map<string, Kept>();
   let engine: ((input: RoomInput) => RoomTally) | null = null;
+  const keep = (document: SurveyDocument, roomId: string, limits: readonly Limit[]): Kept | null => {
+    const parts = partsOf(document, roomId, limits);
+    if (parts === null) return null;
+    const before = kept.get(roomId);
+    if (before !== undefined && same(before.parts, parts)) return before;
+    const now = { parts, input: roomInput(document, roomId, limits), tally: null };
+    kept.set(roomId, now);
+    return now;
+  };
   return {
     use(estimate) {
       engine = estimate;
@@ -31,13 +43,13 @@ export function roomTallyMemo(): RoomTallyMemo {
     },
     read(document, roomId, limits) {
       if (engine === null) return null;
-      const parts = partsOf(document, roomId, limits);
-      if (parts === null) return null;
-      const before = kept.get(roomId);
-      if (before !== undefined && same(before.parts, parts)) return before.tally;
-      const tally = engine(roomInput(document, roomId, limits));
-      kept.set(roomId, { parts, tally });
-      return tally;
+      const room = keep(document, roomId, limits);
+      if (room === null) return null;
+      room.tally ??= engine(room.input);
+      return room.tally;
+    },
+    input(document, roomId, limits) {
+      return keep(document, roomId, limits)?.input ?? null;
     },
   };
 }
