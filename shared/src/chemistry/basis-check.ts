@@ -66,7 +66,7 @@ export function checkBasis(atoms: Atoms, net_kJ_mol: number): BasisCheck {
     return judged('genuine-exception', null, `For ${exception.name} this unusual heat per kg of oxygen is genuine.`);
   if (!exception && perOxygen >= BAND[0] && perOxygen <= BAND[1])
     return judged('plausible', null, 'Heat per kg of oxygen as fuels have it.');
-  if (!exception && atoms.N > 0 && atoms.O >= 2 * atoms.N)
+  if (!exception && perOxygen > BAND[1] && net_kJ_mol / (OXYGEN_G_MOL * (O2 + nitroOxygen(atoms))) <= BAND[1])
     return judged(
       'own-oxygen',
       null,
@@ -97,6 +97,11 @@ export function checkBasis(atoms: Atoms, net_kJ_mol: number): BasisCheck {
       `${exception.name} has about ${exception.perOxygen} MJ per kg of oxygen; check whether the value is for another fuel.`,
     );
   return judged('implausible', null, 'No simple mistake explains it: check formula, phase, and net against gross.');
+}
+
+/** Oxygen, mol, that nitro and nitrate groups would bring along if all nitrogen sat in them: three atoms each at most. */
+function nitroOxygen(atoms: Atoms): number {
+  return atoms.O >= 2 * atoms.N ? Math.min(atoms.O, 3 * atoms.N) / 2 : 0;
 }
 
 /** Just above the band as given, inside it without the water's heat. */

@@ -6,7 +6,7 @@ import { ATOM_INPUTS } from './atom-inputs.ts';
 /** Whether a claimed net heat fits the formula; names the likely mistake and proposes a factor, applies nothing. */
 export const basisDetector = defineMethod({
   id: 'chemistry.basis-detector',
-  version: 1,
+  version: 2,
   title: 'Basis of a claimed heat',
   symbol: 'E',
   unit: 'MJ/kg',
@@ -25,7 +25,7 @@ export const basisDetector = defineMethod({
   ],
   assumptions: [
     'Acetylene, hydrogen, carbon monoxide, formaldehyde, hydrogen cyanide, hydrogen sulfide and sulfur are really outside the band.',
-    'A formula with two or more oxygen per nitrogen may carry its own oxygen and is not judged.',
+    'A high heat is not judged where the oxygen of nitro and nitrate groups, three atoms per nitrogen, would explain it.',
   ],
   why: 'A value for two moles taken for one doubles a fire load and looks like any other number.',
   outOfRange: 'refuse',
