@@ -2,8 +2,9 @@ import { KINDS } from '@embertally/shared/catalogue/kinds';
 import { LININGS } from '@embertally/shared/catalogue/linings';
 import { MATERIALS } from '@embertally/shared/catalogue/materials';
 import { USES } from '@embertally/shared/catalogue/uses';
-import { listKinds, listLinings, listMaterials, listUses } from '@embertally/shared/contracts/catalogue';
+import { listKinds, listLinings, listUses } from '@embertally/shared/contracts/catalogue';
 import type { Contract } from '@embertally/shared/contracts/contract';
+import { listMaterials } from '@embertally/shared/contracts/materials';
 import { defineRoute, type Route } from '../http/define-route.ts';
 
 /** Rows of the catalogue as plain JSON values. */
@@ -14,7 +15,10 @@ function listRoute(contract: Contract, rows: readonly object[]): Route {
 
 export function catalogueRoutes(): Route[] {
   return [
-    listRoute(listMaterials, MATERIALS),
+    listRoute(
+      listMaterials,
+      MATERIALS.map((row) => ({ ...row, own: null })),
+    ),
     listRoute(listKinds, KINDS),
     listRoute(listLinings, LININGS),
     listRoute(listUses, USES),

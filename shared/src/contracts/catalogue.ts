@@ -1,38 +1,13 @@
 import { z } from 'zod/mini';
+import { ignitionField, sourceField, wordsField } from './catalogue-fields.ts';
 import { defineContract } from './contract.ts';
 
-const source = z.strictObject({ title: z.string(), locator: z.string(), fromMemory: z.boolean() });
-const range = z.strictObject({ typical: z.number(), low: z.number(), high: z.number() });
-const words = z.array(z.string());
 const growth = z.enum(['slow', 'medium', 'fast', 'ultra-fast']);
-const ignition = z.enum(['easy', 'normal', 'hard', 'resistant']);
-
-export const materialSchema = z.strictObject({
-  key: z.string(),
-  label: z.string(),
-  synonyms: words,
-  group: z.string(),
-  net_heat_MJ_kg: z.number(),
-  low_MJ_kg: z.number(),
-  high_MJ_kg: z.number(),
-  gross_heat_MJ_kg: z.nullable(z.number()),
-  formula: z.nullable(z.string()),
-  cellulosic: z.boolean(),
-  combustion_factor: z.number(),
-  ignition_class: ignition,
-  radiative_fraction: z.number(),
-  soot_yield: z.nullable(z.number()),
-  co_yield: z.nullable(z.number()),
-  bulk_density_kg_m3: z.nullable(range),
-  moisture_pct_dry: z.nullable(z.number()),
-  hazards: words,
-  source,
-});
 
 export const kindSchema = z.strictObject({
   key: z.string(),
   label: z.string(),
-  synonyms: words,
+  synonyms: wordsField,
   group: z.string(),
   parts: z.array(z.strictObject({ material: z.string(), mass_kg: z.number() })),
   mass_low_kg: z.number(),
@@ -43,18 +18,18 @@ export const kindSchema = z.strictObject({
   growth: z.nullable(growth),
   peak_kW: z.nullable(z.number()),
   radiative_fraction: z.nullable(z.number()),
-  ignition_class: ignition,
+  ignition_class: ignitionField,
   enclosure: z.enum(['open', 'cabinet', 'sealed']),
   keeping: z.enum(['fixed', 'stored', 'passing']),
   measure: z.strictObject({ by: z.string(), quantity: z.number() }),
-  hazards: words,
-  source,
+  hazards: wordsField,
+  source: sourceField,
 });
 
 export const liningRowSchema = z.strictObject({
   key: z.string(),
   label: z.string(),
-  synonyms: words,
+  synonyms: wordsField,
   layers: z.array(
     z.strictObject({
       thickness_m: z.number(),
@@ -64,30 +39,25 @@ export const liningRowSchema = z.strictObject({
       label: z.optional(z.string()),
     }),
   ),
-  source,
+  source: sourceField,
 });
 
 export const useSchema = z.strictObject({
   key: z.string(),
   label: z.string(),
-  synonyms: words,
+  synonyms: wordsField,
   growth,
   rhr_kW_m2: z.nullable(z.number()),
   distribution: z.nullable(
-    z.strictObject({ kind: z.enum(['gumbel', 'lognormal']), mean_MJ_m2: z.number(), cov: z.number(), source }),
+    z.strictObject({
+      kind: z.enum(['gumbel', 'lognormal']),
+      mean_MJ_m2: z.number(),
+      cov: z.number(),
+      source: sourceField,
+    }),
   ),
   danger_of_activation: z.nullable(z.number()),
-  source,
-});
-
-export const listMaterials = defineContract({
-  id: 'materials.list',
-  method: 'GET',
-  path: '/api/materials',
-  summary: 'Built-in materials with their heats and sources',
-  policy: { kind: 'signed-in' },
-  response: z.strictObject({ items: z.array(materialSchema) }),
-  status: 200,
+  source: sourceField,
 });
 
 export const listKinds = defineContract({

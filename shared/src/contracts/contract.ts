@@ -40,6 +40,8 @@ export interface Contract<
   readonly bodyShape?: Schema;
   /** Largest body taken; 64 KiB when nothing is said. */
   readonly maxBodyBytes?: number;
+  /** The body is a file: its types by media type, each with the most bytes taken. The handler reads it as it comes in. */
+  readonly upload?: Readonly<Record<string, { readonly maxBytes: number }>>;
   /** Takes the server some work: one person may ask for it only so often. */
   readonly costly?: true;
   readonly response?: R;
@@ -47,7 +49,7 @@ export interface Contract<
   /** Mutable resource: the caller must send `If-Match` with the strong ETag it read. */
   readonly ifMatch?: true;
   /** Answers that are not JSON (PDF, event stream) are named by media type and have no response schema. */
-  readonly media?: 'application/pdf' | 'text/event-stream' | 'text/html';
+  readonly media?: 'application/pdf' | 'application/octet-stream' | 'text/event-stream' | 'text/html';
 }
 
 export function defineContract<

@@ -30,6 +30,14 @@ const ORGANISATION_ACTIONS = {
   'organisation.read': ['admin', 'member'],
   'organisation.edit': ['admin'],
   'site.create': ['admin', 'member'],
+  'material.read': ['admin', 'member'],
+  'material.write': ['admin', 'member'],
+  /** Put forward one's own, approve or return another's, withdraw. Nobody approves what they wrote. */
+  'material.decide': ['admin', 'member'],
+  /** Throw away another member's draft. */
+  'material.discard-of-others': ['admin'],
+  'file.send': ['admin', 'member'],
+  'file.read': ['admin', 'member'],
 } as const satisfies Record<string, readonly OrganisationRole[]>;
 
 export type SiteAction = keyof typeof SITE_ACTIONS;

@@ -1,4 +1,5 @@
-import { kindSchema, listKinds, listMaterials, materialSchema } from '@embertally/shared/contracts/catalogue';
+import { kindSchema, listKinds } from '@embertally/shared/contracts/catalogue';
+import { listMaterials, materialSchema } from '@embertally/shared/contracts/materials';
 import { listCautions } from '@embertally/shared/contracts/cautions';
 import { readCurrentSession } from '@embertally/shared/contracts/sessions';
 import { fireEvent, screen, within } from '@testing-library/react';
@@ -34,6 +35,7 @@ function material(key: string, label: string, heat: number, change: Partial<Mate
     moisture_pct_dry: null,
     hazards: [],
     source: SOURCE,
+    own: null,
     ...change,
   });
 }

@@ -1,4 +1,4 @@
-import { listMaterials, type materialSchema } from '@embertally/shared/contracts/catalogue';
+import { listMaterials, type materialSchema } from '@embertally/shared/contracts/materials';
 import { queryOptions } from '@tanstack/react-query';
 import type { z } from 'zod/mini';
 import { call } from '../../../lib/api-client.ts';
