@@ -1,13 +1,14 @@
 import tailwindcss from '@tailwindcss/vite';
 import react from '@vitejs/plugin-react';
 import { defineConfig } from 'vite';
+import { shareWorkerChunks } from './share-worker-chunks.ts';
 
 /** Where the API answers while the client is served by Vite; in production one process serves both. */
 const api = process.env.API_URL ?? 'http://127.0.0.1:3000';
 
 export default defineConfig({
   root: import.meta.dirname,
-  plugins: [react(), tailwindcss()],
+  plugins: [shareWorkerChunks(), react(), tailwindcss()],
   server: { host: '127.0.0.1', proxy: { '/api': { target: api, changeOrigin: false } } },
   build: {
     target: 'es2022',

@@ -50,7 +50,8 @@ export function benchBundle(): Promise<readonly BenchRow[]> {
   const entry = 'index.html';
   const signIn = reach([entry, page('sign-in-page')], false);
   const editable = reach([entry, page('book-page')], false);
-  const book = new Set([...editable, ...reach([page('book-page')], true)]);
+  const workers = Object.keys(manifest).filter((key) => key.endsWith('-worker.ts'));
+  const book = new Set([...editable, ...reach([page('book-page'), ...workers], true)]);
   return Promise.resolve([
     atMost('script of the first route (sign-in), gzip', kilobytes(signIn), 'kB', 170),
     atMost('script before the plan can be edited, gzip', kilobytes(editable), 'kB', 300),
