@@ -10,7 +10,7 @@ import { addEntries } from '@embertally/shared/survey/commands/add-entries';
 import { drawRoom } from '@embertally/shared/survey/commands/draw-room';
 import { newEntryFromKind } from '@embertally/shared/survey/new-entry';
 import { fromStored } from '@embertally/shared/survey/stored';
-import { surveyDocumentV1 } from '@embertally/shared/survey/versions/v1';
+import { surveyDocument } from '@embertally/shared/survey/versions/v2';
 import type { Entry, SurveyDocument } from '@embertally/shared/survey/survey-document';
 import { TestApp, type TestBook, type TestPerson } from '../support/test-app.ts';
 
@@ -132,7 +132,7 @@ describe('rooms put together from published items', () => {
     inspector = await app.person('Nell Farrow', 'Fire Office');
     book = await app.book(inspector);
     const answer = await inspector.visitor.get(`/api/surveys/${book.surveyId}/document`).expect(200);
-    document = fromStored(surveyDocumentV1.parse(answer.body));
+    document = fromStored(surveyDocument.parse(answer.body));
   });
   afterAll(() => app.close());
 

@@ -131,6 +131,7 @@ export function crate(name: string, room: string, x_m: number, y_m: number, more
     ignites_at_kW_m2: null,
     note: '',
     photos: [],
+    measure: null,
     recorded_by: null,
     recorded_at: null,
     confirmed_by: null,

@@ -35,6 +35,7 @@ export class Entry {
   @Column({ type: 'timestamptz', nullable: true }) recorded_at!: Date | null;
   @Column({ type: 'text', nullable: true }) confirmed_by!: string | null;
   @Column({ type: 'timestamptz', nullable: true }) confirmed_at!: Date | null;
+  @Column({ type: 'jsonb', nullable: true }) measure!: unknown;
   @Column({ type: 'integer' }) version!: number;
 
   @ManyToOne(() => Room, { onDelete: 'CASCADE' })

@@ -22,6 +22,9 @@ export class Room {
   @Column({ type: 'double precision' }) roof_vents_m2!: number;
   @Column({ type: 'text' }) roof_vents_state!: string;
   @Column({ type: 'text' }) notes!: string;
+  @Column({ type: 'jsonb', nullable: true }) assumptions!: unknown;
+  @Column({ type: 'jsonb' }) photos!: unknown;
+  @Column({ type: 'text' }) to_do!: string;
   @Column({ type: 'integer' }) version!: number;
 
   @ManyToOne(() => Storey, { onDelete: 'CASCADE' })

@@ -1,4 +1,5 @@
 import { FirstTables1764547200000 } from './first-tables.ts';
+import { SurveySecondShape1764590400000 } from './survey-second-shape.ts';
 
 /** Oldest first. A released migration is never edited; a change is a new one. */
-export const ALL_MIGRATIONS = [FirstTables1764547200000];
+export const ALL_MIGRATIONS = [FirstTables1764547200000, SurveySecondShape1764590400000];

@@ -1,5 +1,5 @@
 import type { Limit } from '@embertally/shared/contracts/limits';
-import type { SurveyDocumentV1 } from '@embertally/shared/survey/versions/v1';
+import type { SurveyDocumentV2 } from '@embertally/shared/survey/versions/v2';
 
 /** A limit as a report prints it: the bound, who set it, where it stands and since when. */
 export type ReportLimit = Pick<Limit, 'room_id' | 'quantity' | 'bound' | 'source' | 'set_by' | 'since'>;
@@ -21,7 +21,7 @@ export interface ReportInput {
   /** IANA name of the site's time zone: dates are printed as that site's days. */
   readonly time_zone: string;
   readonly units: 'SI' | 'US';
-  readonly document: SurveyDocumentV1;
+  readonly document: SurveyDocumentV2;
   /** Limits of the building; those of rooms not in the document are left out. */
   readonly limits: readonly ReportLimit[];
 }

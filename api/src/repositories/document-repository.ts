@@ -1,5 +1,5 @@
 import type { EntityKind } from '@embertally/shared/survey/survey-document';
-import type { SurveyDocumentV1 } from '@embertally/shared/survey/versions/v1';
+import type { SurveyDocumentV2 } from '@embertally/shared/survey/versions/v2';
 import { columnDefinitions, columnNames, documentColumns } from './row-columns.ts';
 import { SqlRepository } from './sql-repository.ts';
 
@@ -7,7 +7,7 @@ const list = (kind: EntityKind, where: string): string =>
   `coalesce((SELECT json_agg(t) FROM (SELECT ${documentColumns(kind)} FROM "${kind}" WHERE survey_id = $1 AND ${where} ORDER BY id) t), '[]'::json)`;
 
 const documentSql = (where: Readonly<Record<EntityKind, string>>): string => `
-  SELECT json_build_object('schema_version', 1, 'survey_id', v.id, 'sequence', v.sequence,
+  SELECT json_build_object('schema_version', 2, 'survey_id', v.id, 'sequence', v.sequence,
     'storeys', ${list('storey', where.storey)}, 'corners', ${list('corner', where.corner)},
     'rooms', ${list('room', where.room)}, 'openings', ${list('opening', where.opening)},
     'entries', ${list('entry', where.entry)})::text AS document
@@ -65,7 +65,7 @@ export class DocumentRepository extends SqlRepository {
   }
 
   /** The rooms entries are in or go to, with their corners, and the entries themselves. */
-  contents(surveyId: string, roomIds: readonly string[], entryIds: readonly string[]): Promise<SurveyDocumentV1> {
+  contents(surveyId: string, roomIds: readonly string[], entryIds: readonly string[]): Promise<SurveyDocumentV2> {
     return this.read(CONTENTS, [surveyId, roomIds, entryIds]);
   }
 
@@ -75,12 +75,12 @@ export class DocumentRepository extends SqlRepository {
     storeyIds: readonly string[],
     entryIds: readonly string[],
     allEntries: boolean,
-  ): Promise<SurveyDocumentV1> {
+  ): Promise<SurveyDocumentV2> {
     return this.read(STOREYS, [surveyId, storeyIds, entryIds, allEntries]);
   }
 
   /** What the tallies of some rooms need. */
-  forTallies(surveyId: string, roomIds: readonly string[]): Promise<SurveyDocumentV1> {
+  forTallies(surveyId: string, roomIds: readonly string[]): Promise<SurveyDocumentV2> {
     return this.read(TALLIES, [surveyId, roomIds]);
   }
 
@@ -129,9 +129,9 @@ export class DocumentRepository extends SqlRepository {
     await this.rows(`DELETE FROM "${kind}" WHERE survey_id = $1 AND id = ANY($2::uuid[])`, [surveyId, ids]);
   }
 
-  private async read(sql: string, values: readonly unknown[]): Promise<SurveyDocumentV1> {
+  private async read(sql: string, values: readonly unknown[]): Promise<SurveyDocumentV2> {
     const found = await this.row<{ document: string }>(sql, values);
     if (found === null) throw new Error('The survey went away inside its own transaction.');
-    return JSON.parse(found.document) as SurveyDocumentV1;
+    return JSON.parse(found.document) as SurveyDocumentV2;
   }
 }

@@ -32,6 +32,9 @@ export const ROW_COLUMNS: Readonly<Record<EntityKind, Readonly<Record<string, Sq
     roof_vents_m2: 'double precision',
     roof_vents_state: 'text',
     notes: 'text',
+    assumptions: 'jsonb',
+    photos: 'jsonb',
+    to_do: 'text',
   },
   opening: {
     id: 'uuid',
@@ -75,6 +78,7 @@ export const ROW_COLUMNS: Readonly<Record<EntityKind, Readonly<Record<string, Sq
     recorded_at: 'timestamptz',
     confirmed_by: 'text',
     confirmed_at: 'timestamptz',
+    measure: 'jsonb',
   },
 };
 

@@ -1,6 +1,6 @@
 import type { Change, Changes } from '@embertally/shared/survey/change';
 import type { EntityKind } from '@embertally/shared/survey/survey-document';
-import type { SurveyDocumentV1 } from '@embertally/shared/survey/versions/v1';
+import type { SurveyDocumentV2 } from '@embertally/shared/survey/versions/v2';
 import type { DocumentRepository, TouchedIds } from '../repositories/document-repository.ts';
 
 /** A field on either side of a change, when it holds an id. */
@@ -30,7 +30,7 @@ export async function loadTouched(
   documents: DocumentRepository,
   surveyId: string,
   changes: Changes,
-): Promise<SurveyDocumentV1> {
+): Promise<SurveyDocumentV2> {
   const of = (kind: EntityKind): string[] =>
     changes.filter((change) => change.kind === kind).map((change) => change.id);
   const touched: TouchedIds = {

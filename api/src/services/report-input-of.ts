@@ -1,4 +1,4 @@
-import type { SurveyDocumentV1 } from '@embertally/shared/survey/versions/v1';
+import type { SurveyDocumentV2 } from '@embertally/shared/survey/versions/v2';
 import type { Statements } from '../repositories/database.ts';
 import { DocumentRepository } from '../repositories/document-repository.ts';
 import type { ExportRow } from '../repositories/export-repository.ts';
@@ -21,7 +21,7 @@ export async function reportInput(statements: Statements, row: ExportRow): Promi
     made_at: row.created_at.toISOString(),
     time_zone: survey.site.time_zone,
     units: row.units,
-    document: JSON.parse(text) as SurveyDocumentV1,
+    document: JSON.parse(text) as SurveyDocumentV2,
     limits: limits.map(({ room_id, quantity, bound, source, set_by, since }) => ({
       room_id,
       quantity,

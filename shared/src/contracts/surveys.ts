@@ -1,6 +1,6 @@
 import { z } from 'zod/mini';
 import { MAX_CHANGE_SET_BYTES, changeSchema, changeSetBodySchema } from '../survey/change.ts';
-import { surveyDocumentV1 } from '../survey/versions/v1.ts';
+import { surveyDocument } from '../survey/versions/v2.ts';
 import { defineContract } from './contract.ts';
 import { siteRoleSchema } from './sites.ts';
 
@@ -36,7 +36,7 @@ export const readDocument = defineContract({
   summary: 'The whole document; ETag "s<sequence>"',
   policy: { kind: 'site', action: 'survey.read', of: 'survey', param: 'surveyId' },
   params: surveyId,
-  response: surveyDocumentV1,
+  response: surveyDocument,
   status: 200,
 });
 

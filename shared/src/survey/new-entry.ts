@@ -99,6 +99,7 @@ function blankEntry(place: EntryPlace): Omit<Entry, 'label' | 'parts'> {
     ignites_at_kW_m2: null,
     note: '',
     photos: [],
+    measure: null,
     recorded_by: place.recorded_by,
     recorded_at: place.recorded_at,
     confirmed_by: null,

@@ -19,6 +19,9 @@ export function newRoom(
     roof_vents_m2: 0,
     roof_vents_state: 'open',
     notes: '',
+    assumptions: null,
+    photos: [],
+    to_do: '',
     ...given,
   };
 }

@@ -1,5 +1,6 @@
 import type { Change, Changes } from './change.ts';
 import { patchFaults, rowFaults, type RowFault } from './row-fault.ts';
+import { stepUpChanges } from './versions/step-up.ts';
 
 export interface ChangesFault {
   /** JSON pointer into the change set's body. */
@@ -14,9 +15,10 @@ export type ParsedChanges =
 /**
  * Holds the rows and fields of a change set against the schema of their kind: a create carries a whole row of its own
  * id, an edit the same known fields on both sides, a delete a whole row before. Two changes to one row are refused.
- * Every fault is listed.
+ * Every fault is listed. Whole rows of an older release are brought to the present form first.
  */
-export function parseChanges(changes: Changes): ParsedChanges {
+export function parseChanges(given: Changes): ParsedChanges {
+  const changes = stepUpChanges(given);
   const errors: ChangesFault[] = [];
   const seen = new Set<string>();
   for (const [index, change] of changes.entries()) {

@@ -4,6 +4,7 @@ import type {
   RoomInputEntry,
   RoomInputLimit,
   RoomInputOpening,
+  RoomInputOptions,
   RoomInputPart,
 } from '../tally/room-input.ts';
 import { clearRing } from './derive/clear-ring.ts';
@@ -12,7 +13,7 @@ import { openingsOfRoom } from './derive/openings-of-room.ts';
 import { roomHeight } from './derive/room-height.ts';
 import { roomRegion } from './derive/room-region.ts';
 import { roomsOfOpening } from './derive/rooms-of-opening.ts';
-import type { Entry, EntryPart, Opening, SurveyDocument } from './survey-document.ts';
+import type { Entry, EntryPart, Opening, Room, SurveyDocument } from './survey-document.ts';
 
 /** A bound on a room, as the limits resource gives it. */
 export type RoomLimit = RoomInputLimit & { readonly room_id: string; readonly set_by: string };
@@ -29,6 +30,8 @@ export function roomInput(document: SurveyDocument, roomId: string, limits: read
   // The rules leave no room without a clear ring; the centre lines stand in for one that came from elsewhere.
   const region = room && (clearRing(document, roomId) ?? roomRegion(document.corners, room));
   if (room === undefined || region == null) throw new RangeError(`The room ${roomId} is not in this survey.`);
+  const entries = entriesOfRoom(document, roomId);
+  const options = optionsOf(room, entries);
   return {
     room: {
       name: room.name,
@@ -47,11 +50,20 @@ export function roomInput(document: SurveyDocument, roomId: string, limits: read
       danger_of_activation: room.danger_of_activation,
       rating_min: room.rating_min,
     },
-    contents: entriesOfRoom(document, roomId).map(entryInput),
+    contents: entries.map(entryInput),
     limits: limits
       .filter((limit) => limit.room_id === roomId)
       .map(({ quantity, bound, set_by }) => ({ quantity, bound, set_by })),
+    ...(options === null ? {} : { options }),
   };
+}
+
+/** What a person assumed; a first entry that has left the room is forgotten, and the worst is sought again. */
+function optionsOf({ assumptions }: Room, entries: readonly Entry[]): RoomInputOptions | null {
+  if (assumptions === null) return null;
+  const { first_entry } = assumptions;
+  const isHere = first_entry !== null && entries.some((entry) => entry.id === first_entry);
+  return { ...assumptions, first_entry: isHere ? first_entry : null };
 }
 
 function pairs(ring: readonly Point[]): [number, number][] {

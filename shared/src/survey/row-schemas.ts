@@ -1,6 +1,6 @@
 import { z } from 'zod/mini';
 import type { EntityKind } from './survey-document.ts';
-import { corner, entry, opening, room, storey } from './versions/v1.ts';
+import { corner, entry, opening, room, storey } from './versions/v2.ts';
 
 /** What a whole row of each kind must look like. */
 export const rowSchemas = { storey, corner, room, opening, entry } as const satisfies Record<

@@ -1,12 +1,12 @@
 import type { SurveyDocument } from './survey-document.ts';
-import { SCHEMA_VERSION, type SurveyDocumentV1 } from './versions/v1.ts';
+import { SCHEMA_VERSION, type SurveyDocumentV2 } from './versions/v2.ts';
 
 function byId<R extends { readonly id: string }>(rows: readonly R[]): ReadonlyMap<string, R> {
   return new Map(rows.map((row) => [row.id, row]));
 }
 
 /** The document as commands and the tally see it, from its stored and sent form. */
-export function fromStored(stored: SurveyDocumentV1): SurveyDocument {
+export function fromStored(stored: SurveyDocumentV2): SurveyDocument {
   return {
     surveyId: stored.survey_id,
     sequence: stored.sequence,
@@ -19,7 +19,7 @@ export function fromStored(stored: SurveyDocumentV1): SurveyDocument {
 }
 
 /** The stored and sent form of the document; rows keep the order they stand in. */
-export function toStored(document: SurveyDocument): SurveyDocumentV1 {
+export function toStored(document: SurveyDocument): SurveyDocumentV2 {
   return {
     schema_version: SCHEMA_VERSION,
     survey_id: document.surveyId,

@@ -1,13 +1,12 @@
-import type { SurveyDocumentV1 } from './versions/v1.ts';
+import type { SurveyDocumentV2 } from './versions/v2.ts';
 
 /**
  * The survey document as commands, geometry and the tally see it: flat maps by id, relations by id, lengths in metres.
- * The stored and sent form is {@link SurveyDocumentV1}; `fromStored` / `toStored` convert.
+ * The stored and sent form is {@link SurveyDocumentV2}; `fromStored` / `toStored` convert.
  */
 export type {
   Corner,
   Enclosure,
-  Entry,
   EntryPart,
   Evidence,
   Keeping,
@@ -18,14 +17,14 @@ export type {
   OpeningState,
   PlanPicture,
   Protection,
-  Room,
   Storey,
 } from './versions/v1.ts';
+export type { Assumptions, Entry, Measure, Room } from './versions/v2.ts';
 
 export type EntityKind = 'storey' | 'corner' | 'room' | 'opening' | 'entry';
 export const ENTITY_KINDS: readonly EntityKind[] = ['storey', 'corner', 'room', 'opening', 'entry'];
 
-type Row<K extends keyof SurveyDocumentV1> = SurveyDocumentV1[K] extends readonly (infer R)[] ? R : never;
+type Row<K extends keyof SurveyDocumentV2> = SurveyDocumentV2[K] extends readonly (infer R)[] ? R : never;
 
 export interface SurveyDocument {
   readonly surveyId: string;

@@ -26,6 +26,9 @@ const US_CUSTOMARY: Readonly<Record<string, string>> = {
   'kg/m': 'lb/ft',
   'm^½': 'ft^½',
   'm^5/2': 'ft^5/2',
+  '(m s)1/2': '(ft s)1/2',
+  'W/mK': 'Btu/h ft °F',
+  'J/kgK': 'Btu/lb °F',
 };
 
 /** The unit in which a person reads values that are kept in `unit`; undefined when the table does not have `unit`. */

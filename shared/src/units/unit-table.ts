@@ -136,4 +136,17 @@ export const UNIT_TABLE: readonly Unit[] = [
     ['m^5/2', 'm^5/2', 1, ['m5/2']],
     ['ft^5/2', 'ft^5/2', FOOT_M ** 2.5],
   ]),
+  ...dimension('response time index', [
+    ['(m s)1/2', '(m·s)^½', 1, ['(m·s)^½', '(m·s)½']],
+    ['(ft s)1/2', '(ft·s)^½', Math.sqrt(FOOT_M), ['(ft·s)^½', '(ft·s)½']],
+  ]),
+  ...dimension('thermal conductivity', [
+    ['W/mK', 'W/mK', 1, ['w/(m·k)', 'w/(m k)']],
+    ['Btu/h ft °F', 'Btu/(h·ft·°F)', ((BTU_KJ * 1000) / 3600 / FOOT_M) * 1.8],
+  ]),
+  ...dimension('specific heat', [
+    ['J/kgK', 'J/kgK', 1, ['j/(kg·k)', 'j/(kg k)']],
+    ['kJ/kgK', 'kJ/kgK', 1000, ['kj/(kg·k)']],
+    ['Btu/lb °F', 'Btu/(lb·°F)', ((BTU_KJ * 1000) / POUND_KG) * 1.8],
+  ]),
 ];

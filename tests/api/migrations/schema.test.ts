@@ -4,6 +4,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { rowSchemas } from '@embertally/shared/survey/row-schemas';
 import { dataSource } from '../../../api/src/data-source.ts';
 import { migrate } from '../../../api/src/migrate.ts';
+import { ALL_MIGRATIONS } from '../../../api/src/migrations/all-migrations.ts';
 import { ROW_COLUMNS } from '../../../api/src/repositories/row-columns.ts';
 import { createTestDatabase, type TestDatabase } from '../../support/test-database.ts';
 
@@ -63,7 +64,7 @@ describe('the migrated database', () => {
     const other = await createTestDatabase();
     const source = dataSource({ url: other.ownerUrl, poolSize: 1 });
     await source.initialize();
-    await source.undoLastMigration({ transaction: 'each' });
+    for (const _ of ALL_MIGRATIONS) await source.undoLastMigration({ transaction: 'each' });
     const left = await source.query<{ tablename: string }[]>(
       "SELECT tablename FROM pg_tables WHERE schemaname = 'public'",
     );

@@ -8,7 +8,7 @@ import { mergeChangeSet } from '@embertally/shared/survey/merge-change-set';
 import { parseChanges } from '@embertally/shared/survey/parse-changes';
 import { fromStored, toStored } from '@embertally/shared/survey/stored';
 import { undoChanges } from '@embertally/shared/survey/undo-changes';
-import { surveyDocumentV1 } from '@embertally/shared/survey/versions/v1';
+import { surveyDocument } from '@embertally/shared/survey/versions/v2';
 import { groundFloor } from '../../support/survey-builder.ts';
 import { stepsToEdge, windsRound } from '../geometry/winding.ts';
 import { runSteps, step } from './random-commands.ts';
@@ -158,7 +158,7 @@ test('a document survives being stored and read back', () => {
     fc.property(steps, (sequence) => {
       const { document } = runSteps(groundFloor(), sequence, 's');
       const stored: unknown = JSON.parse(JSON.stringify(toStored(document)));
-      expect(fromStored(surveyDocumentV1.parse(stored))).toEqual(document);
+      expect(fromStored(surveyDocument.parse(stored))).toEqual(document);
     }),
     { ...RUNS, numRuns: 50 },
   );

@@ -1,3 +1,4 @@
+import { assumptionsOrNone, NO_ASSUMPTIONS } from '@embertally/shared/survey/no-assumptions';
 import { expect, test } from 'vitest';
 import { roomInput, type RoomLimit } from '@embertally/shared/survey/room-input';
 import { roomInputSchema } from '@embertally/shared/tally/room-input';
@@ -84,4 +85,24 @@ test('a part’s moisture means its heat is that of the dry matter', () => {
 
 test('a room that is not there is a programming error', () => {
   expect(() => roomInput(plan(), uid('none'), [])).toThrow(RangeError);
+});
+
+test('what a person assumed for the room is what the estimate takes', () => {
+  const assumptions = { ...NO_ASSUMPTIONS, growth: 'slow', fire_area_m2: 6, first_entry: uid('a') } as const;
+  const document = ran(plan(), editRoom, { room_id: uid('dock'), patch: { assumptions } });
+  const input = roomInput(document, uid('dock'), []);
+  expect(input.options).toMatchObject({ growth: 'slow', fire_area_m2: 6, first_entry: uid('a'), kc: null });
+  expect(roomInputSchema.safeParse(input)).toMatchObject({ success: true });
+  expect(roomInput(plan(), uid('dock'), []).options).toBeUndefined();
+});
+
+test('a first entry that has left the room is forgotten, not refused', () => {
+  const assumptions = { ...NO_ASSUMPTIONS, first_entry: uid('elsewhere') };
+  const document = ran(plan(), editRoom, { room_id: uid('dock'), patch: { assumptions } });
+  expect(roomInput(document, uid('dock'), []).options).toMatchObject({ first_entry: null });
+});
+
+test('assumptions that are all defaults are none', () => {
+  expect(assumptionsOrNone(NO_ASSUMPTIONS)).toBeNull();
+  expect(assumptionsOrNone({ ...NO_ASSUMPTIONS, kb: 'UK' })).toMatchObject({ kb: 'UK' });
 });

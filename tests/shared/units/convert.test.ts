@@ -27,6 +27,8 @@ const PAIRS: readonly (readonly [from: string, to: string, mathFrom: string, mat
   ['kg/m3', 'lb/ft3', 'kg/m^3', 'lbm/ft^3'],
   ['kg/m2', 'lb/ft2', 'kg/m^2', 'lbm/ft^2'],
   ['kg/m', 'lb/ft', 'kg/m', 'lbm/ft'],
+  ['W/mK', 'Btu/h ft °F', 'W/(m K)', 'BTU/(hour ft degR)'],
+  ['J/kgK', 'Btu/lb °F', 'J/(kg K)', 'BTU/(lbm degR)'],
   ['min', 's', 'minute', 's'],
   ['h', 's', 'hour', 's'],
 ];
@@ -44,6 +46,10 @@ describe('convert', () => {
     expect(convert(1, 'lb', 'kg')).toBe(0.45359237);
     expect(convert(1, 'Btu', 'MJ')).toBe(1055.05585262e-6);
     expect(convert(1, 'gal', 'L')).toBeCloseTo(3.785411784, 12);
+  });
+
+  it('takes an RTI of 100 (ft·s)^½ as 55.2 (m·s)^½ (NFPA 72, annex B, from memory)', () => {
+    expect(convert(100, '(ft s)1/2', '(m s)1/2')).toBeCloseTo(55.2, 1);
   });
 
   it('puts 100 000 Btu/ft² at 1135.65 MJ/m² (GNU units and mathjs agree)', () => {

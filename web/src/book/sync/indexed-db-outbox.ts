@@ -1,3 +1,4 @@
+import { stepUpChanges } from '@embertally/shared/survey/versions/step-up';
 import { openDB, type DBSchema, type IDBPDatabase } from 'idb';
 import type { Step } from '../session/history.ts';
 import type { KeptSet } from './kept-set.ts';
@@ -30,7 +31,9 @@ export function indexedDbOutbox(personId: string): Outbox {
     async load(surveyId) {
       const range = IDBKeyRange.bound([surveyId, ''], [surveyId, '\uffff']);
       const rows = await (await database()).getAll('change-sets', range);
-      return rows.sort((a, b) => a.order - b.order);
+      return rows
+        .sort((a, b) => a.order - b.order)
+        .map((row) => ({ ...row, body: { ...row.body, changes: stepUpChanges(row.body.changes) } }));
     },
     async put(surveyId, set) {
       await (await database()).put('change-sets', { ...set, surveyId, id: set.body.id });
@@ -39,7 +42,8 @@ export function indexedDbOutbox(personId: string): Outbox {
       await (await database()).delete('change-sets', [surveyId, id]);
     },
     async loadSteps(surveyId) {
-      return (await (await database()).get('steps', surveyId)) ?? [];
+      const steps = (await (await database()).get('steps', surveyId)) ?? [];
+      return steps.map((step) => ({ ...step, changes: stepUpChanges(step.changes) }));
     },
     async putSteps(surveyId, steps) {
       await (await database()).put('steps', steps, surveyId);

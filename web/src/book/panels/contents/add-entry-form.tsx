@@ -243,6 +243,7 @@ function entryOfOwn(
     ignites_at_kW_m2: null,
     note: '',
     photos: [],
+    measure: null,
     confirmed_by: null,
     confirmed_at: null,
   };

@@ -15,6 +15,7 @@ export function entryOfHit(hit: CatalogueHit, amount: number | null, mass_kg: nu
   const entry = newEntryFromKind(hit.row, materialByKey, place);
   if (amount === null || hit.row.measure.by === 'pieces') return entry;
   const scaled = scaleKind(hit.row, amount);
+  const { by } = hit.row.measure;
   return {
     ...entry,
     parts: entry.parts.map((part, index) => ({ ...part, mass_kg: scaled.parts[index]?.mass_kg ?? part.mass_kg })),
@@ -22,5 +23,6 @@ export function entryOfHit(hit: CatalogueHit, amount: number | null, mass_kg: nu
     depth_m: scaled.depth_m,
     height_m: scaled.height_m,
     peak_kW: scaled.peak_kW,
+    measure: { by, quantity: amount, density_kg_m3: null },
   };
 }

@@ -1,8 +1,9 @@
-import { LININGS } from '@embertally/shared/catalogue/linings';
+import { liningByKey, LININGS } from '@embertally/shared/catalogue/linings';
 import type { Done, Refusal } from '@embertally/shared/survey/command';
-import type { Lining, LiningSurface } from '@embertally/shared/survey/survey-document';
+import type { Lining, LiningLayer, LiningSurface } from '@embertally/shared/survey/survey-document';
+import { Fragment } from 'react';
 import { CommandChoice } from '../command-choice.tsx';
-import { surfaceWords } from './room-words.ts';
+import { FIRST_LAYER, LayerFields } from './layer-fields.tsx';
 
 const SURFACES = [
   { name: 'walls', label: 'Walls' },
@@ -20,25 +21,36 @@ interface LiningFieldsProps {
 const valueOf = (surface: LiningSurface | null): string =>
   surface === null ? UNKNOWN : 'key' in surface ? surface.key : OWN;
 
-/** What walls, ceiling and floor are made of; layers a person has recorded stay until another answer is chosen. */
+/** Layers to begin with: those of the catalogue's row that was chosen before. */
+function layersOf(surface: LiningSurface | null): LiningLayer[] {
+  if (surface === null) return [FIRST_LAYER];
+  if ('layers' in surface) return surface.layers;
+  return [...(liningByKey(surface.key)?.layers ?? [FIRST_LAYER])];
+}
+
+/** What walls, ceiling and floor are made of, from the catalogue or layer by layer. */
 export function LiningFields({ lining, run }: LiningFieldsProps) {
   return (
     <>
       {SURFACES.map(({ name, label }) => {
         const surface = lining[name];
-        const options = [
-          { value: UNKNOWN, label: 'Not known' },
-          ...(valueOf(surface) === OWN ? [{ value: OWN, label: surfaceWords(surface) }] : []),
-          ...LININGS.map((row) => ({ value: row.key, label: row.label })),
-        ];
+        const set = (next: LiningSurface | null) => run({ ...lining, [name]: next });
         return (
-          <CommandChoice
-            key={name}
-            label={`Lining of the ${label.toLowerCase()}`}
-            value={valueOf(surface)}
-            options={options}
-            run={(key) => run({ ...lining, [name]: key === UNKNOWN ? null : key === OWN ? surface : { key } })}
-          />
+          <Fragment key={name}>
+            <CommandChoice
+              label={`Lining of the ${label.toLowerCase()}`}
+              value={valueOf(surface)}
+              options={[
+                { value: UNKNOWN, label: 'Not known' },
+                ...LININGS.map((row) => ({ value: row.key, label: row.label })),
+                { value: OWN, label: 'Layers of its own' },
+              ]}
+              run={(key) => set(key === UNKNOWN ? null : key === OWN ? { layers: layersOf(surface) } : { key })}
+            />
+            {surface !== null && 'layers' in surface && (
+              <LayerFields surface={label.toLowerCase()} layers={surface.layers} run={(layers) => set({ layers })} />
+            )}
+          </Fragment>
         );
       })}
     </>

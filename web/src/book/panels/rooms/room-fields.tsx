@@ -8,6 +8,7 @@ import { CommandQuantity } from '../command-quantity.tsx';
 import { CommandText } from '../command-text.tsx';
 import { FieldGroup } from '../field-group.tsx';
 import { useRunBack } from '../run-back.ts';
+import { AssumptionFields } from './assumption-fields.tsx';
 import { LiningFields } from './lining-fields.tsx';
 import { ProtectionFields } from './protection-fields.tsx';
 import { liningWords, protectionWords, wordsOfUse } from './room-words.ts';
@@ -171,6 +172,9 @@ export function RoomFields({ room, canEdit }: RoomFieldsProps) {
           protection={room.protection}
           run={(protection) => run({ protection }, 'Changed the protection')}
         />
+      </FieldGroup>
+      <FieldGroup title="Taken for the tally">
+        <AssumptionFields room={room} run={(assumptions) => run({ assumptions }, 'Changed what the tally takes')} />
       </FieldGroup>
       <CommandText
         label="Notes"
