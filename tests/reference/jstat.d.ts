@@ -6,6 +6,10 @@ declare module 'jstat' {
       cdf(x: number, alpha: number, beta: number): number;
       inv(p: number, alpha: number, beta: number): number;
     };
-    readonly normal: { cdf(x: number, mean: number, deviation: number): number };
+    readonly normal: {
+      cdf(x: number, mean: number, deviation: number): number;
+      inv(p: number, mean: number, deviation: number): number;
+    };
+    readonly triangular: { inv(p: number, low: number, high: number, mode: number): number };
   };
 }
