@@ -46,7 +46,8 @@ export interface EstimateContext<S extends MethodInputs> {
 
 export interface RunOutputs<R> {
   readonly result: R;
-  of(output: keyof R & string): Estimate;
+  /** @param never the event does not happen: the value is null and this is the reason */
+  of(output: keyof R & string, never?: string): Estimate;
 }
 
 const NO_WARNINGS: readonly EstimateWarning[] = [];
@@ -58,7 +59,8 @@ export class OutOfRangeError extends Error {
 
 /**
  * Runs a method of one result.
- * @throws OutOfRangeError when an input is outside the range of a method that refuses, or the result is not finite.
+ * @throws OutOfRangeError when an input is outside the range of a method that refuses, or is no finite number where the
+ *   range ends, or when the result is not finite; the message names the inputs.
  */
 export function estimate<S extends MethodInputs>(
   method: Method<S>,
@@ -80,12 +82,20 @@ export function estimateOutputs<S extends MethodInputs, R extends object>(
   const result = method.run(inputs);
   return {
     result,
-    of(output) {
+    of(output, never) {
       const spec = method.outputs?.[output];
       const value: unknown = result[output];
       if (!spec || (typeof value !== 'number' && value !== null))
         throw new TypeError(`${method.ref} has no output ${output}.`);
-      return assemble(method, inputs, spec, value, result, warnings, context);
+      return assemble(
+        method,
+        inputs,
+        spec,
+        value,
+        result,
+        warnings,
+        never === undefined ? context : { ...context, never },
+      );
     },
   };
 }
@@ -98,7 +108,7 @@ function warningsOf<S extends MethodInputs, R>(
   const faults = rangeFaults(method, inputs);
   const extra = context.warnings ?? NO_WARNINGS;
   if (faults.length === 0) return extra;
-  if (method.outOfRange === 'refuse') {
+  if (method.outOfRange === 'refuse' || faults.some(({ value }) => !Number.isFinite(value))) {
     throw new OutOfRangeError(`${method.ref}: ${faults.map((fault) => fault.text).join(' ')}`);
   }
   return [...extra, ...faults.map((fault) => ({ code: 'OUT_OF_RANGE', text: fault.text }))];
@@ -115,7 +125,7 @@ function assemble<S extends MethodInputs, R>(
 ): Estimate {
   const never = context.never;
   if (never === undefined && (value === null || !Number.isFinite(value))) {
-    throw new OutOfRangeError(`${method.ref} has no finite result for these inputs.`);
+    throw new OutOfRangeError(`${method.ref} has no finite result with ${inputsText(method, inputs)}: check these.`);
   }
   const plain = { value: never === undefined ? value : null, unit: output.unit, method: method.ref, warnings };
   const short = never === undefined ? plain : { ...plain, never };
@@ -136,6 +146,18 @@ function assemble<S extends MethodInputs, R>(
     assumptions: method.assumptions,
     why: method.why,
   };
+}
+
+/** What went in, for a sentence: every quantity with its value. */
+function inputsText<S extends MethodInputs, R>(method: Method<S, R>, inputs: InputValues<S>): string {
+  return Object.entries(method.inputs)
+    .flatMap(([name, spec]) => {
+      const value = inputs[name] as number | string | readonly number[];
+      if ('choices' in spec || typeof value === 'string') return [];
+      const unit = spec.unit === '' ? '' : ` ${spec.unit}`;
+      return [`${spec.quantity} ${typeof value === 'number' ? figure(value) : listText(value)}${unit}`];
+    })
+    .join(', ');
 }
 
 function workingInputs<S extends MethodInputs, R>(

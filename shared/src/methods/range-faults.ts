@@ -3,6 +3,7 @@ import { figure } from './figure.ts';
 
 export interface RangeFault {
   readonly input: string;
+  readonly value: number;
   readonly text: string;
 }
 
@@ -39,6 +40,7 @@ function fault(input: string, spec: NumberInput, value: number): RangeFault {
   const unit = spec.unit === '' ? '' : ` ${spec.unit}`;
   return {
     input,
+    value,
     text: `${spec.quantity} is ${figure(value)}${unit}; the method is made for ${rangeText(spec.valid)}${unit}.`,
   };
 }

@@ -1,6 +1,12 @@
 import { estimate, estimateOutputs, type Estimate, type EstimateWarning } from '../methods/estimate.ts';
 import { figure } from '../methods/figure.ts';
-import { parametricCurve, parametricFire, parametricPoints } from '../methods/burnout/parametric-curve.ts';
+import {
+  fuelCorrection,
+  NO_CORRECTION,
+  parametricCurve,
+  parametricFire,
+  parametricPoints,
+} from '../methods/burnout/parametric-curve.ts';
 import { floorToEnclosure } from '../methods/load/floor-to-enclosure.ts';
 import { rangeFaults } from '../methods/range-faults.ts';
 import { standingOf } from '../limits/standing.ts';
@@ -74,6 +80,8 @@ function parametricOf(
     t_lim: timeLimit(given),
   };
   for (const fault of rangeFaults(parametricCurve, inputs)) refuse(FIELD[fault.input] ?? 'room', fault.text);
+  const corrected = fuelCorrection(inputs.O, inputs.b, inputs.q_td) > 0;
+  if ((0.2e-3 * inputs.q_td) / inputs.O <= inputs.t_lim && !corrected) refuse('room.openings', NO_CORRECTION);
   if (reasons.length > 0) {
     return noteMissing(context, path, reasons[0]!.input, reasons.map(({ text }) => text).join(' '));
   }
@@ -100,7 +108,7 @@ const FIELD: Readonly<Record<string, string>> = {
 /** The curve jumps where 0.2e-3 q/O passes t_lim; within 10 % of it both sides are told. */
 function jumpWarning({ O, b, q_td, t_lim }: { O: number; b: number; q_td: number; t_lim: number }): EstimateWarning[] {
   const nearness = (0.2e-3 * q_td) / O / t_lim;
-  if (nearness < 0.9 || nearness > 1.1) return [];
+  if (nearness < 0.9 || nearness > 1.1 || !(fuelCorrection(O, b, q_td) > 0)) return [];
   const fuel = parametricFire(O, b, q_td, t_lim, true).peak;
   const air = parametricFire(O, b, q_td, t_lim, false).peak;
   return [

@@ -1,4 +1,5 @@
 import { defineMethod } from '../define-method.ts';
+import { OutOfRangeError } from '../estimate.ts';
 import { recalled } from '../sources.ts';
 
 /** Variant: equivalent time after Law, min; the load as kilograms of wood. */
@@ -22,5 +23,8 @@ export const equivalentTimeLaw = defineMethod({
   assumptions: ['A_t without the floor in the original.'],
   why: 'An older relation on the openings alone, for comparison.',
   outOfRange: 'warn',
-  run: ({ A_f, q_f, H_c, A_v, A_t }) => (A_f * q_f) / (H_c * Math.sqrt(A_v * (A_t - A_v))),
+  run({ A_f, q_f, H_c, A_v, A_t }) {
+    if (!(A_t > A_v)) throw new OutOfRangeError('The openings are as large as the room: A_t must be above A_v.');
+    return (A_f * q_f) / (H_c * Math.sqrt(A_v * (A_t - A_v)));
+  },
 });

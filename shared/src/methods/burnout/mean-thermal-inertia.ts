@@ -1,4 +1,5 @@
 import { defineMethod } from '../define-method.ts';
+import { OutOfRangeError } from '../estimate.ts';
 import { en1991 } from '../sources.ts';
 
 /** Thermal inertia of a room, weighted by the areas of its surfaces without openings. */
@@ -30,6 +31,7 @@ export const meanThermalInertia = defineMethod({
       sum += b[i]! * A[i]!;
       area += A[i]!;
     }
+    if (!(area > 0)) throw new OutOfRangeError('No surface has an area: check the openings against the walls.');
     return sum / area;
   },
 });

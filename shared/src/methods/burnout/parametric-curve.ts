@@ -1,4 +1,5 @@
 import { defineMethod } from '../define-method.ts';
+import { OutOfRangeError } from '../estimate.ts';
 import { figure } from '../figure.ts';
 import { en1991 } from '../sources.ts';
 
@@ -27,7 +28,7 @@ const HEATING_POINTS = 30;
 /** Gas temperature of a fully developed fire by the parametric curve; hours inside, minutes outside. */
 export const parametricCurve = defineMethod({
   id: 'burnout.parametric-2002',
-  version: 1,
+  version: 2,
   title: 'Parametric temperature-time curve',
   symbol: 'Θ_g',
   unit: '°C',
@@ -43,6 +44,7 @@ export const parametricCurve = defineMethod({
   assumptions: [
     'Cellulosic load that burns completely; floor up to 500 m2, height up to 4 m, no roof opening.',
     'Cooling uses t*_max of the ventilation controlled fire, also when the fuel controls.',
+    'Large openings, light linings and a small load together take the printed k of a fuel controlled fire below 0; then there is no curve.',
   ],
   why: 'It knows the load, the openings and the walls; the standard curve knows none of them.',
   outOfRange: 'refuse',
@@ -51,7 +53,11 @@ export const parametricCurve = defineMethod({
     timeOfPeak: { symbol: 't_max', unit: 'min', quantity: 'Time of the highest temperature' },
     end: { symbol: 't_end', unit: 'min', quantity: 'Back at 20 °C' },
   },
-  run: ({ O, b, q_td, t_lim }) => parametricFire(O, b, q_td, t_lim, (0.2e-3 * q_td) / O <= t_lim),
+  run({ O, b, q_td, t_lim }) {
+    const fuelControlled = (0.2e-3 * q_td) / O <= t_lim;
+    if (fuelControlled && !(fuelCorrection(O, b, q_td) > 0)) throw new OutOfRangeError(NO_CORRECTION);
+    return parametricFire(O, b, q_td, t_lim, fuelControlled);
+  },
   explain: (_inputs, fire) => [
     { text: 'Γ', value: fire.gamma, unit: '' },
     {
@@ -64,6 +70,18 @@ export const parametricCurve = defineMethod({
     { text: 'Cooling rate', value: fire.coolingRate, unit: 'K/min' },
   ],
 });
+
+/** Why there is no curve where {@link fuelCorrection} is not above 0. */
+export const NO_CORRECTION =
+  'The factor k of a fuel controlled fire is not above 0 for openings this large, linings this light and a load this small: check them; the printed curve has no answer here.';
+
+/**
+ * Factor k on Γ_lim, equation (A.10): 1 unless O > 0.04, q_t,d < 75 and b < 1160. It falls below 0 inside the printed
+ * ranges (O = 0.2, b = 100, q_t,d = 50 gives −0.2), where the curve would go below absolute zero.
+ */
+export function fuelCorrection(O: number, b: number, q: number): number {
+  return O > 0.04 && q < 75 && b < 1160 ? 1 + ((O - 0.04) / 0.04) * ((q - 75) / 75) * ((1160 - b) / 1160) : 1;
+}
 
 /**
  * The curve with the branch given from outside, so that both sides of the jump at t_max = t_lim can be shown. The branch
@@ -79,10 +97,7 @@ export function parametricFire(
   const gamma = gammaOf(O, b);
   const ventilationTime = (0.2e-3 * q) / O;
   const tMax = fuelControlled ? tLimit : ventilationTime;
-  const k =
-    fuelControlled && O > 0.04 && q < 75 && b < 1160
-      ? 1 + ((O - 0.04) / 0.04) * ((q - 75) / 75) * ((1160 - b) / 1160)
-      : 1;
+  const k = fuelControlled ? fuelCorrection(O, b, q) : 1;
   const gammaLimit = fuelControlled ? gammaOf((0.1e-3 * q) / tLimit, b) * k : null;
   const peak = heating(tMax * (gammaLimit ?? gamma));
   const coolingTime = ventilationTime * gamma;

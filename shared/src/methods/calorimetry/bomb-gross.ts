@@ -2,6 +2,9 @@ import { defineMethod } from '../define-method.ts';
 import { OutOfRangeError } from '../estimate.ts';
 import { recalled } from '../sources.ts';
 
+/** A product that does not burn scatters about 0; below this something was entered wrongly. */
+const LOWEST_MJ_KG = -1;
+
 /** Gross heat at constant volume of a sample burnt in a bomb, MJ/kg. */
 export const bombGross = defineMethod({
   id: 'calorimetry.bomb-gross',
@@ -31,7 +34,10 @@ export const bombGross = defineMethod({
     const rise = T_m - T_i + c;
     if (!(rise > 0))
       throw new OutOfRangeError('The corrected temperature rise is not above 0 K: check T_i, T_m and c.');
-    return (E * rise - b - m_aid * H_aid) / m;
+    const gross = (E * rise - b - m_aid * H_aid) / m;
+    if (gross < LOWEST_MJ_KG)
+      throw new OutOfRangeError('Fuse, thread and benzoic acid give more heat than was measured: check E, b and m_ba.');
+    return gross;
   },
   explain: ({ E, T_i, T_m, c, b, m_aid, H_aid }) => [
     { text: 'Corrected rise', value: T_m - T_i + c, unit: 'K' },

@@ -1,5 +1,9 @@
 import { defineMethod } from '../define-method.ts';
+import { OutOfRangeError } from '../estimate.ts';
 import { recalled } from '../sources.ts';
+
+/** A product that does not burn scatters about 0; below this something was entered wrongly. */
+const LOWEST_MJ_KG = -1;
 
 /** Gross heat at constant volume from a bomb run whose sheet gives the corrected temperature rise, MJ/kg. */
 export const bombRun = defineMethod({
@@ -25,7 +29,14 @@ export const bombRun = defineMethod({
   assumptions: ['Constant volume. A product that hardly burns can come out slightly below 0; that stands as measured.'],
   why: 'Most laboratory sheets give the rise already corrected for the heat exchanged with the surroundings.',
   outOfRange: 'refuse',
-  run: ({ E, dT, b, a, m_aid, H_aid, m }) => (E * dT - b - a - m_aid * H_aid) / m,
+  run({ E, dT, b, a, m_aid, H_aid, m }) {
+    const gross = (E * dT - b - a - m_aid * H_aid) / m;
+    if (gross < LOWEST_MJ_KG)
+      throw new OutOfRangeError(
+        'Fuse, acid and benzoic acid give more heat than was measured: check E, ΔT, b, a and m_ba.',
+      );
+    return gross;
+  },
   explain: ({ E, dT, b, a, m_aid, H_aid }) => [
     { text: 'Heat in the calorimeter', value: E * dT, unit: 'MJ' },
     { text: 'Of that fuse, acid and benzoic acid', value: b + a + m_aid * H_aid, unit: 'MJ' },

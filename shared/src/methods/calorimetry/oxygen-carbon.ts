@@ -47,6 +47,8 @@ export const oxygenCarbon = defineMethod({
     if (depletion < -0.01)
       throw new OutOfRangeError('More oxygen after the fire than before it: check the drift of the analyser.');
     const perOxygen = E * depletion - (((E_CO - E) * (1 - depletion)) / 2) * (X_CO / X_O2);
+    if (perOxygen < -0.01 * E)
+      throw new OutOfRangeError('More carbon monoxide than the oxygen used up explains: check both analysers.');
     const rate =
       ((perOxygen * m_e) / (1 + depletion * (EXPANSION - 1))) * (OXYGEN_G_MOL / AIR_G_MOL) * (1 - X0_H2O) * X0_O2;
     return { depletion, rate };

@@ -1,6 +1,7 @@
 import { VAPORISATION_KJ_MOL } from '../../chemistry/formation-enthalpies.ts';
 import { molarMass, OXYGEN_G_MOL } from '../../chemistry/molar-mass.ts';
 import { defineMethod } from '../define-method.ts';
+import { OutOfRangeError } from '../estimate.ts';
 import { definition } from '../sources.ts';
 import { ATOM_INPUTS } from './atom-inputs.ts';
 import { burn } from './burn.ts';
@@ -34,6 +35,10 @@ export const heatFromEquation = defineMethod({
     const mass = molarMass(atoms);
     const inWater = VAPORISATION_KJ_MOL * products.H2O;
     const netPerMole = -dH / n - (water === 'liquid' ? inWater : 0);
+    if (!(netPerMole > 0))
+      throw new OutOfRangeError(
+        'As vapour the water takes more heat than the equation gives: check ΔH, n and the water.',
+      );
     return {
       netPerMole,
       net: netPerMole / mass,

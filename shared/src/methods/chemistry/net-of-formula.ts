@@ -1,6 +1,7 @@
 import { VAPORISATION_KJ_MOL } from '../../chemistry/formation-enthalpies.ts';
 import { molarMass, OXYGEN_G_MOL } from '../../chemistry/molar-mass.ts';
 import { defineMethod } from '../define-method.ts';
+import { OutOfRangeError } from '../estimate.ts';
 import { definition } from '../sources.ts';
 import { ATOM_INPUTS } from './atom-inputs.ts';
 import { burn } from './burn.ts';
@@ -36,6 +37,7 @@ export const netOfFormula = defineMethod({
     const { O2, H2O } = burn(atoms);
     const mass = molarMass(atoms);
     const net = gross - (VAPORISATION_KJ_MOL * H2O) / mass;
+    if (net < 0) throw new OutOfRangeError('The water of this formula takes more than the gross heat: check both.');
     const oxygen = (OXYGEN_G_MOL * O2) / mass;
     return { net, oxygen, perOxygen: net / oxygen };
   },

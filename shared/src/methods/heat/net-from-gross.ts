@@ -1,6 +1,10 @@
 import { defineMethod } from '../define-method.ts';
+import { OutOfRangeError } from '../estimate.ts';
 import { definition } from '../sources.ts';
 import { HEAT_OF_VAPORISATION_MJ_KG, WATER_PER_HYDROGEN } from './water.ts';
+
+/** Samples that do not burn scatter about 0; below this the two inputs contradict each other. */
+const LOWEST_MJ_KG = -1;
 
 /** Net heat of a dry substance from its gross heat and its hydrogen content, MJ/kg. Substances with halogens: see text. */
 export const netFromGross = defineMethod({
@@ -18,5 +22,10 @@ export const netFromGross = defineMethod({
   assumptions: ['With chlorine or bromine, hydrogen bound as acid is taken off w_H first.'],
   why: 'Bomb calorimeters give gross heat; in a fire the water leaves as vapour.',
   outOfRange: 'refuse',
-  run: ({ H_gross, w_H }) => H_gross - HEAT_OF_VAPORISATION_MJ_KG * WATER_PER_HYDROGEN * w_H,
+  run({ H_gross, w_H }) {
+    const net = H_gross - HEAT_OF_VAPORISATION_MJ_KG * WATER_PER_HYDROGEN * w_H;
+    if (net < LOWEST_MJ_KG)
+      throw new OutOfRangeError('The water of so much hydrogen takes more than the gross heat: check both.');
+    return net;
+  },
 });

@@ -1,4 +1,5 @@
 import { defineMethod } from '../define-method.ts';
+import { OutOfRangeError } from '../estimate.ts';
 import { recalled } from '../sources.ts';
 
 /** Inverse opening factor after Thomas, m^-½; above 10 to 15 the openings control the fire. */
@@ -18,5 +19,8 @@ export const inverseOpeningFactor = defineMethod({
   assumptions: [],
   why: 'A second view of the same openings, used in the older literature.',
   outOfRange: 'refuse',
-  run: ({ A_t, A_v, H }) => (A_t - A_v) / (A_v * Math.sqrt(H)),
+  run({ A_t, A_v, H }) {
+    if (A_v > A_t) throw new OutOfRangeError('The openings are larger than the room: A_t must not be below A_v.');
+    return (A_t - A_v) / (A_v * Math.sqrt(H));
+  },
 });

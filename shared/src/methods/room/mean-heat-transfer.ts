@@ -1,4 +1,5 @@
 import { defineMethod } from '../define-method.ts';
+import { OutOfRangeError } from '../estimate.ts';
 import { recalled } from '../sources.ts';
 
 /** Heat transfer coefficient of a room with different linings, weighted by their areas, kW/m²K. */
@@ -24,6 +25,7 @@ export const meanHeatTransfer = defineMethod({
       flow += h[i]! * A[i]!;
       area += A[i]!;
     }
+    if (!(area > 0)) throw new OutOfRangeError('No surface has an area: check the openings against the walls.');
     return flow / area;
   },
 });

@@ -1,4 +1,5 @@
 import { defineMethod } from '../define-method.ts';
+import { OutOfRangeError } from '../estimate.ts';
 import { definition, en1991 } from '../sources.ts';
 import { gumbelParameters } from './gumbel-parameters.ts';
 
@@ -24,6 +25,11 @@ export const gumbelFractile = defineMethod({
   outOfRange: 'refuse',
   run({ mean, V, p }) {
     const { u, beta } = gumbelParameters(mean, V);
-    return u - beta * Math.log(-Math.log(p));
+    const fractile = u - beta * Math.log(-Math.log(p));
+    if (fractile < 0)
+      throw new OutOfRangeError(
+        'With so large a spread this distribution goes below zero here: check V or use the lognormal one.',
+      );
+    return fractile;
   },
 });

@@ -1,4 +1,5 @@
 import { defineMethod } from '../define-method.ts';
+import { OutOfRangeError } from '../estimate.ts';
 import { definition, gum } from '../sources.ts';
 import { lognormalParameters } from '../statistics/lognormal-parameters.ts';
 import { normalQuantile } from '../statistics/normal-distribution.ts';
@@ -27,7 +28,10 @@ export const bandFractile = defineMethod({
   run({ q, u, o, p }) {
     if (q === 0) return 0;
     const mean = q * (1 + o);
-    const { mu, sigma } = lognormalParameters(mean, u / mean);
+    const V = u / mean;
+    if (!Number.isFinite(V))
+      throw new OutOfRangeError('The load is next to nothing beside its uncertainty: check both.');
+    const { mu, sigma } = lognormalParameters(mean, V);
     return Math.exp(mu + sigma * normalQuantile(p));
   },
 });
