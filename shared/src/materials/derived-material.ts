@@ -48,7 +48,7 @@ export interface DerivedMaterial {
   readonly radiative_fraction: number;
   readonly basis: MaterialBasis | null;
   readonly warnings: readonly EstimateWarning[];
-  /** Every method that was run, in order; the last one gives the net heat. With equation, symbols, steps and sources. */
+  /** Every method that was run, in order, with equation, symbols, steps and sources. */
   readonly workings: readonly Estimate[];
   /** Ids and versions of those methods, each once. */
   readonly methods: readonly string[];

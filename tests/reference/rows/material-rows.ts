@@ -85,6 +85,15 @@ export const MATERIAL_ROWS: readonly ReferenceRow[] = [
     source: 'a mixture of one material is that material',
   },
   {
+    id: 'stated-heat',
+    method: 'heat.stated',
+    inputs: { H: 42.8 },
+    expected: { value: 42.8 },
+    tolerance: { abs: 0 },
+    origin: 'invariant',
+    source: 'what is stated is not changed',
+  },
+  {
     id: 'per-volume-ethanol',
     method: 'heat.from-volume',
     inputs: { H_V: 21_000, rho: 789 },
