@@ -14,6 +14,11 @@ import { perFloor } from './load/per-floor.ts';
 import { protectedLoads } from './load/protected-loads.ts';
 import { grossAsReceived } from './heat/gross-as-received.ts';
 import { grossAshFree } from './heat/gross-ash-free.ts';
+import { fromVolume } from './heat/from-volume.ts';
+import { grossDry } from './heat/gross-dry.ts';
+import { mixture } from './heat/mixture.ts';
+import { netDry } from './heat/net-dry.ts';
+import { statedHeat } from './heat/stated-heat.ts';
 import { moistureEn } from './heat/moisture-en.ts';
 import { moistureWetBasis } from './heat/moisture-wet-basis.ts';
 import { netAsReceived } from './heat/net-as-received.ts';
@@ -57,6 +62,7 @@ import { parametricCurve } from './burnout/parametric-curve.ts';
 import { smallRoomWeight } from './burnout/small-room-weight.ts';
 import { thermalInertia } from './burnout/thermal-inertia.ts';
 import { ventilationWeight } from './burnout/ventilation-weight.ts';
+import { basisCorrection } from './chemistry/basis-correction.ts';
 import { basisDetector } from './chemistry/basis-detector.ts';
 import { boie } from './chemistry/boie.ts';
 import { channiwalaParikh } from './chemistry/channiwala-parikh.ts';
@@ -72,9 +78,11 @@ import { thornton } from './chemistry/thornton.ts';
 import { airBuoyancy } from './calorimetry/air-buoyancy.ts';
 import { bombAcceptance } from './calorimetry/bomb-acceptance.ts';
 import { bombCalibration } from './calorimetry/bomb-calibration.ts';
+import { bombRun } from './calorimetry/bomb-run.ts';
 import { bombGross } from './calorimetry/bomb-gross.ts';
 import { calibrationMean } from './calorimetry/calibration-mean.ts';
 import { constantPressure, constantVolume } from './calorimetry/constant-pressure.ts';
+import { curveHeat } from './calorimetry/curve-heat.ts';
 import { effectiveHeat } from './calorimetry/effective-heat.ts';
 import { netFromCondensate } from './calorimetry/net-from-condensate.ts';
 import { orificeConstant } from './calorimetry/orifice-constant.ts';
@@ -115,6 +123,7 @@ import { thinSpill } from './pool/thin-spill.ts';
 import { carbonMonoxide } from './smoke/carbon-monoxide.ts';
 import { layerFillingSteady, layerFillingGrowing } from './smoke/layer-filling.ts';
 import { massForVisibility } from './smoke/mass-for-visibility.ts';
+import { oxygenEnd } from './smoke/oxygen-end.ts';
 import { oxygenLimitedHeat } from './smoke/oxygen-limited-heat.ts';
 import { sootMass } from './smoke/soot-mass.ts';
 import { visibility } from './smoke/visibility.ts';
@@ -134,6 +143,10 @@ import { gradingClass } from './load/grading-class.ts';
 import { olderUnits } from './load/older-units.ts';
 import { pertFractile } from './statistics/pert-fractile.ts';
 import { triangularFractile } from './statistics/triangular-fractile.ts';
+import { varianceShare } from './uncertainty/variance-share.ts';
+import { MONTE_CARLO_METHOD } from '../uncertainty/monte-carlo-method.ts';
+import { HOW_MANY_METHOD, WHAT_CHANGES_METHOD } from '../questions/question-method.ts';
+import { GAP_METHOD, SPREAD_METHOD } from '../spread/spread-method.ts';
 import type { MethodSummary } from './define-method.ts';
 
 /** A method whose inputs and result are known only when it runs. */
@@ -159,7 +172,12 @@ export const METHODS: readonly AnyMethod[] = [
   protectedLoads,
   grossAsReceived,
   grossAshFree,
+  fromVolume,
+  grossDry,
+  mixture,
   moistureEn,
+  netDry,
+  statedHeat,
   moistureWetBasis,
   netAsReceived,
   netFromGross,
@@ -170,6 +188,7 @@ export const METHODS: readonly AnyMethod[] = [
   bandFractile,
   fireLoadUncertainty,
   perFloorUncertainty,
+  varianceShare,
   designFire,
   fuelPlateau,
   sumOfPeaks,
@@ -205,6 +224,7 @@ export const METHODS: readonly AnyMethod[] = [
   smallRoomWeight,
   thermalInertia,
   ventilationWeight,
+  basisCorrection,
   basisDetector,
   boie,
   channiwalaParikh,
@@ -221,9 +241,11 @@ export const METHODS: readonly AnyMethod[] = [
   bombAcceptance,
   bombCalibration,
   bombGross,
+  bombRun,
   calibrationMean,
   constantPressure,
   constantVolume,
+  curveHeat,
   effectiveHeat,
   netFromCondensate,
   orificeConstant,
@@ -266,6 +288,7 @@ export const METHODS: readonly AnyMethod[] = [
   layerFillingSteady,
   layerFillingGrowing,
   massForVisibility,
+  oxygenEnd,
   oxygenLimitedHeat,
   sootMass,
   visibility,
@@ -289,9 +312,12 @@ export const METHODS: readonly AnyMethod[] = [
   triangularFractile,
 ];
 
-const byRef = new Map(METHODS.map((method) => [method.ref, method]));
+/** Models of many parts: no one relation to run, held to whole cases. */
+export const MODELS: readonly MethodSummary[] = [SPREAD_METHOD, GAP_METHOD, HOW_MANY_METHOD, WHAT_CHANGES_METHOD];
 
-/** The method an estimate names, as `load.per-floor@1`; undefined for a version this engine no longer has. */
-export function methodByRef(ref: string): AnyMethod | undefined {
+const byRef = new Map<string, MethodSummary>([...METHODS, ...MODELS].map((method) => [method.ref, method]));
+
+/** The method or model an estimate names, as `load.per-floor@1`; undefined for a version this engine no longer has. */
+export function methodByRef(ref: string): MethodSummary | undefined {
   return byRef.get(ref);
 }

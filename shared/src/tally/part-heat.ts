@@ -25,8 +25,8 @@ export interface PartHeat {
   readonly heatDry: number;
 }
 
-/** Relative half-width of a stated heat without a range of its own: the spread of a mixed product. */
-const OWN_HEAT_SPREAD = 0.15;
+/** Half-width of the triangle for a stated heat without a range: a mixed product has a standard deviation of 15 %. */
+const OWN_HEAT_SPREAD = 0.15 * Math.sqrt(6);
 
 /** The heat of one part: the person's own when given, else the catalogue's; brought to net, as received. */
 export function partHeat(entry: RoomInputEntry, part: RoomInputPart): PartHeat {

@@ -81,4 +81,13 @@ export const UNCERTAINTY_ROWS: readonly ReferenceRow[] = [
     origin: 'invariant',
     source: 'no load, no band',
   },
+  {
+    id: 'share-of-two-masses',
+    method: 'uncertainty.variance-share',
+    inputs: { V_j: 90_000, V: 100_000 },
+    expected: { value: 90 },
+    tolerance: { abs: 1e-9 },
+    origin: 'independent',
+    source: 'by hand: 300² of 300² + 100²',
+  },
 ];

@@ -1,67 +1,12 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { quantileOf } from '@embertally/shared/uncertainty/distribution';
 import type { LoadModel } from '@embertally/shared/uncertainty/load-model';
 import { sampleLoad } from '@embertally/shared/uncertainty/sample-load';
-import { fractile, loadOf, momentsOfSamples, point, sampled } from './load-models.ts';
+import { loadOf, momentsOfSamples, sampled } from './load-models.ts';
 
 const N = 200_000;
 const normal = (mean: number, deviation: number) => ({ kind: 'normal', mean, deviation }) as const;
 const triangular = (low: number, mode: number, high: number) => ({ kind: 'triangular', low, mode, high }) as const;
-
-describe('a sampled load against the outside world', () => {
-  it('of two items is that of two million samples drawn with numpy', () => {
-    const { total } = sampled(
-      loadOf([
-        { mass: triangular(80, 100, 130), heat: normal(17.5, 1) },
-        { mass: triangular(30, 50, 80), heat: normal(20, 2) },
-      ]),
-      N,
-    );
-    const { mean, deviation } = momentsOfSamples(total);
-    expect(mean / 2875).toBeCloseTo(1, 2);
-    expect(deviation / 311.8).toBeCloseTo(1, 2);
-    expect(fractile(total, 0.8) / 3138.8).toBeCloseTo(1, 2);
-    expect(fractile(total, 0.95) / 3409.9).toBeCloseTo(1, 2);
-  });
-
-  it('of four normal inputs has the interval of JCGM 101:2008, 9.2.2 (table 2)', () => {
-    // Masses around 10 kg of 1 MJ/kg stand for inputs of mean 0 and standard deviation 1: printed −3.92 to 3.92.
-    const { total } = sampled(loadOf(Array.from({ length: 4 }, () => ({ mass: normal(10, 1), heat: point(1) }))), N);
-    expect(momentsOfSamples(total).deviation).toBeCloseTo(2, 1);
-    expect(fractile(total, 0.025) - 40).toBeCloseTo(-3.92, 1);
-    expect(fractile(total, 0.975) - 40).toBeCloseTo(3.92, 1);
-  });
-
-  it('of four rectangular inputs, two and two as triangles, has the interval of JCGM 101:2008, 9.2.3 (table 3)', () => {
-    // The sum of two rectangles of standard deviation 1 is a triangle of half width 2√3: printed −3.88 to 3.88.
-    const half = 2 * Math.sqrt(3);
-    const mass = triangular(10 - half, 10, 10 + half);
-    const { total } = sampled(
-      loadOf([
-        { mass, heat: point(1) },
-        { mass, heat: point(1) },
-      ]),
-      N,
-    );
-    expect(fractile(total, 0.025) - 20).toBeCloseTo(-3.88, 1);
-    expect(fractile(total, 0.975) - 20).toBeCloseTo(3.88, 1);
-  });
-
-  it('with one heat for two items has the correlated uncertainty of GUM 5.2.2', () => {
-    const item = (kg: number, u: number) => ({ mass: normal(kg, u), heat: normal(17.5, 1), material: 'timber' });
-    const { total } = sampled(loadOf([item(100, 10), item(80, 8)]), N);
-    // 287.446 to first order; the products of two deviations add 12.8² to its square.
-    expect(momentsOfSamples(total).deviation / Math.hypot(287.446, Math.hypot(10, 8))).toBeCloseTo(1, 2);
-  });
-
-  it('of one item of known heat is the distribution of its mass, place by place', () => {
-    const mass = { kind: 'lognormal', mean: 420, deviation: 126 } as const;
-    const { total } = sampled(loadOf([{ mass, heat: point(1) }]), N);
-    expect(fractile(total, 0.95) / 651.99).toBeCloseTo(1, 2);
-    for (const p of [0.05, 0.5, 0.8]) expect(fractile(total, p) / quantileOf(mass, p)).toBeCloseTo(1, 2);
-  });
-});
 
 describe('a sampled load', () => {
   const model: LoadModel = {
