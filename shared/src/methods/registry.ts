@@ -313,7 +313,13 @@ export const METHODS: readonly AnyMethod[] = [
 ];
 
 /** Models of many parts: no one relation to run, held to whole cases. */
-export const MODELS: readonly MethodSummary[] = [SPREAD_METHOD, GAP_METHOD, HOW_MANY_METHOD, WHAT_CHANGES_METHOD];
+export const MODELS: readonly MethodSummary[] = [
+  SPREAD_METHOD,
+  GAP_METHOD,
+  HOW_MANY_METHOD,
+  WHAT_CHANGES_METHOD,
+  MONTE_CARLO_METHOD,
+];
 
 const byRef = new Map<string, MethodSummary>([...METHODS, ...MODELS].map((method) => [method.ref, method]));
 
