@@ -147,7 +147,7 @@ test('two people’s edits of one state merge to the same document whichever arr
         expect(checkInvariants(bAfterA.document)).toEqual([]);
       } else clashed += 1;
     }),
-    { ...RUNS, numRuns: 700 },
+    { ...RUNS, numRuns: 1200 },
   );
   expect(merged).toBeGreaterThan(50);
   expect(clashed).toBeGreaterThan(10);

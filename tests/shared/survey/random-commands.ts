@@ -22,7 +22,9 @@ import { moveCorner } from '@embertally/shared/survey/commands/move-corner';
 import { moveEntries } from '@embertally/shared/survey/commands/move-entries';
 import { moveOpening } from '@embertally/shared/survey/commands/move-opening';
 import { moveWall } from '@embertally/shared/survey/commands/move-wall';
+import { joinRooms } from '@embertally/shared/survey/commands/join-rooms';
 import { removeCorner } from '@embertally/shared/survey/commands/remove-corner';
+import { splitRoom } from '@embertally/shared/survey/commands/split-room';
 import { walls } from '@embertally/shared/survey/derive/walls';
 import { newStorey } from '@embertally/shared/survey/new-storey';
 import { newOpening } from '@embertally/shared/survey/new-opening';
@@ -37,7 +39,7 @@ export interface Step {
   readonly slanted: boolean;
 }
 
-const COMMANDS = 22;
+const COMMANDS = 24;
 
 /** Places come from a coarse lattice most of the time, so that walls meet, coincide and touch. */
 const lattice = fc.integer({ min: -4, max: 12 }).map((n) => n / 2);
@@ -176,6 +178,22 @@ export function runStep(
       if (room && p1 % 2 === 0)
         return fillHole(document, { room_id: room.id, corner_id: room.holes[0]?.[0] ?? uid('none') });
       return addStorey(document, { storey: newStorey({ id: uid(name), name }) });
+    case 21: {
+      const loop = room?.ring.flatMap((id) => document.corners.get(id) ?? []) ?? [];
+      const [a, b] = [loop[p1 % loop.length], loop[(p1 + 1) % loop.length]];
+      const [c, d] = [loop[(p1 + 2) % loop.length], loop[(p1 + 3) % loop.length]];
+      if (!room || !a || !b || !c || !d) return null;
+      const t = slanted ? 0 : ((p2 % 9) + 1) / 10;
+      const from = { x_m: a.x_m + (b.x_m - a.x_m) * t, y_m: a.y_m + (b.y_m - a.y_m) * t };
+      const to = { x_m: d.x_m + (c.x_m - d.x_m) * t, y_m: d.y_m + (c.y_m - d.y_m) * t };
+      const points = p2 % 3 === 0 ? [from, { x_m: x, y_m: y }, to] : [from, to];
+      const corner_ids = points.map((_, index) => uid(`${name}.${index}`));
+      return splitRoom(document, { room_id: room.id, new_room_id: uid(name), name, points, corner_ids });
+    }
+    case 22: {
+      const other = picked(document.rooms.values(), p1);
+      return room && other ? joinRooms(document, { room_id: room.id, other_id: other.id }) : null;
+    }
     default:
       return storey && document.storeys.size > 1 && p1 % 4 === 0
         ? deleteStorey(document, { storey_id: storey.id })
