@@ -4,7 +4,7 @@ import { flashoverBabrauskas } from '@embertally/shared/methods/room/flashover-b
 import { flashoverMqh } from '@embertally/shared/methods/room/flashover-mqh';
 import { flashoverThomas } from '@embertally/shared/methods/room/flashover-thomas';
 import { liningHeatTransfer } from '@embertally/shared/methods/room/lining-heat-transfer';
-import { rateForFlame } from '@embertally/shared/spread/flame-length';
+import { rateForFlame } from '@embertally/shared/methods/plume/flame-length';
 import { hotLayer } from '@embertally/shared/spread/hot-layer';
 import { ignitionOf, timeToIgnite } from '@embertally/shared/spread/ignition-class';
 import { ownCurve, timeToRate } from '@embertally/shared/spread/own-curve';
@@ -15,7 +15,7 @@ import { spreadGaps } from '@embertally/shared/spread/spread-gaps';
 import type { SpreadEntry } from '@embertally/shared/spread/spread-entry';
 import type { SpreadRoom } from '@embertally/shared/spread/spread-room';
 import { areaOf, HALL, spreadCase, spreadEntry } from '../support/spread-samples.ts';
-import { SPREAD_ROWS, type SpreadRow, type SpreadRowRoom } from './rows/spread-rows.ts';
+import { GAP_ROWS, SPREAD_ROWS, type SpreadRow, type SpreadRowRoom } from './rows/spread-rows.ts';
 
 const ROW_RADIATIVE_FRACTION = 0.35;
 
@@ -154,14 +154,11 @@ describe('spread of fire against the outside world', () => {
     expect(rateForFlame(3, Math.sqrt((4 * 1.2 * 1.2) / Math.PI))).toBeCloseTo(1500.7, 0);
   });
 
-  it('S10: the gaps of the pair of S2 (independent: bisection and closed form)', () => {
-    const gap = spreadGaps({ room: HALL, entries: entriesOf(rowById('S2-pair-ignites')), ignition: 'dose' }).find(
-      ({ from }) => from === 'A',
-    )!;
-    const expected = [1.405, 2.277, 1.939, 3.032];
-    const answers = [gap.justNot, gap.enough, gap.longExposureJustNot, gap.longExposureEnough];
-    for (const [index, { metres }] of answers.entries()) {
-      expect(Math.abs((metres ?? Infinity) - expected[index]!)).toBeLessThan(0.01);
+  it.each(GAP_ROWS)('$id ($origin: $source)', ({ fire, from, expected }) => {
+    const gaps = spreadGaps({ room: HALL, entries: entriesOf(rowById(fire)), ignition: 'dose' });
+    const gap = gaps.find((one) => one.from === from)!;
+    for (const answer of ['justNot', 'enough', 'longExposureJustNot', 'longExposureEnough'] as const) {
+      expect(Math.abs((gap[answer].metres ?? Infinity) - expected[answer]), answer).toBeLessThan(0.01);
     }
   });
 

@@ -1,6 +1,6 @@
 import { readdirSync } from 'node:fs';
 import { join } from 'node:path';
-import { METHODS } from '@embertally/shared/methods/registry';
+import { METHODS, MODELS } from '@embertally/shared/methods/registry';
 import { rangeText } from '@embertally/shared/methods/range-faults';
 import type { ReferenceRow } from '../reference/reference-row.ts';
 import { root } from './import-graph.ts';
@@ -22,7 +22,7 @@ async function referenceRows(): Promise<readonly ReferenceRow[]> {
 /** The table of methods as it stands in SAFETY.md, made of what the methods declare and of the rows that hold them. */
 export async function methodsTable(): Promise<string> {
   const rows = await referenceRows();
-  const lines = METHODS.map((method) => {
+  const lines = [...METHODS, ...MODELS].map((method) => {
     const sources = method.sources
       .map(
         (s) =>

@@ -1,4 +1,4 @@
-import { flameLength, rateForFlame } from './flame-length.ts';
+import { flameLength, rateForFlame } from '../methods/plume/flame-length.ts';
 import { HELD_S } from './ignition-class.ts';
 import { rateAt, type OwnCurve } from './own-curve.ts';
 import { PieceClock } from './piece-clock.ts';

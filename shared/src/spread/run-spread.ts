@@ -57,7 +57,8 @@ export interface SpreadRun {
   readonly peak_kW: number;
   /** s at which the last entry burns out, the air ends or four hours are over. */
   readonly end_s: number;
-  readonly stopped: 'burnt-out' | 'starved' | 'four-hours';
+  /** `overtaken`: followed no further, see `runSpread`. */
+  readonly stopped: 'burnt-out' | 'starved' | 'four-hours' | 'overtaken';
   readonly flashover_s: number | null;
   /** s at which half of the heat of the room is released; null: never. */
   readonly halfHeat_s: number | null;
@@ -73,9 +74,12 @@ export interface RunRules extends ExposureRules {
   readonly step_s: number;
 }
 
-/** One fire from one first entry. Deterministic: the same scene and first entry give the same run. */
-export function runSpread(scene: SpreadScene, first: number, rules: RunRules): SpreadRun {
-  return new Run(scene, first, rules).result();
+/**
+ * One fire from one first entry. Deterministic: the same scene and first entry give the same run.
+ * @param flashoverBy_s a fire without flashover by then is followed no further: for who looks for an earlier one
+ */
+export function runSpread(scene: SpreadScene, first: number, rules: RunRules, flashoverBy_s = Infinity): SpreadRun {
+  return new Run(scene, first, rules, flashoverBy_s).result();
 }
 
 class Run {
@@ -91,6 +95,7 @@ class Run {
     private readonly scene: SpreadScene,
     private readonly first: number,
     private readonly rules: RunRules,
+    private readonly flashoverBy_s: number,
   ) {
     const { factorBefore, factorAfter, flashover_kW, oxygenLimitedHeat_MJ } = scene.room;
     const closed = factorBefore === 0 && factorAfter === 0;
@@ -137,6 +142,7 @@ class Run {
   private burn(): SpreadRun['stopped'] {
     this.light(this.first, { cause: 'first' });
     for (;;) {
+      if (this.flashover_s === null && this.room.t > this.flashoverBy_s) return 'overtaken';
       const stop = this.step();
       if (stop === 'flashover') this.flash();
       else if (stop === 'starved') {

@@ -1,5 +1,5 @@
 import { criticalView, loneFire, longExposureView, type LoneFire } from './lone-fire.ts';
-import { clearDistance, type PlacedRectangle } from './placed-rectangle.ts';
+import { clearDistance, squaredDistanceTo, type PlacedRectangle } from './placed-rectangle.ts';
 import { viewFactor, type RadiatingFootprint } from './radiation.ts';
 import type { SpreadInput } from './simulate-spread.ts';
 import { SpreadScene } from './spread-scene.ts';
@@ -40,6 +40,28 @@ type Place = PlacedRectangle;
 type Answers = Omit<SpreadGap, 'from' | 'to' | 'gap_m'>;
 type Views = { readonly [K in keyof Answers]: number };
 
+/** The pairs that stand nearer than what is enough, of all that were looked at. */
+export interface ShortGaps {
+  /** Ordered pairs within 10 m. */
+  readonly pairs: number;
+  readonly gaps: readonly SpreadGap[];
+}
+
+/** The gaps of `spreadGaps` that are smaller than enough, or where no gap would help; the others are counted only. */
+export function shortGaps(input: Pick<SpreadInput, 'room' | 'entries' | 'ignition'>): ShortGaps {
+  const scene = new SpreadScene(input.entries, input.room);
+  const found = { pairs: 0, gaps: [] as SpreadGap[] };
+  for (const from of scene.entries.keys()) {
+    if (!scene.canBurn(from)) continue;
+    for (const gap of gapsFrom(scene, from, input.ignition, found)) if (isShort(gap)) found.gaps.push(gap);
+  }
+  return found;
+}
+
+function isShort({ gap_m, enough }: SpreadGap): boolean {
+  return enough.metres === null || gap_m < enough.metres;
+}
+
 /**
  * The gaps of every ordered pair within 10 m: only the first burns, the second is moved straight away from it along the
  * line of centres (along the first one's depth where the centres are one). Sorted by id.
@@ -49,7 +71,13 @@ export function spreadGaps(input: Pick<SpreadInput, 'room' | 'entries' | 'igniti
   return scene.entries.flatMap((_, from) => (scene.canBurn(from) ? gapsFrom(scene, from, input.ignition) : []));
 }
 
-function gapsFrom(scene: SpreadScene, from: number, rule: SpreadInput['ignition']): SpreadGap[] {
+/** @param counted counts every pair and leaves out those that plainly stand far enough apart */
+function gapsFrom(
+  scene: SpreadScene,
+  from: number,
+  rule: SpreadInput['ignition'],
+  counted?: { pairs: number },
+): SpreadGap[] {
   const source = scene.source(from);
   const here = scene.footprint(from);
   if (!source || !here) return [];
@@ -65,10 +93,21 @@ function gapsFrom(scene: SpreadScene, from: number, rule: SpreadInput['ignition'
     const key = Object.values(entry.ignition).join();
     const views = known.get(key) ?? viewsOf(fire, entry.ignition, rule);
     known.set(key, views);
+    if (counted) {
+      counted.pairs += 1;
+      if (!flashes && isFarEnough(source, here, there, views.enough)) continue;
+    }
     const answers = flashes ? ALL_FLASHOVER : answersOf(source, here, there, views);
     gaps.push({ from: scene.entries[from]!.id, to: entry.id, gap_m, ...answers });
   }
   return gaps;
+}
+
+/** Whether every cell of the source, wherever it lies in it, is too far off for a view, and stays so farther out. */
+function isFarEnough(source: RadiatingFootprint, here: Place, there: Place, view: number): boolean {
+  if (view === 0) return false;
+  const spread = source.cells.length === 1 ? 0 : Math.hypot(here.halfWidth, here.halfDepth);
+  return Math.sqrt(squaredDistanceTo(there, here.x, here.y)) - spread > distanceOf(view);
 }
 
 const NEVER_FOR_FLASHOVER = { metres: null, never: FLASHOVER_ALONE } as const;

@@ -3,7 +3,7 @@ import type { EntryHeat } from '../tally/entry-heats.ts';
 import type { ChosenGrowth, GrowthClass } from '../tally/growth-class.ts';
 import type { RoomAreas } from '../tally/room-areas.ts';
 import type { RoomInput } from '../tally/room-input.ts';
-import type { RoomLinings } from '../tally/room-linings.ts';
+import { surfaceAreas, type RoomLinings } from '../tally/room-linings.ts';
 import type { RoomOpenings } from '../tally/room-openings.ts';
 import type { RoomTally } from '../tally/room-tally.ts';
 import {
@@ -82,16 +82,15 @@ export function spreadInput(given: SpreadGiven): {
 
 function roomOf({ input, areas, openings, linings, room, oxygenLimitedHeat_MJ }: SpreadGiven): SpreadRoom {
   const { used, afterGlass, roofVents } = openings;
-  const { walls, ceiling, floor } = linings.layers;
+  const surface = surfaceAreas(areas, used, roofVents);
   return {
     surfaces:
       linings.unknown.length > 0
         ? null
-        : [
-            { area_m2: Math.max(0, areas.walls - used.area), layers: walls },
-            { area_m2: Math.max(0, areas.floor - roofVents), layers: ceiling },
-            { area_m2: areas.floor, layers: floor },
-          ],
+        : (['walls', 'ceiling', 'floor'] as const).map((side) => ({
+            area_m2: surface[side],
+            layers: linings.layers[side],
+          })),
     liningArea_m2: used.liningArea,
     factorBefore: used.factor,
     factorAfter: afterGlass.factor,

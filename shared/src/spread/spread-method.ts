@@ -1,8 +1,9 @@
-import type { MethodSummary } from '../methods/define-method.ts';
+import type { MethodOutput, MethodSummary } from '../methods/define-method.ts';
 import { en1991, recalled } from '../methods/sources.ts';
 
-/** What a method of many parts says of itself, with what it leaves out. */
-export interface SpreadMethod extends MethodSummary {
+/** What a method of many parts says of itself, with what it gives and what it leaves out. */
+export interface SpreadMethod<Output extends string = string> extends MethodSummary {
+  readonly outputs: Readonly<Record<Output, MethodOutput>>;
   readonly limits: readonly string[];
 }
 
@@ -34,8 +35,11 @@ const INPUTS = {
   dose: { symbol: 'dose', unit: '(kW/m2)^n s', quantity: 'Dose that lights the target', valid: [0, Infinity] },
 } as const satisfies MethodSummary['inputs'];
 
+type SpreadOutput = 'ignition' | 'flux' | 'flashover' | 'peak' | 'end' | 'released' | 'unburnt';
+type GapOutput = 'asItStands' | 'justNot' | 'enough' | 'longExposure';
+
 /** Which entry ignites which: what the model is made of, for screens, prints and workings. */
-export const SPREAD_METHOD: SpreadMethod = {
+export const SPREAD_METHOD: SpreadMethod<SpreadOutput> = {
   id: 'spread.simulation',
   version: 1,
   ref: 'spread.simulation@1',
@@ -44,6 +48,15 @@ export const SPREAD_METHOD: SpreadMethod = {
   unit: 's',
   inputs: INPUTS,
   outOfRange: 'warn',
+  outputs: {
+    ignition: { symbol: 't', unit: 's', quantity: 'Time of ignition since the first one' },
+    flux: { symbol: 'q_j', unit: 'kW/m2', quantity: 'Flux at ignition' },
+    flashover: { symbol: 't_fo', unit: 's', quantity: 'Time of flashover' },
+    peak: { symbol: 'Q_max', unit: 'kW', quantity: 'Highest heat release rate of the room' },
+    end: { symbol: 't_end', unit: 's', quantity: 'End of burning' },
+    released: { symbol: 'E', unit: 'MJ', quantity: 'Heat released' },
+    unburnt: { symbol: 'ΣE_i − E', unit: 'MJ', quantity: 'Heat left unburnt' },
+  },
   equation:
     'q_j = k_f Σ min(120; χ_r Q_i G_ij) + q_L;  Σ (q_j − q_cr)ⁿ Δt ≥ dose;  G = (1/N) Σ 1/(4πR²);  q_L = σ[(T_0 + ΔT)⁴ − T_0⁴]',
   why: 'Among simple radiation models the point source came nearest to measured fluxes; cells keep long items right.',
@@ -72,7 +85,7 @@ export const SPREAD_METHOD: SpreadMethod = {
 };
 
 /** For gaps: what they mean and what they leave out, beside the limits above. */
-export const GAP_METHOD: SpreadMethod = {
+export const GAP_METHOD: SpreadMethod<GapOutput> = {
   id: 'spread.gap',
   version: 1,
   ref: 'spread.gap@1',
@@ -81,6 +94,12 @@ export const GAP_METHOD: SpreadMethod = {
   unit: 'm',
   inputs: INPUTS,
   outOfRange: 'warn',
+  outputs: {
+    asItStands: { symbol: 'gap', unit: 'm', quantity: 'Clear distance as they stand' },
+    justNot: { symbol: 'gap_1', unit: 'm', quantity: 'Gap that just does not light, k_f = 1' },
+    enough: { symbol: 'gap_2', unit: 'm', quantity: 'Gap that is enough, k_f = 2' },
+    longExposure: { symbol: 'gap_∞', unit: 'm', quantity: 'Gap that is enough however long it burns, k_f = 2' },
+  },
   equation:
     'gap at which Σ (k_f min(120; χ_r Q G) + q_L − q_cr)ⁿ Δt = dose;  long exposure: k_f χ_r Q_p G + q_L = q_cr',
   why: 'A distance is asked for one pair; with three entries a larger gap can even light the third one sooner.',

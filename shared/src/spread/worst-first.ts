@@ -26,10 +26,16 @@ export function worstFirst(scene: SpreadScene, rules: RunRules): WorstFirst | un
   const candidates = burnable.length <= TRY_ALL_UP_TO ? burnable : candidatesOf(scene, burnable);
   let worst: SpreadRun | undefined;
   for (const index of candidates) {
-    const run = runSpread(scene, index, rules);
+    const run = runSpread(scene, index, rules, latestWorse(worst));
+    if (run.stopped === 'overtaken') continue;
     if (worst === undefined || isWorse(run, worst)) worst = run;
   }
   return worst && { run: worst, tried: candidates.length, of: burnable.length };
+}
+
+/** A fire that has not flashed over by then is not worse, s. */
+function latestWorse(worst: SpreadRun | undefined): number {
+  return worst?.flashover_s == null ? Infinity : worst.flashover_s * (1 + SAME);
 }
 
 /** In the scene's order, which is by id. */

@@ -147,7 +147,7 @@ function holeFaults(room: RoomInput['room']): RoomInputFault[] {
   );
 }
 
-function contentsFaults({ contents }: RoomInput): RoomInputFault[] {
+function contentsFaults({ contents, options }: RoomInput): RoomInputFault[] {
   const faults: RoomInputFault[] = [];
   const seen = new Set<string>();
   contents.forEach((entry, i) => {
@@ -157,6 +157,14 @@ function contentsFaults({ contents }: RoomInput): RoomInputFault[] {
     seen.add(entry.id);
     faults.push(...entryFaults(entry, `/contents/${i}`));
   });
+  const first = options?.first_entry ?? null;
+  if (first !== null && !seen.has(first)) {
+    faults.push({
+      pointer: '/options/first_entry',
+      code: 'unknown_entry',
+      message: `No entry has the id “${first.slice(0, 80)}”. Give the id of the entry that burns first, or leave it out.`,
+    });
+  }
   return faults;
 }
 

@@ -35,8 +35,8 @@ function layersOf(surface: RoomInputSurface | null | undefined): readonly Layer[
   return 'layers' in surface ? surface.layers : (liningByKey(surface.key)?.layers ?? []);
 }
 
-/** Area of each side without the openings of a stage, m². */
-function surfaceAreas(areas: RoomAreas, stage: OpeningStage, roofVents: number): Record<Side, number> {
+/** Area of each side without the openings of a stage and without open roof vents, m². */
+export function surfaceAreas(areas: RoomAreas, stage: OpeningStage, roofVents: number): Record<Side, number> {
   return {
     walls: Math.max(0, areas.walls - stage.area),
     ceiling: Math.max(0, areas.floor - roofVents),

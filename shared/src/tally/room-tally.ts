@@ -102,13 +102,17 @@ export interface SpreadTally {
   readonly events?: readonly SpreadTallyEvent[];
   /** Pairs that stand nearer than what is enough, largest shortfall first. */
   readonly gaps?: readonly SpreadTallyGap[];
-  /** Ordered pairs within 10 m that were looked at. */
+  /** Ordered pairs within 10 m that were looked at, and how many of them are too near; `gaps` has the first 200 of those. */
   readonly pairs?: number;
+  readonly pairsShort?: number;
   /** `[[s, kW], …]`; its area equals `heatReleased` within 0.1 %. */
   readonly curve?: readonly (readonly [number, number])[];
   /** Id of the entry that burns first. */
   readonly first?: string;
   readonly firstChosen?: 'given' | 'worst';
+  /** With `worst`: how many first entries were tried, of how many that can burn. */
+  readonly firstTried?: number;
+  readonly firstOf?: number;
   /** s, or never */
   readonly flashover?: Estimate;
   /** kW */

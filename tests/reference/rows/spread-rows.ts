@@ -275,3 +275,16 @@ export const SPREAD_ROWS: readonly SpreadRow[] = [
     expected: { lights: { B: 793, C: 882 }, flashover: null, released: 3140 },
   },
 ];
+
+/** Gaps of a pair of one of the fires above, m: just not lit, enough, and both of them held for ever; within 1 cm. */
+export const GAP_ROWS = [
+  {
+    id: 'S10-gaps-of-a-pair',
+    method: 'spread.gap',
+    fire: 'S2-pair-ignites',
+    from: 'A',
+    expected: { justNot: 1.405, enough: 2.277, longExposureJustNot: 1.939, longExposureEnough: 3.032 },
+    origin: 'independent',
+    source: 'bisection and closed form',
+  },
+] as const;

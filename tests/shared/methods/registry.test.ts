@@ -2,13 +2,14 @@ import { readdirSync, readFileSync } from 'node:fs';
 import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { describe, expect, it } from 'vitest';
-import { methodByRef, METHODS } from '@embertally/shared/methods/registry';
+import { methodByRef, METHODS, MODELS } from '@embertally/shared/methods/registry';
 import { BURNOUT_ROWS } from '../../reference/rows/burnout-rows.ts';
 import { CALORIMETRY_ROWS } from '../../reference/rows/calorimetry-rows.ts';
 import { CHEMISTRY_ROWS } from '../../reference/rows/chemistry-rows.ts';
 import { GROWTH_ROWS } from '../../reference/rows/growth-rows.ts';
 import { HEAT_ROWS } from '../../reference/rows/heat-rows.ts';
 import { LOAD_ROWS } from '../../reference/rows/load-rows.ts';
+import { MATERIAL_ROWS } from '../../reference/rows/material-rows.ts';
 import { ROOM_ROWS } from '../../reference/rows/room-rows.ts';
 import { STATISTICS_ROWS } from '../../reference/rows/statistics-rows.ts';
 import { TEMPERATURE_ROWS } from '../../reference/rows/temperature-rows.ts';
@@ -20,6 +21,8 @@ import { WATER_ROWS } from '../../reference/rows/water-rows.ts';
 import { STORAGE_ROWS } from '../../reference/rows/storage-rows.ts';
 import { SCHEME_ROWS } from '../../reference/rows/scheme-rows.ts';
 import { DISTRIBUTION_ROWS } from '../../reference/rows/distribution-rows.ts';
+import { HOW_MANY_ROWS, WHAT_CHANGES_ROWS } from '../../reference/rows/question-rows.ts';
+import { GAP_ROWS, SPREAD_ROWS } from '../../reference/rows/spread-rows.ts';
 import { UNCERTAINTY_ROWS } from '../../reference/rows/uncertainty-rows.ts';
 
 const rows = [
@@ -29,6 +32,7 @@ const rows = [
   ...GROWTH_ROWS,
   ...HEAT_ROWS,
   ...LOAD_ROWS,
+  ...MATERIAL_ROWS,
   ...ROOM_ROWS,
   ...STATISTICS_ROWS,
   ...TEMPERATURE_ROWS,
@@ -41,10 +45,14 @@ const rows = [
   ...SCHEME_ROWS,
   ...DISTRIBUTION_ROWS,
   ...UNCERTAINTY_ROWS,
+  ...SPREAD_ROWS,
+  ...GAP_ROWS,
+  ...HOW_MANY_ROWS,
+  ...WHAT_CHANGES_ROWS,
 ];
 const folder = join(dirname(fileURLToPath(import.meta.url)), '../../../shared/src/methods');
 
-describe.each(METHODS.map((method) => [method.ref, method] as const))('%s', (ref, method) => {
+describe.each([...METHODS, ...MODELS].map((method) => [method.ref, method] as const))('%s', (ref, method) => {
   it('has a source with a place in it, a reason, an equation and a range for every number', () => {
     expect(method.sources.length).toBeGreaterThan(0);
     for (const { title, locator } of method.sources) expect(`${title}|${locator}`).toMatch(/^.{3,}\|.{3,}$/);
@@ -67,7 +75,7 @@ describe.each(METHODS.map((method) => [method.ref, method] as const))('%s', (ref
 
 describe('the list of methods', () => {
   it('has each id once', () => {
-    expect(new Set(METHODS.map(({ id }) => id)).size).toBe(METHODS.length);
+    expect(new Set([...METHODS, ...MODELS].map(({ id }) => id)).size).toBe(METHODS.length + MODELS.length);
   });
 
   it('holds every declared method', () => {

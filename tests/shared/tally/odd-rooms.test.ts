@@ -1,12 +1,12 @@
 import { describe, expect, it } from 'vitest';
-import { METHODS } from '@embertally/shared/methods/registry';
+import { METHODS, MODELS } from '@embertally/shared/methods/registry';
 import { estimateRoom } from '@embertally/shared/tally/estimate-room';
 import type { RoomTally } from '@embertally/shared/tally/room-tally';
 import { CONTRACT_PATHS } from './contract-paths.ts';
 import { expectFinite } from './expect-finite.ts';
 import { ODD_ROOMS } from './odd-rooms.ts';
 
-const known = new Set(METHODS.map(({ ref }) => ref));
+const known = new Set([...METHODS, ...MODELS].map(({ ref }) => ref));
 
 function at(tally: RoomTally, path: string): unknown {
   return path.split('.').reduce<unknown>((value, key) => (value as Record<string, unknown> | undefined)?.[key], tally);

@@ -1,5 +1,6 @@
 import { defineMethod } from '../define-method.ts';
 import { recalled } from '../sources.ts';
+import { flameLength } from './flame-length.ts';
 
 /** Mean height of the flame above its base, m; 0 for a mass fire that has no common flame. */
 export const flameHeight = defineMethod({
@@ -18,5 +19,5 @@ export const flameHeight = defineMethod({
   assumptions: ['Total heat release rate, open air, no wind.'],
   why: 'Radiation and plume start from it.',
   outOfRange: 'warn',
-  run: ({ Q, D }) => Math.max(0, 0.235 * Q ** 0.4 - 1.02 * D),
+  run: ({ Q, D }) => flameLength(Q, D),
 });
