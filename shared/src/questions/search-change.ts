@@ -15,7 +15,7 @@ export interface SearchRange {
   readonly tolerance: number;
   /** Whole numbers only. */
   readonly whole?: boolean;
-  /** `even`: 48 equal steps. `doubling`: 1, 2, 4 … tolerances, for counts and masses without a natural end. */
+  /** `even`: 32 equal steps. `doubling`: 1, 2, 4 … tolerances, for counts and masses without a natural end. */
   readonly steps?: 'even' | 'doubling';
 }
 
@@ -38,7 +38,7 @@ export interface NoChange {
 
 export type SearchResult = ({ readonly found: true } & Change) | ({ readonly found: false } & NoChange);
 
-const EVEN_STEPS = 48;
+const EVEN_STEPS = 32;
 const MOST_HALVINGS = 80;
 /** A leap: more than this share of the number within the tolerance. */
 const JUMP = 0.01;
