@@ -27,6 +27,8 @@ const schema = z.object({
   /** Cost of a password hash; never under the floor of 19 MiB and 2 passes. */
   HASH_MEMORY_KIB: z.coerce.number().int().min(19_456).max(1_048_576).default(65_536),
   HASH_PASSES: z.coerce.number().int().min(2).max(20).default(3),
+  /** Most that the files of one organisation may take together, MB. */
+  FILES_PER_ORGANISATION_MB: z.coerce.number().int().min(1).max(1_000_000).default(2048),
 });
 
 export interface Env {
@@ -44,6 +46,7 @@ export interface Env {
   readonly databasePool: number;
   readonly hashMemory_KiB: number;
   readonly hashPasses: number;
+  readonly filesPerOrganisation_bytes: number;
 }
 
 /** A setting that cannot be used: the message is one sentence for whoever starts the program. */
@@ -84,5 +87,6 @@ export function readEnv(source: Readonly<Record<string, string | undefined>>): E
     databasePool: env.DATABASE_POOL,
     hashMemory_KiB: env.HASH_MEMORY_KIB,
     hashPasses: env.HASH_PASSES,
+    filesPerOrganisation_bytes: env.FILES_PER_ORGANISATION_MB * 1024 * 1024,
   };
 }

@@ -54,6 +54,7 @@ export class House {
       sessions: this.sessions,
       hashes: new PasswordHashes({ memory_KiB: env.hashMemory_KiB, passes: env.hashPasses }),
       files: new FolderFileStore(join(env.dataDir, 'files')),
+      fileQuota_bytes: env.filesPerOrganisation_bytes,
       jobs: this.jobs,
       makeReport: options.makeReport ?? makeReportInWorker,
     });
@@ -124,6 +125,7 @@ export class House {
       await this.sessions.removeExpired();
       await this.services.throttle.forgetOld();
       await this.services.exports.failAbandoned();
+      await this.services.files.sweep();
       await this.services.summaries.sweep();
     } catch (error) {
       this.log.warn({ err: error }, 'housekeeping was put off');

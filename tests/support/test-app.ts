@@ -109,6 +109,11 @@ export class TestApp {
     rmSync(this.folder, { recursive: true, force: true });
   }
 
+  /** Where the files store keeps what it was given. */
+  get filesFolder(): string {
+    return join(this.folder, 'files');
+  }
+
   /** Somebody who is not signed in. */
   visitor(): Visitor {
     return new Visitor(this.server, this.url);

@@ -10,6 +10,9 @@ import { KnownDevice } from './known-device.ts';
 import { Member } from './member.ts';
 import { Opening } from './opening.ts';
 import { Organisation } from './organisation.ts';
+import { OwnMaterialEvidence } from './own-material-evidence.ts';
+import { OwnMaterialVersion } from './own-material-version.ts';
+import { OwnMaterial } from './own-material.ts';
 import { Person } from './person.ts';
 import { RoomLimit } from './room-limit.ts';
 import { RoomSummary } from './room-summary.ts';
@@ -18,6 +21,7 @@ import { Session } from './session.ts';
 import { SignInAttempt } from './sign-in-attempt.ts';
 import { SiteRole } from './site-role.ts';
 import { Site } from './site.ts';
+import { StoredFile } from './stored-file.ts';
 import { Storey } from './storey.ts';
 import { Survey } from './survey.ts';
 
@@ -35,6 +39,9 @@ export const ALL_ENTITIES = [
   Member,
   Opening,
   Organisation,
+  OwnMaterialEvidence,
+  OwnMaterialVersion,
+  OwnMaterial,
   Person,
   RoomLimit,
   RoomSummary,
@@ -43,6 +50,7 @@ export const ALL_ENTITIES = [
   SignInAttempt,
   SiteRole,
   Site,
+  StoredFile,
   Storey,
   Survey,
 ];

@@ -36,6 +36,17 @@ const problem = (description: string): Json => ({
   content: { 'application/problem+json': { schema: { $ref: '#/components/schemas/Problem' } } },
 });
 
+/** The body of an operation: JSON by its schema, or a file of the types it takes. */
+function requestBody(contract: Contract): Json {
+  const body = contract.bodyShape ?? contract.body;
+  if (body !== undefined) {
+    return { requestBody: { required: true, content: { 'application/json': { schema: schemaOf(body, 'input') } } } };
+  }
+  if (contract.upload === undefined) return {};
+  const content = Object.fromEntries(Object.keys(contract.upload).map((type) => [type, {}]));
+  return { requestBody: { required: true, content } };
+}
+
 function responses(contract: Contract): Json {
   const content =
     contract.response !== undefined
@@ -49,15 +60,22 @@ function responses(contract: Contract): Json {
     [contract.status]: { description: 'Done', ...content },
     ...(signedIn ? { 401: problem('Not signed in') } : {}),
     ...(limited ? { 403: problem('The role does not allow it') } : {}),
-    ...(contract.policy.kind === 'site' ? { 404: problem('Not there, or not yours to know of') } : {}),
+    ...(limited && contract.params !== undefined ? { 404: problem('Not there, or not yours to know of') } : {}),
     ...(contract.ifMatch ? { 412: problem('Changed meanwhile'), 428: problem('If-Match is missing') } : {}),
     ...(contract.body ? { 415: problem('Not JSON'), 422: problem('Faults, each with its place') } : {}),
+    ...(contract.upload
+      ? {
+          413: problem('Too large'),
+          415: problem('Not of a type that is taken, or not what it says'),
+          422: problem('Faults, each with its place'),
+          507: problem('No room left'),
+        }
+      : {}),
     default: problem('Any other refusal'),
   };
 }
 
 function operation(contract: Contract): Json {
-  const body = contract.bodyShape ?? contract.body;
   const headers = [
     ...(contract.ifMatch ? [{ name: 'If-Match', in: 'header', required: true, schema: { type: 'string' } }] : []),
     ...(contract.method === 'GET'
@@ -69,9 +87,7 @@ function operation(contract: Contract): Json {
     summary: contract.summary,
     description: policyInWords(contract.policy),
     parameters: [...parameters('path', contract.params), ...parameters('query', contract.query), ...headers],
-    ...(body === undefined
-      ? {}
-      : { requestBody: { required: true, content: { 'application/json': { schema: schemaOf(body, 'input') } } } }),
+    ...requestBody(contract),
     responses: responses(contract),
     security: contract.policy.kind === 'public' ? [] : [{ session: [] }],
     'x-policy': contract.policy,

@@ -8,6 +8,7 @@ import { cautionRoutes } from './caution-routes.ts';
 import { descriptionRoutes } from './description-routes.ts';
 import { estimateRoutes } from './estimate-routes.ts';
 import { exportRoutes } from './export-routes.ts';
+import { fileRoutes } from './file-routes.ts';
 import { healthRoutes } from './health-routes.ts';
 import { limitRoutes } from './limit-routes.ts';
 import { organisationRoutes } from './organisation-routes.ts';
@@ -32,6 +33,7 @@ export function allRoutes({ services, sessions, events }: RouteParts): Route[] {
     ...limitRoutes(services.limits),
     ...surveyRoutes({ ...services, events }),
     ...exportRoutes(services.exports),
+    ...fileRoutes(services.files),
     ...estimateRoutes(),
     ...catalogueRoutes(),
     ...cautionRoutes(),

@@ -11,6 +11,7 @@ import { AccountService } from './account-service.ts';
 import { BuildingService } from './building-service.ts';
 import { ChangeSetService } from './change-set-service.ts';
 import { ExportService } from './export-service.ts';
+import { FileService } from './file-service.ts';
 import { HealthService } from './health-service.ts';
 import { HistoryService } from './history-service.ts';
 import { LimitService } from './limit-service.ts';
@@ -27,6 +28,8 @@ export interface ServiceParts {
   readonly sessions: Sessions;
   readonly hashes: PasswordHashes;
   readonly files: FileStore;
+  /** Most bytes the files of one organisation may take together. */
+  readonly fileQuota_bytes: number;
   readonly jobs: Jobs;
   readonly makeReport: ReportMaker;
 }
@@ -42,6 +45,7 @@ export interface Services {
   readonly changeSets: ChangeSetService;
   readonly summaries: SummaryService;
   readonly exports: ExportService;
+  readonly files: FileService;
   readonly history: HistoryService;
   readonly health: HealthService;
   readonly throttle: SignInThrottle;
@@ -65,6 +69,7 @@ export function services(parts: ServiceParts): Services {
     surveys: new SurveyService(database),
     changeSets: new ChangeSetService({ database, clock, summaries }),
     exports: new ExportService(parts),
+    files: new FileService(parts),
     history: new HistoryService(database),
     health: new HealthService(database),
   };

@@ -1,16 +1,17 @@
 import { randomUUID } from 'node:crypto';
 import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest';
 import type { SiteRoleName } from '@embertally/shared/policy/policy';
+import { samplePdf } from '../../support/sample-files.ts';
 import { box, crate, groundFloor, uid, withEntries, withRoom } from '../../support/survey-builder.ts';
 import { PASSWORD, TestApp, creating, type TestBook, type TestPerson } from '../../support/test-app.ts';
 import type { Visitor } from '../../support/visitor.ts';
 
-type Who = 'everyone' | 'signed in' | readonly SiteRoleName[];
+type Who = 'everyone' | 'signed in' | 'own organisation' | readonly SiteRoleName[];
 const ALL: readonly SiteRoleName[] = ['manager', 'inspector', 'reviewer', 'viewer'];
 
 /**
  * Who may do what, written down a second time from the product's own table, so that neither the policy nor a route can
- * drift alone. `keeper`: only in the organisation that keeps the site.
+ * drift alone. `keeper`: only in the organisation that keeps the site. `own organisation`: the one that made the thing.
  */
 const EXPECTED: Readonly<Record<string, { readonly who: Who; readonly keeper?: true }>> = {
   'health.live': { who: 'everyone' },
@@ -30,6 +31,8 @@ const EXPECTED: Readonly<Record<string, { readonly who: Who; readonly keeper?: t
   'kinds.list': { who: 'signed in' },
   'linings.list': { who: 'signed in' },
   'uses.list': { who: 'signed in' },
+  'files.create': { who: 'signed in' },
+  'files.read': { who: 'own organisation' },
   'sites.read': { who: ALL },
   'sites.edit': { who: ['manager'], keeper: true },
   'site-roles.give': { who: ['manager'], keeper: true },
@@ -73,6 +76,7 @@ let book: TestBook;
 let keeper: TestPerson;
 let inspector: TestPerson;
 let exportId: string;
+let fileId: string;
 let operations: readonly Operation[];
 let personas: readonly Persona[];
 const TRAIL = { requestId: 'test', ip: '127.0.0.1' };
@@ -89,6 +93,12 @@ beforeAll(async () => {
   personas = await makePersonas();
   inspector = personas.find((persona) => persona.name === 'inspector elsewhere')?.person ?? keeper;
   exportId = await makeExport();
+  fileId = randomUUID();
+  await keeper.visitor
+    .send('post', uploadPath(fileId))
+    .set('Content-Type', 'application/pdf')
+    .send(samplePdf())
+    .expect(201);
   const described = await app.visitor().get('/api/openapi.json').expect(200);
   operations = operationsOf(described.body as Described);
 });
@@ -126,6 +136,8 @@ async function makeExport(): Promise<string> {
   });
   return id;
 }
+
+const uploadPath = (id: string): string => `/api/files?id=${id}&name=report.pdf`;
 
 interface Described {
   paths: Record<string, Record<string, { operationId: string; responses: Record<string, unknown> }>>;
@@ -166,7 +178,7 @@ async function newLimit(): Promise<string> {
 /** A request of each operation that would succeed for somebody who may make it. */
 async function validRequest(
   id: string,
-): Promise<{ params?: Record<string, string>; query?: string; body?: object; etag?: string }> {
+): Promise<{ params?: Record<string, string>; query?: string; body?: object; file?: Buffer; etag?: string }> {
   switch (id) {
     case 'organisations.create':
       return {
@@ -250,6 +262,8 @@ async function validRequest(
           contents: [],
         },
       };
+    case 'files.create':
+      return { query: uploadPath(randomUUID()).replace('/api/files', ''), file: samplePdf() };
     case 'exports.create':
       return { body: { id: randomUUID(), kind: 'survey-report', room_id: null, units: 'SI' } };
     default:
@@ -275,6 +289,7 @@ async function statusOf(
   }
   const test = visitor.send(operation.method, path, valid.body);
   if (valid.etag !== undefined) test.set('If-Match', valid.etag);
+  if (valid.file !== undefined) test.set('Content-Type', 'application/pdf').send(valid.file);
   const answer = await test;
   return { status: answer.status, body: answer.body };
 }
@@ -284,12 +299,14 @@ const realIds = (): Record<string, string> => ({
   buildingId: book.buildingId,
   surveyId: book.surveyId,
   exportId,
+  fileId,
 });
 
 function allowed({ who, keeper: keeperOnly }: { who: Who; keeper?: true }, persona: Persona): number | 'ok' {
   if (who === 'everyone') return 'ok';
   if (persona.person === null) return 401;
   if (who === 'signed in') return 'ok';
+  if (who === 'own organisation') return persona.ofKeeper ? 'ok' : 404;
   if (persona.role === null) return 404;
   return who.includes(persona.role) && (keeperOnly !== true || persona.ofKeeper) ? 'ok' : 403;
 }
@@ -323,6 +340,7 @@ async function contentHash(): Promise<string> {
     'room_limit',
     'change_set',
     'export',
+    'stored_file',
   ];
   const parts = tables.map(
     (table) => `(SELECT coalesce(md5(string_agg(t::text, ',' ORDER BY t::text)), '') FROM "${table}" t)`,
@@ -362,6 +380,7 @@ describe('who may do what', () => {
         surveyId: randomUUID(),
         exportId: randomUUID(),
         limitId: randomUUID(),
+        fileId: randomUUID(),
       };
       const there = await statusOf(operation, stranger, realIds());
       const nowhere = await statusOf(operation, stranger, random);
