@@ -87,6 +87,20 @@ export const routes: RouteObject[] = [
             ),
           },
           {
+            path: patterns.newMaterial,
+            lazy: loadPage(
+              () => import('./pages/new-material-page.tsx'),
+              (m) => m.NewMaterialPage,
+            ),
+          },
+          {
+            path: patterns.material,
+            lazy: loadPage(
+              () => import('./pages/material-page.tsx'),
+              (m) => m.MaterialPage,
+            ),
+          },
+          {
             path: patterns.cautions,
             handle: open,
             lazy: loadPage(

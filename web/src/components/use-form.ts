@@ -1,4 +1,4 @@
-import { useState, type SubmitEvent } from 'react';
+import { useRef, useState, type SubmitEvent } from 'react';
 import { ContractError, OfflineError, ProblemError, UnprocessableError } from '../lib/api-errors.ts';
 import { draftOf } from '../lib/draft.ts';
 import { useErrorTitle } from '../lib/page-title.ts';
@@ -16,7 +16,9 @@ interface FormOptions<V extends Texts<V>> {
   readonly validate: (values: V) => FieldErrors<V>;
   readonly submit: (values: V) => Promise<void>;
   /** Fields to keep through a reload until the form is sent. Never a password. */
-  readonly keep?: readonly (keyof V & string)[];
+  readonly keep?: readonly (keyof V & string)[] | 'everything';
+  /** Which field a fault of the server belongs to, by its pointer into what was sent; null: the whole. Its first step when not said. */
+  readonly placeFault?: (pointer: string, values: V) => (keyof V & string) | null;
 }
 
 interface FieldTies {
@@ -30,14 +32,16 @@ interface FieldTies {
 export interface Form<V extends Texts<V>> {
   readonly values: V;
   readonly set: <K extends keyof V & string>(name: K, value: V[K]) => void;
-  /** Sets several fields at once, as when one answer suggests others. */
-  readonly fill: (patch: Partial<V>) => void;
+  /** Sets several fields at once, as when one answer suggests others; a function where what stands there now matters. */
+  readonly fill: (patch: Partial<V> | ((values: V) => Partial<V>)) => void;
   /** What a text field needs, its error included. */
   readonly field: (name: keyof V & string) => FieldTies;
   readonly summary: { readonly errors: readonly SummaryError[]; readonly attempt: number };
   readonly busy: boolean;
   /** Empties the form back to how it began, for the next one. */
   readonly reset: () => void;
+  /** Forgets what was kept, for a form that is left on purpose. */
+  readonly forget: () => void;
   readonly onSubmit: (event: SubmitEvent) => void;
 }
 
@@ -69,6 +73,8 @@ export function useForm<V extends Texts<V>>(options: FormOptions<V>): Form<V> {
   const [values, setValues] = useState<V>(() =>
     options.keep ? { ...options.initial, ...draft.read() } : options.initial,
   );
+  // What comes late, as the end of an upload, must not put back what was typed meanwhile.
+  const latest = useRef(values);
   const [errors, setErrors] = useState<FieldErrors<V>>({});
   const [whole, setWhole] = useState<readonly string[]>([]);
   const [attempt, setAttempt] = useState(0);
@@ -81,14 +87,16 @@ export function useForm<V extends Texts<V>>(options: FormOptions<V>): Form<V> {
   ];
   useErrorTitle(summaryErrors.length > 0);
 
-  const fill = (patch: Partial<V>) => {
-    const next = { ...values, ...patch };
+  const fill: Form<V>['fill'] = (change) => {
+    const patch = typeof change === 'function' ? change(latest.current) : change;
+    const next = { ...latest.current, ...patch };
+    latest.current = next;
     setValues(next);
     setErrors((current) => {
       const still = Object.entries(current).filter(([name]) => !(name in patch));
       return Object.fromEntries(still) as FieldErrors<V>;
     });
-    if (options.keep) draft.keep(pick(next, options.keep));
+    if (options.keep) draft.keep(options.keep === 'everything' ? next : pick(next, options.keep));
   };
   const set = <K extends keyof V & string>(name: K, value: V[K]) => {
     fill({ [name]: value } as unknown as Partial<V>);
@@ -110,8 +118,9 @@ export function useForm<V extends Texts<V>>(options: FormOptions<V>): Form<V> {
     const byField: Record<string, string> = {};
     const rest: string[] = [];
     for (const fault of error.problem.errors ?? []) {
-      const name = fault.pointer.split('/')[1] ?? '';
-      if (name in values && byField[name] === undefined) byField[name] = fault.message;
+      const first = fault.pointer.split('/')[1] ?? '';
+      const name = options.placeFault ? options.placeFault(fault.pointer, values) : first in values ? first : null;
+      if (name !== null && byField[name] === undefined) byField[name] = fault.message;
       else rest.push(fault.message);
     }
     refuse(byField, rest.length === 0 && Object.keys(byField).length === 0 ? [error.problem.detail] : rest);
@@ -146,10 +155,12 @@ export function useForm<V extends Texts<V>>(options: FormOptions<V>): Form<V> {
     summary: { errors: summaryErrors, attempt },
     busy,
     reset: () => {
+      latest.current = options.initial;
       setValues(options.initial);
       setErrors({});
       setWhole([]);
     },
+    forget: draft.forget,
     onSubmit: (event) => {
       event.preventDefault();
       if (busy) return;

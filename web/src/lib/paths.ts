@@ -9,6 +9,8 @@ export const patterns = {
   survey: '/surveys/:surveyId',
   workings: '/surveys/:surveyId/rooms/:roomId/workings',
   catalogue: '/catalogue',
+  newMaterial: '/catalogue/materials/new',
+  material: '/catalogue/materials/:materialId',
   cautions: '/cautions',
   account: '/account',
 } as const;
@@ -26,7 +28,16 @@ export const paths = {
   survey: (surveyId: string) => `/surveys/${encodeURIComponent(surveyId)}`,
   workings: (surveyId: string, roomId: string) =>
     `/surveys/${encodeURIComponent(surveyId)}/rooms/${encodeURIComponent(roomId)}/workings`,
-  catalogue: () => '/catalogue',
+  catalogue: (list?: 'own' | 'kinds') => (list === undefined ? '/catalogue' : `/catalogue?list=${list}`),
+  /** `way`: what its heat is known from; asked first where it is not said. */
+  newMaterial: (way?: string) =>
+    way === undefined ? '/catalogue/materials/new' : `/catalogue/materials/new?way=${encodeURIComponent(way)}`,
+  /** The next version of a material, begun from one that is there; `edit`: that version itself, a draft of one's own. */
+  nextVersion: (materialId: string, version: number, edit = false) =>
+    `/catalogue/materials/new?of=${encodeURIComponent(materialId)}&${edit ? 'edit' : 'from'}=${version}`,
+  /** Key of a built-in material or id of an own one; `version`: not the one that was made last. */
+  material: (key: string, version?: number) =>
+    `/catalogue/materials/${encodeURIComponent(key)}${version === undefined ? '' : `?version=${version}`}`,
   cautions: () => '/cautions',
   account: () => '/account',
 } as const;

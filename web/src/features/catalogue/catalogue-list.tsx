@@ -4,7 +4,7 @@ import { Button } from '../../components/button.tsx';
 import { EmptyState } from '../../components/empty-state.tsx';
 import { LoadFailed } from '../../components/load-failed.tsx';
 import { Skeleton } from '../../components/skeleton.tsx';
-import { matches } from './matches.ts';
+import { matches } from '../../lib/matches.ts';
 
 interface Row {
   readonly label: string;
@@ -18,12 +18,14 @@ interface CatalogueListProps<R extends Row> {
   readonly noun: string;
   readonly rows: UseQueryResult<{ readonly items: readonly R[] }>;
   readonly typed: string;
+  /** Narrows further, as to one group; what fits is said of these alone. */
+  readonly only?: ((row: R) => boolean) | undefined;
   readonly onShowAll: () => void;
   readonly children: (found: readonly R[]) => ReactNode;
 }
 
 /** One list of the catalogue in each of its states, narrowed by what is typed. */
-export function CatalogueList<R extends Row>({ noun, rows, typed, onShowAll, children }: CatalogueListProps<R>) {
+export function CatalogueList<R extends Row>({ noun, rows, typed, only, onShowAll, children }: CatalogueListProps<R>) {
   if (rows.isPending) return <Skeleton label={`Reading the ${noun}`} lines={8} />;
   if (rows.isError) {
     return (
@@ -35,7 +37,7 @@ export function CatalogueList<R extends Row>({ noun, rows, typed, onShowAll, chi
       />
     );
   }
-  const all = rows.data.items;
+  const all = only === undefined ? rows.data.items : rows.data.items.filter(only);
   const found = matches(all, typed);
   return (
     <>

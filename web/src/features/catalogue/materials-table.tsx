@@ -1,8 +1,10 @@
+import { Link } from 'react-router-dom';
 import { Range } from '../../components/range.tsx';
 import { Quantity } from '../../components/quantity.tsx';
 import type { Sort } from '../../components/sort.ts';
 import { Table, type Column } from '../../components/table.tsx';
-import type { CatalogueMaterial } from './api/materials.ts';
+import type { CatalogueMaterial } from '../../lib/catalogue-materials.ts';
+import { paths } from '../../lib/paths.ts';
 import { SourceNote } from './source-note.tsx';
 
 const COLUMNS: readonly Column<CatalogueMaterial>[] = [
@@ -13,7 +15,10 @@ const COLUMNS: readonly Column<CatalogueMaterial>[] = [
     sortBy: (row) => row.label,
     cell: (row) => (
       <>
-        {row.label}
+        <Link to={paths.material(row.key)} className="inline-block py-0.5">
+          {row.label}
+        </Link>
+        {row.own === null ? null : <span className="ml-2 font-normal text-soft">own, version {row.own.version}</span>}
         {row.hazards.length === 0 ? null : (
           <span className="block text-small font-normal text-soft">{row.hazards.join(', ')}</span>
         )}

@@ -1,0 +1,16 @@
+import { listMaterials, type materialSchema } from '@embertally/shared/contracts/materials';
+import { queryOptions } from '@tanstack/react-query';
+import type { z } from 'zod/mini';
+import { call } from './api-client.ts';
+
+/** A material that may be placed: built in, or an approved one of the organisation's own. */
+export type CatalogueMaterial = z.infer<typeof materialSchema>;
+
+/** Every material that may be placed; `own`: only those of the organisation, for screens that carry the others. */
+export function materialsQuery(of?: 'own') {
+  return queryOptions({
+    queryKey: ['materials', of ?? 'all'],
+    queryFn: ({ signal }) => call(listMaterials, { signal, ...(of === undefined ? {} : { query: { of } }) }),
+    staleTime: 60_000,
+  });
+}
