@@ -41,6 +41,35 @@ const NAMES: Readonly<Record<string, string>> = {
   'growth.heatReleased': 'Heat released',
   'burnout.thermalInertia': 'Thermal inertia of the linings',
   'burnout.openingFactor': 'Opening factor of the burn-out',
+  'response.sprinkler': 'Answer of the first sprinkler',
+  'response.detector': 'Answer of the first detector',
+  'response.heatDetector': 'Answer of the heat detector',
+  'response.smokeDetector': 'Answer of the smoke detector',
+  'air.oxygenLimitedHeat': 'Heat the air of the closed room can feed, to 13 % oxygen',
+  'air.oxygenLimitedHeatAt15': 'Heat the air of the closed room can feed, to 15 % oxygen',
+  'air.oxygenLimitedHeatAt10': 'Heat the air of the closed room can feed, to 10 % oxygen',
+  'air.oxygenEnd': 'Air of the room used up after',
+  'air.massForVisibility10m': 'Mass burnt until signs are seen 10 m away',
+  'air.massForVisibility10mShining': 'Mass burnt until lit signs are seen 10 m away',
+  'air.carbonMonoxide': 'Carbon monoxide at the oxygen limit, with enough air',
+  'air.carbonMonoxideShortOfAir': 'Carbon monoxide at the oxygen limit, short of air',
+  'spread.events': 'What sets what alight',
+  'spread.gaps': 'Gaps between entries',
+  'spread.curve': 'Heat release curve of the entries',
+  'spread.flashover': 'Flashover by the order of ignition',
+  'spread.peak': 'Peak heat release by the order of ignition',
+  'spread.end': 'End of the fire by the order of ignition',
+  'spread.heatReleased': 'Heat released by the order of ignition',
+  'spread.unburnt': 'Heat left unburnt',
+};
+
+const SPREAD_NAMES: Readonly<Record<string, string>> = {
+  t: 'Time of ignition',
+  flux: 'Radiation at ignition',
+  gap_m: 'Gap as it stands',
+  just_not_m: 'Gap that just does not light',
+  enough_m: 'Gap that is enough',
+  long_exposure_m: 'Gap that is enough however long it burns',
 };
 
 const CASES: Readonly<Record<string, string>> = { asKept: 'as kept', design: 'design load' };
@@ -63,6 +92,9 @@ export function figureName(path: string, row?: string): string {
   const quantity = burnout?.[2] === undefined ? undefined : CASE_NAMES[burnout[2]];
   if (quantity !== undefined) return `${quantity}, ${CASES[burnout?.[1] ?? ''] ?? ''}`;
   if (path.startsWith('load.byMaterial.') || path.startsWith('load.byEntry.')) return `Heat in ${row ?? 'this row'}`;
+  const spread = /^spread\.(?:events|gaps)\.\d+\.(\w+)$/.exec(path)?.[1];
+  const ofRow = spread === undefined ? undefined : SPREAD_NAMES[spread];
+  if (ofRow !== undefined) return row === undefined ? ofRow : `${ofRow}: ${row}`;
   if (path.startsWith('limits.')) return `Held to a limit: ${row ?? 'value'}`;
   return row ?? path;
 }

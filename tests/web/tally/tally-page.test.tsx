@@ -8,13 +8,17 @@ import { dock, limitOn, press, renderBookPart } from './render-book-part.tsx';
 const headings = () => screen.getAllByRole('heading').map((heading) => heading.textContent);
 
 describe('the tally of a room', () => {
-  it('reads from top to bottom as an argument', () => {
+  it('reads from top to bottom as an argument', async () => {
     renderBookPart(<TallyPage />, dock());
+    await screen.findByRole('heading', { name: 'What sets what alight' });
     expect(headings()).toEqual([
       'Dock',
       'What it is made of',
       'How fast it could come out',
+      'When it would be noticed',
       'What the room does',
+      'What sets what alight',
+      'Smoke and air',
       'What is not here, and why',
       'Cautions',
     ]);

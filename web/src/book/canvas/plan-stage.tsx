@@ -1,8 +1,9 @@
 import { formatQuantity } from '@embertally/shared/units/format-quantity';
-import { useMemo, useSyncExternalStore } from 'react';
+import { lazy, Suspense, useMemo, useSyncExternalStore } from 'react';
 import type { Stage } from 'konva/lib/Stage';
 import type { PlanHost } from '../interaction/plan-host.ts';
 import { useBook } from '../session/use-book.ts';
+import { useSpreadPlay } from '../spread/use-spread-play.ts';
 import { paintCrosshair } from './paint-crosshair.ts';
 import { paintFurniture } from './paint-furniture.ts';
 import { paintGrid } from './paint-grid.ts';
@@ -16,13 +17,16 @@ import { useFontsReady } from './use-fonts-ready.ts';
 import { usePalette } from './use-palette.ts';
 import { useStage } from './use-stage.ts';
 
+const SpreadLayer = lazy(async () => ({ default: (await import('./spread-layer.tsx')).SpreadLayer }));
+
 const FOOT_M = 0.3048;
 
-/** The plan as a picture: four layers, drawn and never asked. */
+/** The plan as a picture: four layers, drawn and never asked, and a fifth while a fire is shown. */
 export function PlanStage({ host }: { readonly host: PlanHost }) {
   const view = useBook((state) => state.view);
   const palette = usePalette();
   const { stage, mount } = useStage(view);
+  const showsFire = useSpreadPlay((state) => state.fire !== null || state.gap !== null);
   const fontsReady = useFontsReady();
   // What was measured with another font is forgotten with its plates.
   const plates = useMemo(() => new RoomPlates(fontsReady), [fontsReady]);
@@ -34,6 +38,11 @@ export function PlanStage({ host }: { readonly host: PlanHost }) {
           <PlanLayer stage={stage} host={host} palette={palette} plates={plates} />
           <Active stage={stage} host={host} palette={palette} plates={plates} />
           <Overlay stage={stage} palette={palette} />
+          {showsFire ? (
+            <Suspense fallback={null}>
+              <SpreadLayer stage={stage} palette={palette} />
+            </Suspense>
+          ) : null}
         </>
       )}
     </div>

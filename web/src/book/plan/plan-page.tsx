@@ -4,6 +4,7 @@ import { FIT_ACTIONS, HISTORY_ACTIONS, TABLE_ACTIONS, TOOL_ACTIONS } from '../ac
 import type { PlanHost } from '../interaction/plan-host.ts';
 import { useBook } from '../session/use-book.ts';
 import { useBookSession } from '../session/use-book-session.ts';
+import { useSpreadPlay } from '../spread/use-spread-play.ts';
 import { EmptyPlan } from './empty-plan.tsx';
 import { LoadLegend } from './load-legend.tsx';
 import { PlanMessage } from './plan-message.tsx';
@@ -13,6 +14,7 @@ import { SelectionStrip } from './selection-strip.tsx';
 import { ToolOptions } from './tool-options.tsx';
 import { usePlanKeys } from './use-plan-keys.ts';
 
+const SpreadPlayer = lazy(async () => ({ default: (await import('../spread/spread-player.tsx')).SpreadPlayer }));
 const KeysDialog = lazy(async () => ({ default: (await import('./keys-dialog.tsx')).KeysDialog }));
 
 /** The left page: what can be done next, the plan, and what its shading means. */
@@ -22,6 +24,7 @@ export function PlanPage({ host }: { readonly host: PlanHost }) {
   const [keysOpen, setKeysOpen] = useState(false);
   const empty = useBook((state) => state.document.rooms.size === 0 && state.tool === 'select');
   const world = { session, host };
+  const showsFire = useSpreadPlay((state) => state.fire !== null || state.gap !== null);
   const focusPlan = () => {
     page.current?.querySelector<HTMLElement>('.plan-canvas')?.focus();
   };
@@ -47,6 +50,11 @@ export function PlanPage({ host }: { readonly host: PlanHost }) {
         {empty ? <EmptyPlan world={world} /> : null}
         <SelectionStrip host={host} />
         <PlanMessage />
+        {showsFire ? (
+          <Suspense fallback={null}>
+            <SpreadPlayer />
+          </Suspense>
+        ) : null}
       </PlanSurface>
       <div className="plan-foot">
         <LoadLegend />

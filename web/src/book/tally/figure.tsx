@@ -45,7 +45,7 @@ export function Figure({ path, estimate, row, unit = 'shown', className = '', un
       aria-label={`${name}: ${estimateText(estimate, show)}${warned ? ', with a note' : ''}. Show its working`}
       aria-haspopup="dialog"
       onClick={() => {
-        open({ path, name });
+        open(estimate.equation === undefined ? { path, name } : { path, name, estimate });
       }}
     >
       {body}

@@ -1,17 +1,9 @@
 import type { RoomTally } from '@embertally/shared/tally/room-tally';
-import { convert } from '@embertally/shared/units/convert';
-import { displayUnit } from '@embertally/shared/units/display-unit';
-import { formatNumber } from '@embertally/shared/units/format-number';
 import { formatQuantity } from '@embertally/shared/units/format-quantity';
 import type { UnitSystem } from '@embertally/shared/units/unit-system';
-import type { CurveChart, CurveMark, CurveThreshold } from '../../components/chart/curve-chart.ts';
+import type { CurveChart, CurveMark, CurveMoment, CurveThreshold } from '../../components/chart/curve-chart.ts';
 import { lowestFlashover } from './lowest-flashover.ts';
-
-/** Large fires are read in MW, small ones in kW; in US customary units in Btu/s. */
-function powerUnit(peak_kW: number, system: UnitSystem): { readonly key: string; readonly symbol: string } {
-  if (system === 'SI' && peak_kW >= 1000) return { key: 'MW', symbol: 'MW' };
-  return displayUnit('kW', system) ?? { key: 'kW', symbol: 'kW' };
-}
+import { powerUnit } from './power-unit.ts';
 
 /**
  * The heat release curve of the design fire with the levels it is read against.
@@ -22,9 +14,7 @@ export function releaseChart(tally: RoomTally, system: UnitSystem, fileName: str
   const { growth, room } = tally;
   if (growth.curve === undefined || growth.curve.length < 2) return null;
   const peak_kW = growth.peak?.value ?? Math.max(...growth.curve.map(([, kW]) => kW));
-  const unit = powerUnit(peak_kW, system);
-  const inUnit = (kW: number): number => convert(kW, 'kW', unit.key);
-  const text = (kW: number): string => `${formatNumber(inUnit(kW), 3)} ${unit.symbol}`;
+  const { symbol, of: inUnit, text } = powerUnit(peak_kW, system);
   const points = growth.curve.map(([s, kW]) => [s / 60, inUnit(kW)] as const);
 
   const thresholds: CurveThreshold[] = [];
@@ -54,6 +44,8 @@ export function releaseChart(tally: RoomTally, system: UnitSystem, fileName: str
     if (at !== null) marks.push({ x: at / 60, y: inUnit(flashover.value_kW), tone: 'madder' });
   }
 
+  const moments = answersOf(tally.response, (s) => spoken(formatQuantity(s, 's', system)));
+
   const end_s = growth.end?.value ?? growth.curve.at(-1)?.[0] ?? 0;
   const end = formatQuantity(end_s, 's', system);
   const peak = `It could reach ${text(peak_kW)}`;
@@ -74,12 +66,33 @@ export function releaseChart(tally: RoomTally, system: UnitSystem, fileName: str
     title: [`${peak}${reaches}.`, ...far].join(' '),
     summary: `Heat release over time: it grows to ${text(peak_kW)} and is out after ${spoken(end)}.`,
     x: { label: 'Time', unit: 'min', column: 'time' },
-    y: { label: 'Heat release', unit: unit.symbol, column: 'heat_release' },
+    y: { label: 'Heat release', unit: symbol, column: 'heat_release' },
     series: [{ id: 'release', label: 'Heat release', points, tone: 'ink', dash: [], filled: true }],
     thresholds,
+    moments,
     marks,
     fileName,
   };
+}
+
+/** When sprinkler and detectors answer to this fire, where they do. */
+function answersOf(response: RoomTally['response'], spokenTime: (s: number) => string): readonly CurveMoment[] {
+  const { sprinkler, detector, heatDetector, smokeDetector } = response;
+  const both = heatDetector !== undefined && smokeDetector !== undefined;
+  const answers = [
+    ['sprinkler', 'sprinkler', sprinkler],
+    ...(both
+      ? ([
+          ['smoke_detector', 'smoke detector', smokeDetector],
+          ['heat_detector', 'heat detector', heatDetector],
+        ] as const)
+      : ([['detector', 'detector', detector]] as const)),
+  ] as const;
+  return answers.flatMap(([id, name, answer]) =>
+    answer?.value == null
+      ? []
+      : [{ id, label: `${name} ${spokenTime(answer.value)}`, x: answer.value / 60, tone: 'verdigris', dash: [1, 3] }],
+  );
 }
 
 const spoken = (shown: { readonly text: string; readonly unit: string }): string => `${shown.text} ${shown.unit}`;

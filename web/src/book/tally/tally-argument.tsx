@@ -1,18 +1,27 @@
 import type { Limit } from '@embertally/shared/contracts/limits';
 import type { Entry, Room } from '@embertally/shared/survey/survey-document';
 import type { RoomTally } from '@embertally/shared/tally/room-tally';
-import { memo, type ReactNode, useDeferredValue } from 'react';
+import { lazy, memo, type ReactNode, Suspense, useDeferredValue, useMemo } from 'react';
 import type { TablePart } from '../panels/tables-context.ts';
 import { HowFast } from './how-fast.tsx';
 import { MadeOf } from './made-of.tsx';
 import { MissingList } from './missing-list.tsx';
+import { ResponsePart } from './response-part.tsx';
+import { SmokeAndAir } from './smoke-and-air.tsx';
 import { TallyCautions } from './tally-cautions.tsx';
 import { TallyHeadline } from './tally-headline.tsx';
 import { WhatTheRoomDoes } from './what-the-room-does.tsx';
 
+const SpreadPart = lazy(async () => ({ default: (await import('./spread/spread-part.tsx')).SpreadPart }));
+
 const HowFastKept = memo(HowFast);
 const WhatTheRoomDoesKept = memo(WhatTheRoomDoes);
+const ResponsePartKept = memo(ResponsePart);
+const SmokeAndAirKept = memo(SmokeAndAir);
 const MissingListKept = memo(MissingList);
+
+/** These name what they lack themselves. */
+const NAMED_BY_THEIR_SECTION: readonly string[] = ['response', 'spread', 'air'];
 
 interface TallyArgumentProps {
   readonly tally: RoomTally;
@@ -31,6 +40,10 @@ export function TallyArgument(props: TallyArgumentProps) {
   const { tally, room, entries, limits, contentsAction, onGive, onPickEntry } = props;
   // The density and the ledger move with the very change; curves and tables below them follow without holding it up.
   const later = useDeferredValue(tally);
+  const missing = useMemo(
+    () => later.missing.filter(({ section }) => !NAMED_BY_THEIR_SECTION.includes(section)),
+    [later.missing],
+  );
   return (
     <>
       <TallyHeadline tally={tally} limits={limits} />
@@ -41,8 +54,13 @@ export function TallyArgument(props: TallyArgumentProps) {
         {...(onPickEntry === undefined ? {} : { onPick: onPickEntry })}
       />
       <HowFastKept tally={later} />
+      <ResponsePartKept tally={later} onGive={onGive} />
       <WhatTheRoomDoesKept tally={later} rating_min={room.rating_min} />
-      <MissingListKept missing={later.missing} onGive={onGive} />
+      <Suspense fallback={null}>
+        <SpreadPart tally={later} room={room} entries={entries} onGive={onGive} />
+      </Suspense>
+      <SmokeAndAirKept tally={later} onGive={onGive} />
+      <MissingListKept missing={missing} onGive={onGive} />
       <TallyCautions ids={tally.cautions} />
     </>
   );

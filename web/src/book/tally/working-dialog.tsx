@@ -18,9 +18,10 @@ export function WorkingDialog({ roomId, asked, onClose }: WorkingDialogProps) {
   const document = useBook((state) => state.document);
   const limits = useBook((state) => state.limits);
   const estimate = useMemo(() => {
+    if (asked.estimate !== undefined) return asked.estimate;
     if (!document.rooms.has(roomId)) return null;
-    return estimateAt(estimateRoom(roomInput(document, roomId, limits), { workings: true }), asked.path);
-  }, [document, limits, roomId, asked.path]);
+    return estimateAt(estimateRoom(roomInput(document, roomId, limits), { workings: true, spread: false }), asked.path);
+  }, [document, limits, roomId, asked]);
   return (
     <Dialog open onClose={onClose} title={asked.name} width="wide">
       {estimate === null ? (

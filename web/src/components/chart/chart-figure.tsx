@@ -15,17 +15,23 @@ const figure = (value: number): string => value.toLocaleString('en-GB', { maximu
 /** Whether this browser can paint at all; where it cannot, the table stands in the picture's place. */
 const canPaint = (): boolean => typeof Path2D !== 'undefined';
 
+interface ChartFigureProps {
+  readonly chart: CurveChart;
+  /** Where the reading line stands while something is played beside the chart, in the unit of the x axis. */
+  readonly playedAt?: number | null;
+}
+
 /**
  * A chart with everything it owes its reader: the takeaway in words, a line to read values along by key or finger, the
  * same numbers as a table, the picture and the numbers as files.
  */
-export function ChartFigure({ chart }: { readonly chart: CurveChart }) {
+export function ChartFigure({ chart, playedAt = null }: ChartFigureProps) {
   const [asTable, setAsTable] = useState(() => !canPaint());
   const [step, setStep] = useState<number | null>(null);
   const picture = useRef<() => string | null>(() => null);
   const slider = useId();
   const last = Math.max(0, ...chart.series.map((series) => series.points.at(-1)?.[0] ?? 0));
-  const readAt = step === null ? null : (step / STEPS) * last;
+  const readAt = playedAt ?? (step === null ? null : (step / STEPS) * last);
 
   const savePicture = (): void => {
     const address = picture.current();
@@ -68,7 +74,7 @@ export function ChartFigure({ chart }: { readonly chart: CurveChart }) {
               className="curve-slider min-w-24 flex-1"
               min={0}
               max={STEPS}
-              value={step ?? 0}
+              value={readAt === null || last === 0 ? 0 : Math.round((readAt / last) * STEPS)}
               aria-valuetext={readingText(chart, readAt ?? 0)}
               onChange={(event) => {
                 setStep(Number(event.currentTarget.value));

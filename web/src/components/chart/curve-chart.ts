@@ -22,6 +22,15 @@ export interface CurveThreshold {
   readonly dash: readonly number[];
 }
 
+/** A moment something happens at, drawn from top to bottom. */
+export interface CurveMoment {
+  readonly id: string;
+  readonly label: string;
+  readonly x: number;
+  readonly tone: ChartTone;
+  readonly dash: readonly number[];
+}
+
 /** A point worth naming, such as where the curve meets a threshold. */
 export interface CurveMark {
   readonly x: number;
@@ -48,6 +57,7 @@ export interface CurveChart {
   readonly y: CurveAxis;
   readonly series: readonly CurveSeries[];
   readonly thresholds: readonly CurveThreshold[];
+  readonly moments?: readonly CurveMoment[];
   readonly marks: readonly CurveMark[];
   /** Without extension. */
   readonly fileName: string;

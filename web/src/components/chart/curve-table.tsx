@@ -7,6 +7,7 @@ const figure = (value: number | null): string =>
 /** The same numbers as the chart, as a table. */
 export function CurveTable({ chart }: { readonly chart: CurveChart }) {
   const rows = curveRows(chart);
+  const levels = [...chart.thresholds, ...(chart.moments ?? [])];
   return (
     <div className="max-h-72 overflow-auto" role="region" tabIndex={0} aria-label={`Table: ${chart.title}`}>
       <table className="w-full text-small">
@@ -37,12 +38,12 @@ export function CurveTable({ chart }: { readonly chart: CurveChart }) {
             </tr>
           ))}
         </tbody>
-        {chart.thresholds.length > 0 && (
+        {levels.length > 0 && (
           <tfoot>
-            {chart.thresholds.map((threshold) => (
-              <tr key={threshold.id}>
+            {levels.map((level) => (
+              <tr key={level.id}>
                 <td className="py-0.5 text-soft" colSpan={chart.series.length + 1}>
-                  {threshold.label}
+                  {level.label}
                 </td>
               </tr>
             ))}

@@ -31,7 +31,7 @@ function requestsOf(chart: Chart, data: CurveChart, context: CanvasRenderingCont
   const requests: LabelRequest[] = [];
   const texts = new Map<string, Text>();
   if (x === undefined || y === undefined) return { requests, texts };
-  const { left, right } = chart.chartArea;
+  const { left, right, top, bottom } = chart.chartArea;
   const height = SIZE_PX + 2 * PADDING_PX;
   const widthOf = (text: string): number => Math.ceil(context.measureText(text).width) + 2 * PADDING_PX;
   for (const threshold of data.thresholds) {
@@ -46,6 +46,19 @@ function requestsOf(chart: Chart, data: CurveChart, context: CanvasRenderingCont
       ]),
     });
     texts.set(threshold.id, { text: threshold.label, tone: threshold.tone });
+  }
+  for (const moment of data.moments ?? []) {
+    const width = widthOf(moment.label);
+    const at = x.getPixelForValue(moment.x);
+    const starts = [0, 0.2, 0.4, 0.6, 0.8].map((share) => top + 2 + share * (bottom - top - height));
+    requests.push({
+      id: moment.id,
+      places: starts.flatMap((start) => [
+        { x: at + 2, y: start, width, height },
+        { x: at - width - 2, y: start, width, height },
+      ]),
+    });
+    texts.set(moment.id, { text: moment.label, tone: moment.tone });
   }
   if (data.series.length < 2) return { requests, texts };
   for (const series of data.series) {
@@ -64,7 +77,7 @@ function requestsOf(chart: Chart, data: CurveChart, context: CanvasRenderingCont
   return { requests, texts };
 }
 
-/** Threshold lines, marks and direct labels, drawn over the curves where they cover least. */
+/** Threshold lines, moments, marks and direct labels, drawn over the curves where they cover least. */
 export function labelPlugin(current: () => Drawn): Plugin<'line'> {
   return {
     id: 'embertally-labels',
@@ -83,6 +96,16 @@ export function labelPlugin(current: () => Drawn): Plugin<'line'> {
         ctx.strokeStyle = colours.tones[threshold.tone];
         ctx.moveTo(chartArea.left, at);
         ctx.lineTo(chartArea.right, at);
+        ctx.stroke();
+      }
+      for (const moment of data.moments ?? []) {
+        const at = x.getPixelForValue(moment.x);
+        ctx.beginPath();
+        ctx.setLineDash([...moment.dash]);
+        ctx.lineWidth = 1.25;
+        ctx.strokeStyle = colours.tones[moment.tone];
+        ctx.moveTo(at, chartArea.top);
+        ctx.lineTo(at, chartArea.bottom);
         ctx.stroke();
       }
       ctx.setLineDash([]);
