@@ -1,4 +1,3 @@
-import { useByKey } from '../catalogue/uses.ts';
 import { estimate, type EstimateWarning } from '../methods/estimate.ts';
 import { figure } from '../methods/figure.ts';
 import { asKept } from '../methods/load/as-kept.ts';
@@ -10,6 +9,7 @@ import type { WorkingStep } from '../methods/working.ts';
 import { designLoadOf } from './design-factors.ts';
 import type { CountedPart, EntryHeat } from './entry-heats.ts';
 import { loadBand } from './load-band.ts';
+import { loadBasis } from './load-basis.ts';
 import { localPeakOf } from './local-peak-of.ts';
 import { placeAmongUse } from './place-among-use.ts';
 import type { RoomAreas } from './room-areas.ts';
@@ -28,8 +28,6 @@ const NEEDS_FLOOR = [
   'localPeak',
   'placeAmongUse',
 ];
-/** Coefficient of variation behind EN 1991-1-2 Table E.4, for uses without a survey of their own. */
-const USUAL_VARIATION = 0.3;
 
 /** The section `load` of a tally. */
 export function loadSection(
@@ -73,7 +71,7 @@ export function loadSection(
       { workings, warnings: characteristic.warnings, steps: characteristic.steps },
     ),
     design: designLoadOf(input, areas, m.value ?? 1, characteristic, context),
-    ...loadBand(heats, { Q, A_f, q: floorLoad.value ?? 0 }, input.options?.samples ?? 0, context),
+    ...loadBand(heats, { Q, A_f, q: floorLoad.value ?? 0 }, context),
     ...optional('localPeak', localPeakOf(heats, context)),
     ...optional('placeAmongUse', placeAmongUse(input.room.use ?? null, (Q - (fixed.value ?? 0)) / A_f, context)),
   };
@@ -104,9 +102,7 @@ function factorOfRoom(input: RoomInput, parts: readonly CountedPart[], context: 
 
 /** q_f,k by what a person says the surveyed amount stands for. */
 function characteristicOf(input: RoomInput, fixed: number, variable: number, context: TallyContext) {
-  const basis = input.options?.load_basis ?? 'as_surveyed';
-  const use = input.room.use == null ? undefined : useByKey(input.room.use);
-  const V = use?.distribution?.cov ?? USUAL_VARIATION;
+  const { basis, V } = loadBasis(input);
   const inputs = { fixed, variable, V, basis };
   const value = characteristicLoad.run(inputs);
   const warnings: EstimateWarning[] =

@@ -367,9 +367,6 @@ describe('what nobody said', () => {
 });
 
 describe('how sure the load is', () => {
-  it('says so when samples were asked for and the band is first order', () => {
-    expect(codes(estimateRoom(dock({ options: { samples: 1000 } })).load.band?.p95)).toEqual(['FIRST_ORDER_ONLY']);
-  });
   it('a weighed load is surer than a guessed one, and the band holds its middle', () => {
     const [weighed, guessed] = (['weighed', 'hearsay'] as const).map(
       (evidence) => estimateRoom(dock({ entries: [{ evidence }] })).load,
