@@ -1,7 +1,8 @@
 import type { Estimate } from '../methods/estimate.ts';
 import type { WorkingInput } from '../methods/working.ts';
 import { modelEstimate } from '../spread/model-estimate.ts';
-import { spreadGaps, type Gap } from '../spread/spread-gaps.ts';
+import type { Gap } from '../spread/gap-line.ts';
+import { spreadGaps } from '../spread/spread-gaps.ts';
 import { spreadInput } from '../spread/spread-input.ts';
 import { GAP_METHOD } from '../spread/spread-method.ts';
 import { roomBasis } from '../tally/room-basis.ts';

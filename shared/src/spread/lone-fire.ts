@@ -50,7 +50,8 @@ export function loneFire(scene: SpreadScene, index: number): LoneFire {
   return { pieces, peak: Math.min(curve.peak, cap), highestLayer, radiativeFraction };
 }
 
-const HALVINGS = 40;
+/** Enough for a tenth of a millimetre at 10 m. */
+const HALVINGS = 24;
 /** Views are compared on a scale of distances from 1 cm to 1 km. */
 const [WIDEST, NARROWEST] = [1 / (4 * Math.PI * 0.01 ** 2), 1 / (4 * Math.PI * 1000 ** 2)];
 

@@ -4,8 +4,10 @@ import type { SpreadScene } from './spread-scene.ts';
 
 /** With more entries than this only the most promising ones are tried. */
 const TRY_ALL_UP_TO = 40;
-const BY_RADIATION = 20;
-const BY_RATE = 20;
+const BY_EACH = 20;
+/** Above this many entries fewer are tried, so that looking for the worst takes no longer. */
+const FEWER_ABOVE = 500;
+const TIME_GROWS_WITH = 1.6;
 /** Runs that differ by no more than rounding are equal. */
 const SAME = 1e-9;
 
@@ -19,7 +21,7 @@ export interface WorstFirst {
 /**
  * The first entry with the worst fire: earliest flashover, then highest peak, then earliest half of the room's heat, then
  * id. Up to 40 entries all are tried; of more, the 20 that radiate most onto the others and the 20 that alone reach
- * flashover soonest. Undefined when nothing can burn.
+ * flashover soonest, and fewer above 500. Undefined when nothing can burn.
  */
 export function worstFirst(scene: SpreadScene, rules: RunRules): WorstFirst | undefined {
   const burnable = scene.entries.map((_, index) => index).filter((index) => scene.canBurn(index));
@@ -46,7 +48,8 @@ function candidatesOf(scene: SpreadScene, burnable: readonly number[]): readonly
   const peak = (index: number) => scene.curve(index).peak;
   const byRadiation = [...burnable].sort((a, b) => radiated.get(b)! - radiated.get(a)! || a - b);
   const byRate = [...burnable].sort((a, b) => byTime(alone.get(a)!, alone.get(b)!) || peak(b) - peak(a) || a - b);
-  const chosen = new Set([...byRadiation.slice(0, BY_RADIATION), ...byRate.slice(0, BY_RATE)]);
+  const each = Math.ceil(BY_EACH * Math.min(1, (FEWER_ABOVE / burnable.length) ** TIME_GROWS_WITH));
+  const chosen = new Set([...byRadiation.slice(0, each), ...byRate.slice(0, each)]);
   return burnable.filter((index) => chosen.has(index));
 }
 

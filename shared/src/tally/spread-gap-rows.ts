@@ -2,7 +2,9 @@ import type { Estimate } from '../methods/estimate.ts';
 import type { WorkingInput } from '../methods/working.ts';
 import { modelEstimate } from '../spread/model-estimate.ts';
 import type { SpreadInput } from '../spread/simulate-spread.ts';
-import { shortGaps, type Gap, type SpreadGap } from '../spread/spread-gaps.ts';
+import type { Gap } from '../spread/gap-line.ts';
+import { shortGaps } from '../spread/short-gaps.ts';
+import type { SpreadGap } from '../spread/spread-gaps.ts';
 import { GAP_METHOD } from '../spread/spread-method.ts';
 import type { SpreadTally, SpreadTallyGap } from './room-tally.ts';
 import type { TallyContext } from './tally-context.ts';
@@ -14,19 +16,9 @@ type Rows = Required<Pick<SpreadTally, 'gaps' | 'pairs' | 'pairsShort'>>;
 
 /** The gaps that are smaller than enough, largest shortfall first; those that no distance would help come last. */
 export function spreadGapRows(input: SpreadInput, context: TallyContext): Rows {
-  const { pairs, gaps } = shortGaps(input);
-  const short = [...gaps].sort((a, b) => shortfall(b) - shortfall(a));
+  const { pairs, short, gaps } = shortGaps(input, MOST_ROWS);
   const describe = context.workings ? inputsFor(input) : undefined;
-  return {
-    gaps: short.slice(0, MOST_ROWS).map((gap) => rowOf(gap, describe)),
-    pairs,
-    pairsShort: short.length,
-  };
-}
-
-/** m; a pair that no distance helps has none. */
-function shortfall({ gap_m, enough }: SpreadGap): number {
-  return enough.metres === null ? -1 : enough.metres - gap_m;
+  return { gaps: gaps.map((gap) => rowOf(gap, describe)), pairs, pairsShort: short };
 }
 
 type Describe = (gap: SpreadGap, k_f: number) => WorkingInput[];

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { FLASHOVER_ALONE, LAYER_ALONE, spreadGaps } from '@embertally/shared/spread/spread-gaps';
+import { LAYER_ALONE } from '@embertally/shared/spread/gap-line';
+import { FLASHOVER_ALONE, spreadGaps } from '@embertally/shared/spread/spread-gaps';
 import { ignitionOf } from '@embertally/shared/spread/ignition-class';
 import { HALL, spreadEntry } from '../../support/spread-samples.ts';
 
