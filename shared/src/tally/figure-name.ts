@@ -72,6 +72,20 @@ const SPREAD_NAMES: Readonly<Record<string, string>> = {
   long_exposure_m: 'Gap that is enough however long it burns',
 };
 
+const SAMPLED: Readonly<Record<string, string>> = {
+  total: 'Heat kept in this room',
+  perFloor: 'Fire load density',
+  peak: 'Peak heat release',
+  equivalentTime: 'Equivalent time of exposure, as kept',
+};
+const PLACES: Readonly<Record<string, string>> = {
+  p5: '5 % point',
+  p50: 'middle',
+  p80: '80 % point',
+  p95: '95 % point',
+  mean: 'mean of the samples',
+};
+
 const CASES: Readonly<Record<string, string>> = { asKept: 'as kept', design: 'design load' };
 const CASE_NAMES: Readonly<Record<string, string>> = {
   loadPerEnclosure: 'Load per enclosing surface',
@@ -95,6 +109,11 @@ export function figureName(path: string, row?: string): string {
   const spread = /^spread\.(?:events|gaps)\.\d+\.(\w+)$/.exec(path)?.[1];
   const ofRow = spread === undefined ? undefined : SPREAD_NAMES[spread];
   if (ofRow !== undefined) return row === undefined ? ofRow : `${ofRow}: ${row}`;
+  const band = /^uncertainty\.bands\.(\w+)\.(\w+)$/.exec(path);
+  if (band !== null) return `${SAMPLED[band[1] ?? ''] ?? ''}, ${PLACES[band[2] ?? ''] ?? ''}`;
+  if (path.startsWith('uncertainty.shares.')) return `Share of the variance: ${row ?? 'this input'}`;
+  const advised = /^uncertainty\.advice\.\d+\.(\w+)$/.exec(path)?.[1];
+  if (advised !== undefined) return `Fire load density if advice is followed, ${PLACES[advised] ?? ''}`;
   if (path.startsWith('limits.')) return `Held to a limit: ${row ?? 'value'}`;
   return row ?? path;
 }

@@ -1,4 +1,5 @@
 import { estimateRoom } from '@embertally/shared/tally/estimate-room';
+import { estimateSpread } from '@embertally/shared/tally/estimate-spread';
 import type { CalculationMessage, CalculationTask, CalculationValue } from './calculation-message.ts';
 
 /**
@@ -12,13 +13,12 @@ const say = (message: CalculationMessage): void => {
 function calculate({ kind, input }: CalculationTask): CalculationValue[CalculationTask['kind']] {
   switch (kind) {
     case 'uncertainty': {
-      const tally = estimateRoom(input, { workings: true, spread: false });
+      const onSampled = (fraction: number) => say({ kind: 'progress', fraction });
+      const tally = estimateRoom(input, { workings: true, spread: false, onSampled });
       return { uncertainty: tally.uncertainty, band: tally.load.band, missing: tally.missing };
     }
-    case 'spread': {
-      const { spread, missing } = estimateRoom(input, { workings: true });
-      return { spread, missing };
-    }
+    case 'spread':
+      return estimateSpread(input, { workings: true });
   }
 }
 
