@@ -13,7 +13,7 @@ export type LimitQuantity = z.infer<typeof limitQuantitySchema>;
 
 const limitFields = {
   quantity: limitQuantitySchema,
-  bound: z.number().check(z.positive(), z.maximum(1e9)),
+  bound: z.number().check(z.minimum(1e-6), z.maximum(1e9)),
   /** A house rule may be set by a manager; a permit or policy clause only by an inspector or reviewer. */
   source: z.enum(['permit', 'policy', 'house-rule']),
   /** Who set it and where it stands: "permit 12/7, clause 4". */

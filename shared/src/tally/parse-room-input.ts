@@ -3,9 +3,11 @@ import { ringInRegion } from '../geometry/ring-in-region.ts';
 import { liningByKey } from '../catalogue/linings.ts';
 import { materialByKey } from '../catalogue/materials.ts';
 import { useByKey } from '../catalogue/uses.ts';
+import { OutOfRangeError } from '../methods/estimate.ts';
+import { partHeat } from './part-heat.ts';
 import { pointsOf } from './points-of.ts';
 import { ringFault } from './ring-fault.ts';
-import { roomInputSchema, type RoomInput, type RoomInputEntry } from './room-input.ts';
+import { roomInputSchema, type RoomInput, type RoomInputEntry, type RoomInputPart } from './room-input.ts';
 
 export interface RoomInputFault {
   /** JSON pointer to the field. */
@@ -19,6 +21,7 @@ export type ParsedRoomInput =
   { readonly ok: true; readonly value: RoomInput } | { readonly ok: false; readonly errors: RoomInputFault[] };
 
 const LARGEST_ENTRY_KG = 1_000_000;
+const LEAST_STEP_S = 0.001;
 const UUID = /^[0-9a-f]{8}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{12}$/i;
 
 /**
@@ -197,18 +200,35 @@ function entryFaults(entry: RoomInputEntry, pointer: string): RoomInputFault[] {
         code: 'missing',
         message: 'A gross heat needs the mass fraction of hydrogen to become a net heat.',
       });
+    } else if (part.basis === 'gross' && !(netHeatOf(entry, part) > 0)) {
+      faults.push({
+        pointer: `${at}/net_heat_MJ_kg`,
+        code: 'no_net_heat',
+        message:
+          'The water takes more heat than the gross heat holds, so no net heat is left. Check the heat, its basis, hydrogen and moisture.',
+      });
     }
   });
   const curve = entry.curve ?? [];
-  const backwards = curve.findIndex(([t], i) => i > 0 && t <= curve[i - 1]![0]);
+  const backwards = curve.findIndex(([t], i) => i > 0 && !(t - curve[i - 1]![0] >= LEAST_STEP_S));
   if (backwards > 0) {
     faults.push({
       pointer: `${pointer}/curve/${backwards}`,
       code: 'not_rising',
-      message: 'Each time of the curve must be later than the one before it.',
+      message: 'Each time of the curve must be at least 0.001 s later than the one before it.',
     });
   }
   return faults;
+}
+
+/** Net, as received, MJ/kg; −1 where hydrogen and gross heat contradict each other. */
+function netHeatOf(entry: RoomInputEntry, part: RoomInputPart): number {
+  try {
+    return partHeat(entry, part).heat;
+  } catch (error) {
+    if (error instanceof OutOfRangeError) return -1;
+    throw error;
+  }
 }
 
 function unknownKey(what: string, key: string): string {

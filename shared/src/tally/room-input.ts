@@ -14,15 +14,16 @@ function maybe<T extends z.core.SomeType>(schema: T) {
 const text = (max: number) => z.string().check(z.maxLength(max));
 const amount = (max: number) => z.number().check(z.minimum(0), z.maximum(max));
 const positive = (max: number) => z.number().check(z.positive(), z.maximum(max));
+const between = (min: number, max: number) => z.number().check(z.minimum(min), z.maximum(max));
 const coordinate = z.number().check(z.minimum(-10_000), z.maximum(10_000));
 const point = z.tuple([coordinate, coordinate]);
 const ring = z.array(point).check(z.minLength(3), z.maxLength(1000));
 
 const layer = z.strictObject({
-  thickness_m: positive(10),
-  conductivity_W_mK: positive(1000),
-  density_kg_m3: positive(25_000),
-  specific_heat_J_kgK: positive(20_000),
+  thickness_m: between(1e-5, 10),
+  conductivity_W_mK: between(1e-4, 1000),
+  density_kg_m3: between(1, 25_000),
+  specific_heat_J_kgK: between(10, 20_000),
   label: maybe(text(120)),
 });
 const surface = z.union([
@@ -34,8 +35,8 @@ const opening = z.strictObject({
   id: maybe(text(100)),
   label: maybe(text(200)),
   kind: maybe(z.enum(['door', 'window', 'vent', 'shutter', 'gap'])),
-  width_m: positive(1000),
-  height_m: positive(100),
+  width_m: between(0.001, 1000),
+  height_m: between(0.001, 100),
   sill_m: maybe(amount(100)),
   state: maybe(z.enum(['open', 'fails', 'closed'])),
   leads_to: maybe(z.enum(['outside', 'inside'])),
@@ -126,7 +127,7 @@ const entry = z.strictObject({
 
 const limit = z.strictObject({
   quantity: limitQuantitySchema,
-  bound: positive(1e9),
+  bound: between(1e-6, 1e9),
   set_by: maybe(text(200)),
 });
 
@@ -140,7 +141,7 @@ const options = z.strictObject({
   protected_loads: maybe(z.enum(['0.85', 'EN'])),
   protected_loads_note: maybe(text(500)),
   area_factor: maybe(z.enum(['linear', 'step-up'])),
-  exposure_s: maybe(positive(86_400)),
+  exposure_s: maybe(between(1, 86_400)),
   kb: maybe(z.union([z.enum(['EN', 'UK']), positive(1)])),
   kc: maybe(z.union([z.enum(['unprotected_steel', 'timber', 'composite']), positive(20)])),
   ambient_C: maybe(z.number().check(z.minimum(-50), z.maximum(60))),

@@ -13,6 +13,18 @@ function faults(candidate: unknown): [string, string][] {
 }
 const room = (changes: Json) => ({ ...SCENERY_DOCK, room: { ...SCENERY_DOCK.room, ...changes } });
 const entry = (changes: Json) => ({ ...SCENERY_DOCK, contents: [{ ...flats, ...changes }] });
+const lining = (changes: Json) =>
+  room({
+    lining: {
+      walls: {
+        layers: [
+          { thickness_m: 0.1, conductivity_W_mK: 0.5, density_kg_m3: 900, specific_heat_J_kgK: 900, ...changes },
+        ],
+      },
+      ceiling: { key: 'concrete' },
+      floor: { key: 'concrete' },
+    },
+  });
 const part = (changes: Json) => entry({ parts: [{ net_heat_MJ_kg: 17, mass_kg: 1, ...changes }] });
 
 describe('the input of an estimate', () => {
@@ -67,6 +79,73 @@ describe('the input of an estimate', () => {
       part({ basis: 'gross' }),
       '/contents/0/parts/0/hydrogen_mass_fraction',
       'missing',
+    ],
+    [
+      'a gross heat with more hydrogen than it can burn',
+      part({ net_heat_MJ_kg: 4, basis: 'gross', hydrogen_mass_fraction: 0.25 }),
+      '/contents/0/parts/0/net_heat_MJ_kg',
+      'no_net_heat',
+    ],
+    [
+      'a gross heat that its water uses up',
+      part({ net_heat_MJ_kg: 3, basis: 'gross', water: 'dry', moisture_pct: 70, hydrogen_mass_fraction: 0.06 }),
+      '/contents/0/parts/0/net_heat_MJ_kg',
+      'no_net_heat',
+    ],
+    ['a lining without thickness', lining({ thickness_m: 0 }), '/room/lining/walls/layers/0/thickness_m', 'too_small'],
+    [
+      'a lining thinner than paint',
+      lining({ thickness_m: 1e-6 }),
+      '/room/lining/walls/layers/0/thickness_m',
+      'too_small',
+    ],
+    [
+      'a lining that conducts nothing',
+      lining({ conductivity_W_mK: 0 }),
+      '/room/lining/walls/layers/0/conductivity_W_mK',
+      'too_small',
+    ],
+    ['an exposure of nothing', { ...SCENERY_DOCK, options: { exposure_s: 0 } }, '/options/exposure_s', 'too_small'],
+    [
+      'an opening of no width',
+      room({ openings: [{ width_m: 0, height_m: 1 }] }),
+      '/room/openings/0/width_m',
+      'too_small',
+    ],
+    [
+      'a detector that never warms up',
+      room({ protection: { sprinklers: { rti: Infinity, activation_C: 68 } } }),
+      '/room/protection/sprinklers/rti',
+      'not_finite',
+    ],
+    [
+      'a detector infinitely far away',
+      room({ protection: { sprinklers: { rti: 50, activation_C: 68, distance_m: Infinity } } }),
+      '/room/protection/sprinklers/distance_m',
+      'not_finite',
+    ],
+    [
+      'a curve with two points at one time',
+      entry({
+        curve: [
+          [0, 0],
+          [10, 5],
+          [10, 2],
+        ],
+      }),
+      '/contents/0/curve/2',
+      'not_rising',
+    ],
+    [
+      'a curve below zero',
+      entry({
+        curve: [
+          [0, 0],
+          [10, -5],
+        ],
+      }),
+      '/contents/0/curve/1/1',
+      'too_small',
     ],
     [
       '1,001 t in one entry',

@@ -10,7 +10,7 @@ export const meanHeatTransfer = defineMethod({
   symbol: 'h_k',
   unit: 'kW/m2K',
   inputs: {
-    h: { symbol: 'h_k,i', unit: 'kW/m2K', quantity: 'Heat transfer into a surface', valid: [0, 100], list: true },
+    h: { symbol: 'h_k,i', unit: 'kW/m2K', quantity: 'Heat transfer into a surface', valid: [0, 1e6], list: true },
     A: { symbol: 'A_i', unit: 'm2', quantity: 'Area of the surface', valid: [0, Infinity], list: true },
   },
   equation: 'h_k = Σ h_k,i A_i / Σ A_i',

@@ -35,8 +35,8 @@ export const oxygenEnd = defineMethod({
         const slope = (Q[i]! - Q[i - 1]!) / span;
         // Heat of the part of the piece: Q0 x + slope x²/2; the form below does not cancel for small slopes.
         const root = Math.sqrt(Math.max(0, Q[i - 1]! ** 2 + 2 * slope * left));
-        const passed = left > 0 ? (2 * left) / (Q[i - 1]! + root) : 0;
-        return { time: t[i - 1]! + passed, rate: Q[i - 1]! + slope * passed };
+        const passed = left > 0 ? Math.min(span, (2 * left) / (Q[i - 1]! + root)) : 0;
+        return { time: t[i - 1]! + passed, rate: Q[i - 1]! + ((Q[i]! - Q[i - 1]!) * passed) / span };
       }
       left -= heat;
     }

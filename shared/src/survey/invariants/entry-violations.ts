@@ -7,6 +7,9 @@ import type { Violation } from './violation.ts';
 /** The most one entry may weigh, kg: 1,000 t. More is a slip of the unit or of the pen. */
 export const HEAVIEST_ENTRY_KG = 1_000_000;
 
+/** Times of a measured curve are at least this far apart, s; what lies closer is one reading written twice. */
+const LEAST_STEP_S = 0.001;
+
 /** Entries without a room, with their middle outside their room, or heavier than anything one entry can be. */
 export function entryViolations(document: SurveyDocument, entries: Iterable<Entry>): Violation[] {
   const found: Violation[] = [];
@@ -40,7 +43,7 @@ function valueViolation(entry: Entry): { code: string; message: string; field: s
   if (entry.curve === null) return null;
   const rises = entry.curve.every(([time_s, power_kW], index) => {
     const before = entry.curve?.[index - 1];
-    return time_s >= 0 && power_kW >= 0 && (before === undefined || time_s > before[0]);
+    return time_s >= 0 && power_kW >= 0 && (before === undefined || time_s - before[0] >= LEAST_STEP_S);
   });
   if (rises) return null;
   const message = `The curve of ${entryWords(entry)} must run forward in time and must not go below 0 kW.`;

@@ -13,10 +13,10 @@ const coordinate = z.number().check(z.minimum(-10_000), z.maximum(10_000));
 const nullable = z.nullable;
 
 export const liningLayer = z.strictObject({
-  thickness_m: z.number().check(z.positive(), z.maximum(10)),
-  conductivity_W_mK: z.number().check(z.positive(), z.maximum(1000)),
-  density_kg_m3: z.number().check(z.positive(), z.maximum(25_000)),
-  specific_heat_J_kgK: z.number().check(z.positive(), z.maximum(20_000)),
+  thickness_m: z.number().check(z.minimum(1e-5), z.maximum(10)),
+  conductivity_W_mK: z.number().check(z.minimum(1e-4), z.maximum(1000)),
+  density_kg_m3: z.number().check(z.minimum(1), z.maximum(25_000)),
+  specific_heat_J_kgK: z.number().check(z.minimum(10), z.maximum(20_000)),
   label: z.optional(text(120)),
 });
 /** A surface is a key of `shared/src/catalogue/linings` or its own layers, exposed side first. */

@@ -23,7 +23,7 @@ export const assumptions = z.strictObject({
   protected_loads: nullable(z.enum(['0.85', 'EN'])),
   /** Why the rule for protected loads was chosen. */
   protected_loads_note: text(500),
-  exposure_s: nullable(positive(86_400)),
+  exposure_s: nullable(z.number().check(z.minimum(1), z.maximum(86_400))),
   time_limit_min: nullable(positive(480)),
   kb: nullable(z.union([z.enum(['EN', 'UK']), positive(1)])),
   kc: nullable(z.union([z.enum(['unprotected_steel', 'timber', 'composite']), positive(20)])),
