@@ -1,0 +1,37 @@
+import { figure } from '../methods/figure.ts';
+import type { CalorimeterChoices } from './calorimeter-choices.ts';
+import type { CalorimeterNote } from './calorimeter-reading.ts';
+import type { Curve } from './curve.ts';
+import { curveTotals } from './curve-totals.ts';
+
+/** Down to this share of the peak, readings below 0 are what an analyser does around 0. */
+const NOISE = 0.05;
+
+interface BelowZero {
+  readonly curve: Curve;
+  readonly undecided: boolean;
+}
+
+/** Readings below 0: said, explained, and set to 0 only where the person decided so. */
+export function belowZero(curve: Curve, { negatives }: CalorimeterChoices, notes: CalorimeterNote[]): BelowZero {
+  const below = curve.rate.filter((q) => q < 0);
+  if (below.length === 0) return { curve, undecided: false };
+  const { heat_MJ, peak } = curveTotals(curve);
+  const raised = { time_s: curve.time_s, rate: curve.rate.map((q) => Math.max(0, q)) };
+  const added = curveTotals(raised).heat_MJ - heat_MJ;
+  const lowest = below.reduce((least, q) => Math.min(least, q), 0);
+  const noise = -lowest <= NOISE * peak;
+  const what = `${below.length} ${below.length === 1 ? 'reading is' : 'readings are'} below 0, the lowest ${figure(lowest)}`;
+  const why = noise
+    ? `, ${figure((-100 * lowest) / peak)} % of the peak: the analyser’s noise around 0.`
+    : ': more than noise. Check column, sign and baseline.';
+  const result = `to 0 adds ${figure(added)} MJ (${figure((100 * added) / heat_MJ)} %).`;
+  notes.push({
+    code: noise ? 'NOISE_BELOW_ZERO' : 'BELOW_ZERO',
+    text:
+      negatives === 'zero'
+        ? `${what}${why} Setting them ${result}`
+        : `${what}${why} To keep the curve, set them to 0; that ${result.replace('to 0 ', '')}`,
+  });
+  return negatives === 'zero' ? { curve: raised, undecided: false } : { curve, undecided: true };
+}
