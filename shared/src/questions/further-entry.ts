@@ -1,5 +1,6 @@
-import type { Kind, Material } from '../catalogue/catalogue-row.ts';
+import type { Kind } from '../catalogue/catalogue-row.ts';
 import { materialByKey } from '../catalogue/materials.ts';
+import type { PlaceableMaterial } from '../catalogue/placeable-material.ts';
 import type { RoomInputEntry, RoomInputPart } from '../tally/room-input.ts';
 
 const ID = 'further';
@@ -23,11 +24,11 @@ export function furtherOfKind(kind: Kind): RoomInputEntry {
 }
 
 /** One kilogram of a material. */
-export function furtherOfMaterial(material: Material): RoomInputEntry {
+export function furtherOfMaterial(material: PlaceableMaterial): RoomInputEntry {
   return { id: ID, label: material.label, count: 1, parts: [partOf(material, material.key, 1)] };
 }
 
-function partOf(material: Material | undefined, key: string, mass_kg: number): RoomInputPart {
+function partOf(material: PlaceableMaterial | undefined, key: string, mass_kg: number): RoomInputPart {
   if (!material) return { material: key, mass_kg };
   const { net_heat_MJ_kg, low_MJ_kg, high_MJ_kg, label } = material;
   return { material: key, label, mass_kg, net_heat_MJ_kg, low_MJ_kg, high_MJ_kg };

@@ -19,6 +19,7 @@ describe('the tally of a room', () => {
       'What the room does',
       'What sets what alight',
       'Smoke and air',
+      'Ask',
       'What is not here, and why',
       'Cautions',
     ]);

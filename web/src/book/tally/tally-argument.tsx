@@ -6,6 +6,7 @@ import type { TablePart } from '../panels/tables-context.ts';
 import { HowFast } from './how-fast.tsx';
 import { MadeOf } from './made-of.tsx';
 import { MissingList } from './missing-list.tsx';
+import { AskSection } from './questions/ask-section.tsx';
 import { ResponsePart } from './response-part.tsx';
 import { SmokeAndAir } from './smoke-and-air.tsx';
 import { TallyCautions } from './tally-cautions.tsx';
@@ -60,6 +61,7 @@ export function TallyArgument(props: TallyArgumentProps) {
         <SpreadPart tally={later} room={room} entries={entries} onGive={onGive} />
       </Suspense>
       <SmokeAndAirKept tally={later} onGive={onGive} />
+      <AskSection roomId={room.id} />
       <MissingListKept missing={missing} onGive={onGive} />
       <TallyCautions ids={tally.cautions} />
     </>
