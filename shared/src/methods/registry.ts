@@ -138,6 +138,9 @@ import { liningHeat } from './storage/lining-heat.ts';
 import { lithiumBattery } from './storage/lithium-battery.ts';
 import { palletStack } from './storage/pallet-stack.ts';
 import { storageHeight } from './storage/storage-height.ts';
+import { designLoadSpanish } from './load/design-load-spanish.ts';
+import { woodEquivalent } from './load/wood-equivalent.ts';
+import { dustLayer, dustThresholds } from './storage/dust.ts';
 import { designLoadItalian } from './load/design-load-italian.ts';
 import { gradingClass } from './load/grading-class.ts';
 import { olderUnits } from './load/older-units.ts';
@@ -306,6 +309,10 @@ export const METHODS: readonly AnyMethod[] = [
   palletStack,
   storageHeight,
   designLoadItalian,
+  designLoadSpanish,
+  woodEquivalent,
+  dustLayer,
+  dustThresholds,
   gradingClass,
   olderUnits,
   pertFractile,

@@ -21,6 +21,7 @@ import { WATER_ROWS } from '../../reference/rows/water-rows.ts';
 import { STORAGE_ROWS } from '../../reference/rows/storage-rows.ts';
 import { SCHEME_ROWS } from '../../reference/rows/scheme-rows.ts';
 import { DISTRIBUTION_ROWS } from '../../reference/rows/distribution-rows.ts';
+import { FURTHER_ROWS } from '../../reference/rows/further-rows.ts';
 import { HOW_MANY_ROWS, WHAT_CHANGES_ROWS } from '../../reference/rows/question-rows.ts';
 import { GAP_ROWS, SPREAD_ROWS } from '../../reference/rows/spread-rows.ts';
 import { UNCERTAINTY_ROWS } from '../../reference/rows/uncertainty-rows.ts';
@@ -47,6 +48,7 @@ const rows = [
   ...UNCERTAINTY_ROWS,
   ...SPREAD_ROWS,
   ...GAP_ROWS,
+  ...FURTHER_ROWS,
   ...HOW_MANY_ROWS,
   ...WHAT_CHANGES_ROWS,
 ];
