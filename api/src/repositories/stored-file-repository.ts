@@ -35,9 +35,12 @@ export class StoredFileRepository extends SqlRepository {
     ]);
   }
 
-  /** In whatever state. */
-  findAny(id: string): Promise<StoredFileRow | null> {
-    return this.row<StoredFileRow>(`${SELECT} WHERE f.id = $1`, [id]);
+  /** The files of a version of an own material, in the order they were named. */
+  ofVersion(versionId: string): Promise<readonly StoredFileRow[]> {
+    return this.rows<StoredFileRow>(
+      `${SELECT} JOIN own_material_evidence e ON e.file_id = f.id WHERE e.version_id = $1 ORDER BY e.position`,
+      [versionId],
+    );
   }
 
   /** Holds the organisation's account of bytes for the rest of the transaction. @returns bytes it keeps at present */

@@ -11,6 +11,7 @@ import { exportRoutes } from './export-routes.ts';
 import { fileRoutes } from './file-routes.ts';
 import { healthRoutes } from './health-routes.ts';
 import { limitRoutes } from './limit-routes.ts';
+import { ownMaterialRoutes } from './own-material-routes.ts';
 import { organisationRoutes } from './organisation-routes.ts';
 import { sessionRoutes } from './session-routes.ts';
 import { siteRoutes } from './site-routes.ts';
@@ -34,8 +35,9 @@ export function allRoutes({ services, sessions, events }: RouteParts): Route[] {
     ...surveyRoutes({ ...services, events }),
     ...exportRoutes(services.exports),
     ...fileRoutes(services.files),
-    ...estimateRoutes(),
-    ...catalogueRoutes(),
+    ...estimateRoutes(services.estimates),
+    ...catalogueRoutes(services.materials),
+    ...ownMaterialRoutes(services.ownMaterials, services.versionStates),
     ...cautionRoutes(),
   ];
   return [...routes, ...descriptionRoutes(routes.map((route) => route.contract))];

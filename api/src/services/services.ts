@@ -10,16 +10,21 @@ import { AccessService } from './access-service.ts';
 import { AccountService } from './account-service.ts';
 import { BuildingService } from './building-service.ts';
 import { ChangeSetService } from './change-set-service.ts';
+import type { EstimateMaker } from './estimate-maker.ts';
+import { EstimateService } from './estimate-service.ts';
 import { ExportService } from './export-service.ts';
 import { FileService } from './file-service.ts';
 import { HealthService } from './health-service.ts';
 import { HistoryService } from './history-service.ts';
 import { LimitService } from './limit-service.ts';
+import { MaterialService } from './material-service.ts';
+import { OwnMaterialService } from './own-material-service.ts';
 import type { ReportMaker } from './report-maker.ts';
 import { SiteRoleService } from './site-role-service.ts';
 import { SiteService } from './site-service.ts';
 import { SummaryService } from './summary-service.ts';
 import { SurveyService } from './survey-service.ts';
+import { VersionStateService } from './version-state-service.ts';
 
 export interface ServiceParts {
   readonly database: Database;
@@ -32,6 +37,7 @@ export interface ServiceParts {
   readonly fileQuota_bytes: number;
   readonly jobs: Jobs;
   readonly makeReport: ReportMaker;
+  readonly makeEstimate: EstimateMaker;
 }
 
 export interface Services {
@@ -45,7 +51,11 @@ export interface Services {
   readonly changeSets: ChangeSetService;
   readonly summaries: SummaryService;
   readonly exports: ExportService;
+  readonly estimates: EstimateService;
   readonly files: FileService;
+  readonly materials: MaterialService;
+  readonly ownMaterials: OwnMaterialService;
+  readonly versionStates: VersionStateService;
   readonly history: HistoryService;
   readonly health: HealthService;
   readonly throttle: SignInThrottle;
@@ -57,6 +67,7 @@ export function services(parts: ServiceParts): Services {
   const access = new AccessService(database, clock);
   const throttle = new SignInThrottle(database, clock);
   const summaries = new SummaryService(parts);
+  const ownMaterials = new OwnMaterialService(database, clock, access);
   return {
     access,
     throttle,
@@ -69,7 +80,11 @@ export function services(parts: ServiceParts): Services {
     surveys: new SurveyService(database),
     changeSets: new ChangeSetService({ database, clock, summaries }),
     exports: new ExportService(parts),
+    estimates: new EstimateService(parts.makeEstimate),
     files: new FileService(parts),
+    materials: new MaterialService(database),
+    ownMaterials,
+    versionStates: new VersionStateService({ clock, ownMaterials }),
     history: new HistoryService(database),
     health: new HealthService(database),
   };

@@ -1,16 +1,21 @@
+import { randomUUID } from 'node:crypto';
 import fc from 'fast-check';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { compositionDraft, formulaDraft, supplierDraft } from '../../support/sample-drafts.ts';
 import { TestApp, type TestBook, type TestPerson } from '../../support/test-app.ts';
 
 let app: TestApp;
 let person: TestPerson;
 let book: TestBook;
-let operations: readonly { method: 'get' | 'post' | 'patch' | 'delete'; path: string }[];
+let materialId: string;
+let operations: readonly { method: 'get' | 'post' | 'patch' | 'put' | 'delete'; path: string }[];
 
 beforeAll(async () => {
   app = await TestApp.open();
   person = await app.person();
   book = await app.book(person);
+  materialId = randomUUID();
+  await person.visitor.post('/api/own-materials', { id: materialId, draft: supplierDraft(), evidence: [] }).expect(201);
   const answer = await app.visitor().get('/api/openapi.json').expect(200);
   operations = Object.entries((answer.body as { paths: Record<string, object> }).paths).flatMap(([path, methods]) =>
     Object.keys(methods)
@@ -69,6 +74,10 @@ const body = fc.oneof(
       'version',
       'kind',
       'room_id',
+      'draft',
+      'evidence',
+      'state',
+      'reason',
     ),
     odd,
     { maxKeys: 6 },
@@ -87,6 +96,31 @@ const body = fc.oneof(
     ),
   }),
 );
+const material = fc.record({
+  id: fc.uuid(),
+  draft: fc.oneof(
+    odd,
+    fc
+      .tuple(
+        fc.constantFrom(supplierDraft(), formulaDraft(), compositionDraft([])),
+        fc.constantFrom(
+          'label',
+          'way',
+          'curve',
+          'parts',
+          'formula',
+          'heat_MJ',
+          'range',
+          'accepted',
+          'moisture',
+          'elements',
+        ),
+        odd,
+      )
+      .map(([draft, name, value]) => ({ ...draft, [name]: value })),
+  ),
+  evidence: fc.oneof(fc.constant([]), fc.array(fc.uuid(), { maxLength: 3 }), odd),
+});
 const query = fc.oneof(
   fc.constant(''),
   fc
@@ -100,11 +134,17 @@ const query = fc.oneof(
 
 describe('whatever is sent', () => {
   it('never makes the server fail, hang or die: 2,000 odd requests', async () => {
-    const ids: Record<string, string> = { siteId: book.siteId, buildingId: book.buildingId, surveyId: book.surveyId };
+    const ids: Record<string, string> = {
+      siteId: book.siteId,
+      buildingId: book.buildingId,
+      surveyId: book.surveyId,
+      materialId,
+      version: '1',
+    };
     await fc.assert(
       fc.asyncProperty(
         fc.nat(),
-        body,
+        fc.oneof(body, body, material),
         query,
         fc.boolean(),
         fc.oneof(fc.constant(null), odd),

@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest';
 import type { SiteRoleName } from '@embertally/shared/policy/policy';
+import { supplierDraft } from '../../support/sample-drafts.ts';
 import { samplePdf } from '../../support/sample-files.ts';
 import { box, crate, groundFloor, uid, withEntries, withRoom } from '../../support/survey-builder.ts';
 import { PASSWORD, TestApp, creating, type TestBook, type TestPerson } from '../../support/test-app.ts';
@@ -33,6 +34,14 @@ const EXPECTED: Readonly<Record<string, { readonly who: Who; readonly keeper?: t
   'uses.list': { who: 'signed in' },
   'files.create': { who: 'signed in' },
   'files.read': { who: 'own organisation' },
+  'own-materials.list': { who: 'signed in' },
+  'own-materials.create': { who: 'signed in' },
+  'own-materials.read': { who: 'own organisation' },
+  'own-material-versions.create': { who: 'own organisation' },
+  'own-material-versions.read': { who: 'own organisation' },
+  'own-material-versions.edit': { who: 'own organisation' },
+  'own-material-versions.discard': { who: 'own organisation' },
+  'own-material-versions.move': { who: 'own organisation' },
   'sites.read': { who: ALL },
   'sites.edit': { who: ['manager'], keeper: true },
   'site-roles.give': { who: ['manager'], keeper: true },
@@ -175,9 +184,18 @@ async function newLimit(): Promise<string> {
   return id;
 }
 
+/** A draft of a member of the keeper: of the person asking, where they are one. */
+async function newMaterial(who: Persona): Promise<Record<string, string>> {
+  const id = randomUUID();
+  const by = who.ofKeeper && who.person !== null ? who.person : keeper;
+  await app.house.services.ownMaterials.create(by, { id, draft: supplierDraft(), evidence: [] }, TRAIL);
+  return { materialId: id, version: '1' };
+}
+
 /** A request of each operation that would succeed for somebody who may make it. */
 async function validRequest(
   id: string,
+  who: Persona,
 ): Promise<{ params?: Record<string, string>; query?: string; body?: object; file?: Buffer; etag?: string }> {
   switch (id) {
     case 'organisations.create':
@@ -262,6 +280,27 @@ async function validRequest(
           contents: [],
         },
       };
+    case 'own-materials.create':
+      return { body: { id: randomUUID(), draft: supplierDraft(), evidence: [] } };
+    case 'own-materials.read':
+    case 'own-material-versions.read':
+      return { params: await newMaterial(who) };
+    case 'own-material-versions.create': {
+      const params = await newMaterial(who);
+      await app.owner.query("UPDATE own_material_version SET state = 'put-forward' WHERE material_id = $1", [
+        params['materialId'],
+      ]);
+      await app.owner.query("UPDATE own_material_version SET state = 'returned' WHERE material_id = $1", [
+        params['materialId'],
+      ]);
+      return { params, body: { id: randomUUID(), draft: supplierDraft(), evidence: [] } };
+    }
+    case 'own-material-versions.edit':
+      return { params: await newMaterial(who), body: { draft: supplierDraft(), evidence: [] }, etag: '"v1"' };
+    case 'own-material-versions.discard':
+      return { params: await newMaterial(who), etag: '"v1"' };
+    case 'own-material-versions.move':
+      return { params: await newMaterial(who), body: { state: 'put-forward' }, etag: '"v1"' };
     case 'files.create':
       return { query: uploadPath(randomUUID()).replace('/api/files', ''), file: samplePdf() };
     case 'exports.create':
@@ -274,9 +313,10 @@ async function validRequest(
 async function statusOf(
   operation: Operation,
   visitor: Visitor,
+  who: Persona,
   ids: Readonly<Record<string, string>>,
 ): Promise<{ status: number; body: unknown }> {
-  const valid = await validRequest(operation.id);
+  const valid = await validRequest(operation.id, who);
   const all: Record<string, string> = { ...valid.params, ...ids };
   const path =
     operation.path.replace(/\{(\w+)\}/g, (_match, name: string) => all[name] ?? randomUUID()) + (valid.query ?? '');
@@ -341,6 +381,8 @@ async function contentHash(): Promise<string> {
     'change_set',
     'export',
     'stored_file',
+    'own_material',
+    'own_material_version',
   ];
   const parts = tables.map(
     (table) => `(SELECT coalesce(md5(string_agg(t::text, ',' ORDER BY t::text)), '') FROM "${table}" t)`,
@@ -363,7 +405,7 @@ describe('who may do what', () => {
         const visitor = await browserOf(who, operation.id);
         const expected = allowed(line, who);
         await app.owner.query("UPDATE export SET state = 'stopped' WHERE state IN ('waiting', 'running')");
-        const { status } = await statusOf(operation, visitor, realIds());
+        const { status } = await statusOf(operation, visitor, who, realIds());
         const right = expected === 'ok' ? operation.status : expected;
         if (status !== right) wrong.push(`${operation.id} as ${who.name}: ${status} instead of ${right}`);
       }
@@ -381,9 +423,10 @@ describe('who may do what', () => {
         exportId: randomUUID(),
         limitId: randomUUID(),
         fileId: randomUUID(),
+        materialId: randomUUID(),
       };
-      const there = await statusOf(operation, stranger, realIds());
-      const nowhere = await statusOf(operation, stranger, random);
+      const there = await statusOf(operation, stranger, persona('a stranger'), realIds());
+      const nowhere = await statusOf(operation, stranger, persona('a stranger'), random);
       const bare = ({ status, body }: { status: number; body: unknown }): object => ({
         status,
         body: { ...(body as object), instance: '', requestId: '' },
