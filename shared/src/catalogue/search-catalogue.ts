@@ -1,9 +1,14 @@
 import type { Kind, Material } from './catalogue-row.ts';
 import { KINDS } from './kinds.ts';
 import { MATERIALS } from './materials.ts';
+import type { PlaceableMaterial } from './placeable-material.ts';
 
 export type CatalogueHit =
   { readonly type: 'kind'; readonly row: Kind } | { readonly type: 'material'; readonly row: Material };
+
+/** A hit among the catalogue and the organisation's own materials. */
+export type PlaceableHit =
+  { readonly type: 'kind'; readonly row: Kind } | { readonly type: 'material'; readonly row: PlaceableMaterial };
 
 interface SearchOptions {
   /** Keys used last, newest first; among equal matches they come first. */
@@ -12,8 +17,13 @@ interface SearchOptions {
   readonly limit?: number;
 }
 
+interface WithOwn extends SearchOptions {
+  /** Approved materials of the organisation's own, searched with the built-in ones; the same array is indexed once. */
+  readonly own: readonly PlaceableMaterial[];
+}
+
 interface Indexed {
-  readonly hit: CatalogueHit;
+  readonly hit: PlaceableHit;
   readonly label: string;
   readonly labelWords: readonly string[];
   /** Synonyms and the group. */
@@ -30,7 +40,7 @@ function fold(text: string): string {
     .trim();
 }
 
-function indexed(hit: CatalogueHit): Indexed {
+function indexed(hit: PlaceableHit): Indexed {
   const label = fold(hit.row.label);
   return {
     hit,
@@ -44,6 +54,16 @@ const INDEX: readonly Indexed[] = [
   ...KINDS.map((row) => indexed({ type: 'kind', row })),
   ...MATERIALS.map((row) => indexed({ type: 'material', row })),
 ];
+
+const ownIndexes = new WeakMap<readonly PlaceableMaterial[], readonly Indexed[]>();
+
+/** Own materials come before built-in ones of the same rank: who made one wants it. */
+function indexWith(own: readonly PlaceableMaterial[] | undefined): readonly Indexed[] {
+  if (own === undefined || own.length === 0) return INDEX;
+  const known = ownIndexes.get(own) ?? own.map((row) => indexed({ type: 'material', row }));
+  ownIndexes.set(own, known);
+  return [...known, ...INDEX];
+}
 
 /** How well a row answers, lower is better; undefined when a word of the query is not in it. */
 function rank(row: Indexed, query: string, words: readonly string[]): number | undefined {
@@ -63,23 +83,27 @@ function rank(row: Indexed, query: string, words: readonly string[]): number | u
 /**
  * Kinds and materials that answer what was typed, best first: a label that begins so, then words of the label, then
  * synonyms and groups, then parts of words. Every word typed must be found. Capitals and diacritics do not matter. Among
- * equals: what was used last, then kinds before materials, then the catalogue's order. An empty query gives what was used
+ * equals: what was used last, then own materials, then kinds before materials, then the catalogue's order. An empty query gives what was used
  * last, and nothing when nothing was.
  */
-export function searchCatalogue(query: string, options: SearchOptions = {}): readonly CatalogueHit[] {
-  const { recent = [], limit = 20 } = options;
+export function searchCatalogue(query: string, options: WithOwn): readonly PlaceableHit[];
+export function searchCatalogue(query: string, options?: SearchOptions): readonly CatalogueHit[];
+export function searchCatalogue(query: string, options: Partial<WithOwn> = {}): readonly PlaceableHit[] {
+  const { recent = [], limit = 20, own } = options;
+  const index = indexWith(own);
   const folded = fold(query);
   const recency = new Map(recent.map((key, place) => [key, place]));
   const placeOf = (row: Indexed) => recency.get(row.hit.row.key) ?? Number.POSITIVE_INFINITY;
   if (folded === '') {
-    return INDEX.filter((row) => recency.has(row.hit.row.key))
+    return index
+      .filter((row) => recency.has(row.hit.row.key))
       .toSorted((a, b) => placeOf(a) - placeOf(b))
       .slice(0, limit)
       .map((row) => row.hit);
   }
   const words = folded.split(' ');
   const found: { readonly row: Indexed; readonly rank: number; readonly place: number }[] = [];
-  for (const row of INDEX) {
+  for (const row of index) {
     const value = rank(row, folded, words);
     if (value !== undefined) found.push({ row, rank: value, place: placeOf(row) });
   }

@@ -1,4 +1,6 @@
-import type { Kind, Material } from '../catalogue/catalogue-row.ts';
+import type { Kind } from '../catalogue/catalogue-row.ts';
+import type { PlaceableMaterial } from '../catalogue/placeable-material.ts';
+import { placeCurve } from '../calorimeter/place-curve.ts';
 import type { Entry, EntryPart } from './survey-document.ts';
 
 /** Who placed the entry, where and when; ids and times come from the caller. */
@@ -12,16 +14,17 @@ export interface EntryPlace {
 }
 
 /** A part of an entry with the material's heat and source copied, so that the tally never changes with the catalogue. */
-export function partOf(material: Material, mass_kg: number): EntryPart {
-  const { title, locator } = material.source;
+export function partOf(material: PlaceableMaterial, mass_kg: number): EntryPart {
+  const { own, source } = material;
+  const heat_source = own?.heat_source ?? `${source.title}, ${source.locator}`;
   return {
     material: material.key,
-    material_version: null,
+    material_version: own?.version ?? null,
     label: material.label,
     net_heat_MJ_kg: material.net_heat_MJ_kg,
     low_MJ_kg: material.low_MJ_kg,
     high_MJ_kg: material.high_MJ_kg,
-    heat_source: `${title}, ${locator}`.slice(0, 500),
+    heat_source: heat_source.slice(0, 500),
     mass_kg,
     moisture_pct: null,
   };
@@ -34,7 +37,7 @@ export function partOf(material: Material, mass_kg: number): EntryPart {
  */
 export function newEntryFromKind(
   kind: Kind,
-  materials: (key: string) => Material | undefined,
+  materials: (key: string) => PlaceableMaterial | undefined,
   place: EntryPlace,
 ): Entry {
   const parts = kind.parts.map((part) => {
@@ -60,15 +63,24 @@ export function newEntryFromKind(
 }
 
 /**
- * A quantity of one material in a heap, stack or vessel.
+ * A quantity of one material in a heap, stack or vessel. A measured curve of the material comes with it: of one piece, or of
+ * the surface that faces up.
  *
  * @param mass_kg 0 to 1,000,000
  */
-export function newEntryFromMaterial(material: Material, mass_kg: number, place: EntryPlace): Entry {
+export function newEntryFromMaterial(material: PlaceableMaterial, mass_kg: number, place: EntryPlace): Entry {
+  const blank = blankEntry(place);
+  const curve = material.own?.curve ?? null;
   return {
-    ...blankEntry(place),
+    ...blank,
     label: material.label,
     parts: [partOf(material, mass_kg)],
+    curve:
+      curve === null
+        ? null
+        : placeCurve(curve.points, curve.per === 'piece' ? blank.count : blank.width_m * blank.depth_m).map(
+            ([t_s, q_kW]): [number, number] => [t_s, q_kW],
+          ),
     radiative_fraction: material.radiative_fraction,
     ignition_class: material.ignition_class,
   };

@@ -1,6 +1,7 @@
 import { readCurrentSession } from '@embertally/shared/contracts/sessions';
 import { useEffect, useState } from 'react';
 import { call } from '../lib/api-client.ts';
+import { keepOwnMaterials } from './keep-own-materials.ts';
 import { openBook, type OpenBook } from './open-book.ts';
 import { surveyFeed } from './sync/survey-feed.ts';
 
@@ -27,7 +28,9 @@ export function useOpenBook(surveyId: string): Opening {
         book.sync.retryNow();
         void book.sync.catchUp();
       });
+      const forget = keepOwnMaterials(book.session);
       leave = () => {
+        forget();
         silence();
         book.sync.stop();
       };

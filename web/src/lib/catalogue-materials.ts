@@ -6,11 +6,11 @@ import { call } from './api-client.ts';
 /** A material that may be placed: built in, or an approved one of the organisation's own. */
 export type CatalogueMaterial = z.infer<typeof materialSchema>;
 
-/** Every material that may be placed; `own`: only those of the organisation, for screens that carry the others. */
-export function materialsQuery(of?: 'own') {
+/** Every material that may be placed. */
+export function materialsQuery() {
   return queryOptions({
-    queryKey: ['materials', of ?? 'all'],
-    queryFn: ({ signal }) => call(listMaterials, { signal, ...(of === undefined ? {} : { query: { of } }) }),
+    queryKey: ['materials'],
+    queryFn: ({ signal }) => call(listMaterials, { signal }),
     staleTime: 60_000,
   });
 }

@@ -1,5 +1,6 @@
 import { materialByKey } from '@embertally/shared/catalogue/materials';
-import { searchCatalogue, type CatalogueHit } from '@embertally/shared/catalogue/search-catalogue';
+import type { PlaceableMaterial } from '@embertally/shared/catalogue/placeable-material';
+import { searchCatalogue, type PlaceableHit } from '@embertally/shared/catalogue/search-catalogue';
 import { newEntryFromKind, newEntryFromMaterial } from '@embertally/shared/survey/new-entry';
 import type { Entry } from '@embertally/shared/survey/survey-document';
 
@@ -9,8 +10,9 @@ const NOWHERE = { id: '', room_id: '', x_m: 0, y_m: 0, recorded_by: null, record
 
 /** The catalogue as placing needs it; its own chunk, because the plan can be drawn without it. */
 export const catalogueTools = {
-  search: (query: string) => searchCatalogue(query, { limit: 12 }),
-  entryOf: (hit: CatalogueHit): Entry =>
+  /** `own`: approved materials of the person's organisation, searched with the built-in ones. */
+  search: (query: string, own: readonly PlaceableMaterial[]) => searchCatalogue(query, { limit: 12, own }),
+  entryOf: (hit: PlaceableHit): Entry =>
     hit.type === 'kind'
       ? newEntryFromKind(hit.row, materialByKey, NOWHERE)
       : newEntryFromMaterial(hit.row, FIRST_MASS_KG, NOWHERE),

@@ -15,7 +15,8 @@ interface ContentsPickerProps {
 export function ContentsPicker({ typed, onType, onPicked }: ContentsPickerProps) {
   const session = useBookSession();
   const placing = useBook((state) => state.placing.entry);
-  const hits = catalogueTools.search(typed);
+  const own = useBook((state) => state.ownMaterials);
+  const hits = catalogueTools.search(typed, own);
   return (
     <div className="contents-picker">
       <Combobox

@@ -4,6 +4,7 @@ import { duplicatePicked } from '../actions/copy-picked.ts';
 import { deletePicked } from '../actions/delete-picked.ts';
 import { useBookSession } from '../session/use-book-session.ts';
 import { KEEPING_CHOICES } from './keeping-choices.ts';
+import { NewerHeatNotice } from './newer-heat-notice.tsx';
 import { StripChoice } from './strip-choice.tsx';
 import { StripField } from './strip-field.tsx';
 import { StripQuantity } from './strip-quantity.tsx';
@@ -59,6 +60,7 @@ export function EntryStrip({ entry }: { readonly entry: Entry }) {
         choices={KEEPING_CHOICES}
         onChoose={(keeping) => edit({ keeping }, `${entry.label} is kept ${keeping}`)}
       />
+      <NewerHeatNotice entries={[entry]} canEdit />
       <StripVerb
         label="Duplicate"
         onPress={() => {

@@ -5,6 +5,7 @@ import { deletePicked } from '../actions/delete-picked.ts';
 import { useBook } from '../session/use-book.ts';
 import { useBookSession } from '../session/use-book-session.ts';
 import { KEEPING_CHOICES } from './keeping-choices.ts';
+import { NewerHeatNotice } from './newer-heat-notice.tsx';
 import { StripChoice } from './strip-choice.tsx';
 import { StripVerb } from './strip-verb.tsx';
 
@@ -17,6 +18,8 @@ export function ManyStrip({ ids }: { readonly ids: readonly string[] }) {
     const [first, ...others] = ids.map((id) => state.document.entries.get(id)?.keeping);
     return first === undefined || others.some((other) => other !== first) ? 'mixed' : first;
   });
+  const document = useBook((state) => state.document);
+  const entries = ids.flatMap((id) => document.entries.get(id) ?? []);
   return (
     <>
       <p className="strip-name">{ids.length} entries</p>
@@ -33,6 +36,7 @@ export function ManyStrip({ ids }: { readonly ids: readonly string[] }) {
             );
         }}
       />
+      <NewerHeatNotice entries={entries} canEdit />
       <StripVerb
         label="Duplicate"
         onPress={() => {

@@ -1,3 +1,4 @@
+import type { PlaceableMaterial } from '@embertally/shared/catalogue/placeable-material';
 import { roomsInReadingOrder } from '@embertally/shared/survey/derive/rooms-in-reading-order';
 import type { Limit } from '@embertally/shared/contracts/limits';
 import type { Survey } from '@embertally/shared/contracts/surveys';
@@ -76,6 +77,7 @@ export class BookSession {
       canRedo: null,
       saving: NOTHING_TO_SAVE,
       engineReady: false,
+      ownMaterials: [],
     };
   }
 
@@ -215,6 +217,11 @@ export class BookSession {
   provideEngine(estimate: (input: RoomInput) => RoomTally): void {
     this.#tallies.use(estimate);
     this.#set({ engineReady: true });
+  }
+
+  /** Approved materials of the person's organisation, as they were read last. */
+  provideOwnMaterials(materials: readonly PlaceableMaterial[]): void {
+    this.#set({ ownMaterials: materials });
   }
 
   /** The tally of a room as it stands now; null while the engine is on its way or when the room is gone. */

@@ -1,3 +1,4 @@
+import type { PlaceableMaterial } from '@embertally/shared/catalogue/placeable-material';
 import type { Limit } from '@embertally/shared/contracts/limits';
 import type { Survey } from '@embertally/shared/contracts/surveys';
 import type { Refusal } from '@embertally/shared/survey/command';
@@ -70,4 +71,6 @@ export interface BookState {
   readonly saving: SavingStatus;
   /** Rises when the tally engine arrives, so that readers of tallies look again. */
   readonly engineReady: boolean;
+  /** Approved materials of the person's organisation; none until they have arrived. */
+  readonly ownMaterials: readonly PlaceableMaterial[];
 }

@@ -1,4 +1,4 @@
-import { type CatalogueHit, searchCatalogue } from '@embertally/shared/catalogue/search-catalogue';
+import { type PlaceableHit, searchCatalogue } from '@embertally/shared/catalogue/search-catalogue';
 import { addEntries } from '@embertally/shared/survey/commands/add-entries';
 import { freePlace } from '@embertally/shared/survey/derive/free-place';
 import type { Entry, EntryPart, Room } from '@embertally/shared/survey/survey-document';
@@ -51,7 +51,7 @@ export function AddEntryForm({ room }: { readonly room: Room }) {
   const session = useBookSession();
   const units = useUnits();
   const document = useBook((state) => state.document);
-  const [hit, setHit] = useState<CatalogueHit | null>(null);
+  const [hit, setHit] = useState<PlaceableHit | null>(null);
   const measure = hit?.type === 'kind' && hit.row.measure.by !== 'pieces' ? MEASURE_WORDS[hit.row.measure.by] : null;
   const typed = (value: number, unit: string): string =>
     formatQuantity(value, unit, units, { figures: 'as entered' }).text;
@@ -131,7 +131,7 @@ export function AddEntryForm({ room }: { readonly room: Room }) {
     },
   });
 
-  const pick = (chosen: CatalogueHit): void => {
+  const pick = (chosen: PlaceableHit): void => {
     setHit(chosen);
     const entry = entryOfHit(chosen, null, 0, NOWHERE);
     const kind = chosen.type === 'kind' ? chosen.row : null;
@@ -161,7 +161,8 @@ export function AddEntryForm({ room }: { readonly room: Room }) {
     form.fill({ amount: text, ...suggested });
   };
 
-  const hits = searchCatalogue(form.values.what, { limit: 12 });
+  const ownMaterials = useBook((state) => state.ownMaterials);
+  const hits = searchCatalogue(form.values.what, { limit: 12, own: ownMaterials });
   const what = form.field('what');
   return (
     <form noValidate onSubmit={form.onSubmit} className="grid gap-4 pb-2" aria-label="Add contents">
@@ -190,7 +191,7 @@ export function AddEntryForm({ room }: { readonly room: Room }) {
               ? ''
               : hit.type === 'kind'
                 ? `From the catalogue of kinds: ${hit.row.label}`
-                : `From the catalogue of materials: ${hit.row.label}`}
+                : `${hit.row.own ? 'One of your own materials' : 'From the catalogue of materials'}: ${hit.row.label}`}
           </p>
         </div>
         {hit === null && <FormQuantity label="Net heat" unit="MJ/kg" field={form.field('heat')} />}

@@ -1,5 +1,6 @@
 import { entriesOfRoom } from '@embertally/shared/survey/derive/entries-of-room';
 import { Disclosure } from '../../../components/disclosure.tsx';
+import { NewerHeatNotice } from '../../plan/newer-heat-notice.tsx';
 import { useBook } from '../../session/use-book.ts';
 import { AddEntryForm } from './add-entry-form.tsx';
 import { ContentsTable } from './contents-table.tsx';
@@ -29,7 +30,10 @@ export function ContentsPart() {
       {entries.length === 0 ? (
         <p className="text-soft">Nothing is recorded in {room.name} yet.</p>
       ) : (
-        <ContentsTable room={room} entries={entries} canEdit={canEdit} />
+        <>
+          <NewerHeatNotice entries={entries} canEdit={canEdit} />
+          <ContentsTable room={room} entries={entries} canEdit={canEdit} />
+        </>
       )}
     </div>
   );

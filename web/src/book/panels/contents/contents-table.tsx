@@ -4,6 +4,7 @@ import { displayUnit } from '@embertally/shared/units/display-unit';
 import { lazy, Suspense, useCallback, useMemo, useRef, useState } from 'react';
 import { useUnits } from '../../../lib/units-context.ts';
 import { useBook } from '../../session/use-book.ts';
+import { useNewerHeats } from '../../session/use-newer-heats.ts';
 import { useRoomTally } from '../../session/use-room-tally.ts';
 import { useRunBack } from '../run-back.ts';
 import { useRowFocus } from '../use-row-focus.ts';
@@ -27,6 +28,7 @@ export function ContentsTable({ room, entries, canEdit }: ContentsTableProps) {
   const runBack = useRunBack();
   const tally = useRoomTally(room.id);
   const picked = useBook((state) => state.selection);
+  const newer = useNewerHeats();
   const [open, setOpen] = useState<string | null>(null);
   const { rootRef, focusAfter } = useRowFocus<HTMLDivElement>();
   const scroll = useRef<HTMLDivElement | null>(null);
@@ -100,6 +102,7 @@ export function ContentsTable({ room, entries, canEdit }: ContentsTableProps) {
                 heat_MJ={heats.get(entry.id) ?? null}
                 canEdit={canEdit}
                 picked={pickedIds.has(entry.id)}
+                newerHeat={newer.of(entry).length > 0}
                 rowIndex={long ? from + index + 2 : undefined}
                 edit={edit}
                 onOpen={setOpen}

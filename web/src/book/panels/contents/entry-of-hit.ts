@@ -1,6 +1,6 @@
 import { materialByKey } from '@embertally/shared/catalogue/materials';
 import { scaleKind } from '@embertally/shared/catalogue/scale-kind';
-import type { CatalogueHit } from '@embertally/shared/catalogue/search-catalogue';
+import type { PlaceableHit } from '@embertally/shared/catalogue/search-catalogue';
 import { type EntryPlace, newEntryFromKind, newEntryFromMaterial } from '@embertally/shared/survey/new-entry';
 import type { Entry } from '@embertally/shared/survey/survey-document';
 
@@ -10,7 +10,7 @@ import type { Entry } from '@embertally/shared/survey/survey-document';
  * @param amount in the unit the kind is measured by; null for the amount its row stands for
  * @param mass_kg of one piece of a bare material
  */
-export function entryOfHit(hit: CatalogueHit, amount: number | null, mass_kg: number, place: EntryPlace): Entry {
+export function entryOfHit(hit: PlaceableHit, amount: number | null, mass_kg: number, place: EntryPlace): Entry {
   if (hit.type === 'material') return newEntryFromMaterial(hit.row, mass_kg, place);
   const entry = newEntryFromKind(hit.row, materialByKey, place);
   if (amount === null || hit.row.measure.by === 'pieces') return entry;

@@ -23,6 +23,8 @@ interface EntryRowProps {
   readonly heat_MJ: number | null;
   readonly canEdit: boolean;
   readonly picked: boolean;
+  /** Its material has a newer approved value; taken above the table or in the strip. */
+  readonly newerHeat: boolean;
   /** Position among all rows, heading included, where not all rows are in the page. */
   readonly rowIndex: number | undefined;
   readonly edit: EditEntry;
@@ -33,21 +35,24 @@ interface EntryRowProps {
 
 /** One entry of the contents table. */
 export const EntryRow = memo(function EntryRow(props: EntryRowProps) {
-  const { entry, heat_MJ, canEdit, picked, rowIndex, edit, onOpen, onLeave } = props;
+  const { entry, heat_MJ, canEdit, picked, newerHeat, rowIndex, edit, onOpen, onLeave } = props;
   const session = useBookSession();
   const units = useUnits();
   const show = useQuantity();
   const mass_kg = entryMass(entry);
   const name = (
-    <button
-      type="button"
-      className="row-name"
-      onClick={() => {
-        session.select([{ kind: 'entry', id: entry.id }]);
-      }}
-    >
-      {entry.label}
-    </button>
+    <>
+      <button
+        type="button"
+        className="row-name"
+        onClick={() => {
+          session.select([{ kind: 'entry', id: entry.id }]);
+        }}
+      >
+        {entry.label}
+      </button>
+      {newerHeat ? <span className="block text-small font-normal text-ochre">a newer value exists</span> : null}
+    </>
   );
   const heat = heat_MJ === null ? '–' : show(heat_MJ, 'MJ').text;
   const more = (
