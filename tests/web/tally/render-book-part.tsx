@@ -34,7 +34,7 @@ export function renderBookPart(part: ReactNode, document: SurveyDocument, option
     canEdit: options.canEdit ?? true,
     limits: options.limits ?? [],
   });
-  if (options.engine !== 'on its way') session.provideEngine((input) => estimateRoom(input));
+  if (options.engine !== 'on its way') session.provideEngine((input) => estimateRoom(input, { spread: false }));
   render(
     <MemoryRouter>
       <UnitsContext value={options.units ?? 'SI'}>

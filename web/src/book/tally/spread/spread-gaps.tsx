@@ -76,8 +76,7 @@ export function SpreadGaps({ spread, nameOf, onShow }: SpreadGapsProps) {
                     onShow({ from: row.from, to: row.to, gap_m: row.gap_m.value ?? 0, enough_m: row.enough_m.value });
                   }}
                 >
-                  {nameOf(row.from)}
-                  <span className="block text-soft">to {nameOf(row.to)}</span>
+                  {nameOf(row.from)} <span className="block text-soft">to {nameOf(row.to)}</span>
                 </button>
               </th>
               {LENGTHS.map((key) => (
