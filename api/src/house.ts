@@ -8,6 +8,7 @@ import { Sessions } from './auth/sessions.ts';
 import { systemClock, type Clock } from './clock.ts';
 import { dataSource } from './data-source.ts';
 import type { Env } from './env.ts';
+import { EstimateThreads, type EstimateThreadsOptions } from './estimates/estimate-threads.ts';
 import { SurveyFeed } from './events/survey-feed.ts';
 import { FolderFileStore } from './files/folder-file-store.ts';
 import { SurveyEvents } from './http/survey-events.ts';
@@ -22,6 +23,7 @@ const RETRY_ms = 1000;
 export interface HouseOptions {
   readonly clock?: Clock;
   readonly makeReport?: ReportMaker;
+  readonly estimates?: EstimateThreadsOptions;
   /** Time between heartbeats of event streams, ms. */
   readonly heartbeat_ms?: number;
 }
@@ -35,6 +37,7 @@ export class House {
   private readonly jobs: DatabaseJobs;
   private readonly events: SurveyEvents;
   private readonly sessions: Sessions;
+  private readonly estimates: EstimateThreads;
   private readonly log: Logger;
   private housekeeping: NodeJS.Timeout | null = null;
   private retry: NodeJS.Timeout | null = null;
@@ -47,6 +50,7 @@ export class House {
     this.sessions = new Sessions(this.database, clock);
     this.feed = new SurveyFeed(env.databaseUrl, log);
     this.jobs = new DatabaseJobs(env.databaseUrl, log);
+    this.estimates = new EstimateThreads(options.estimates);
     this.services = services({
       database: this.database,
       clock,
@@ -57,6 +61,7 @@ export class House {
       fileQuota_bytes: env.filesPerOrganisation_bytes,
       jobs: this.jobs,
       makeReport: options.makeReport ?? makeReportInWorker,
+      makeEstimate: (task, signal) => this.estimates.make(task, signal),
     });
     this.events = new SurveyEvents({
       feed: this.feed,
@@ -97,6 +102,7 @@ export class House {
     if (this.housekeeping !== null) clearInterval(this.housekeeping);
     if (this.retry !== null) clearTimeout(this.retry);
     this.events.close();
+    await this.estimates.close();
     await this.jobs.close();
     await this.services.summaries.stop();
     await this.feed.close();
