@@ -1,4 +1,5 @@
 import { combustionProducts } from '../chemistry/combustion-products.ts';
+import { OutOfRangeError } from '../methods/estimate.ts';
 import { OXYGEN_G_MOL } from '../chemistry/molar-mass.ts';
 import { combustionFactorOf } from './combustion-factor-of.ts';
 import { deriveCurve } from './derive-curve.ts';
@@ -59,6 +60,8 @@ export function deriveMaterial(draft: MaterialDraft, lookup: OwnMaterialLookup):
     };
   } catch (error) {
     if (error instanceof DraftRefused) return { ok: false, faults: error.faults };
+    if (error instanceof OutOfRangeError)
+      return { ok: false, faults: [{ pointer: '', code: 'not_possible', message: error.message }] };
     throw error;
   }
 }

@@ -14,16 +14,16 @@ import type { Workbook } from './workbook.ts';
 export type FoundBasis = Pick<MaterialBasis, 'finding' | 'text' | 'perOxygen_MJ_kg' | 'proposal'>;
 
 /**
- * Holds a way's net heat against the oxygen its composition takes up, then against what else is known. The first finding
- * that is not plausible is reported; nothing is changed. Null where there is nothing to hold it against.
+ * Holds a way's net heat against the oxygen its composition takes up, then against what else is known of it; nothing is
+ * changed. Null where there is nothing to hold it against.
  */
 export function materialBasis(book: Workbook, way: MaterialWay, heat: WayHeat): FoundBasis | null {
   if (!(heat.net_MJ_kg > 0)) return null;
   const byOxygen = heat.composition === null ? null : oxygenBasis(book, way, heat, heat.composition);
-  if (byOxygen !== null && byOxygen.finding !== 'plausible' && byOxygen.finding !== 'not-covered') return byOxygen;
+  // A slip in the moles explains more than anything else; what else the oxygen finds, a like material explains better.
+  if (byOxygen?.finding === 'wrong-mole-basis') return byOxygen;
   const compared = compareHeat(heat);
-  if (compared === null) return byOxygen;
-  return { ...compared, perOxygen_MJ_kg: byOxygen?.perOxygen_MJ_kg ?? null };
+  return compared === null ? byOxygen : { ...compared, perOxygen_MJ_kg: byOxygen?.perOxygen_MJ_kg ?? null };
 }
 
 function oxygenBasis(book: Workbook, way: MaterialWay, heat: WayHeat, composition: Composition): FoundBasis {

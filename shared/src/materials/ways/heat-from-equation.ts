@@ -30,16 +30,10 @@ export function heatFromEquation(book: Workbook, draft: DraftOf<'equation'>): Wa
       dH: asWritten ? heat.enthalpy_kJ : -heat.heat_kJ_mol,
       water: draft.water,
     },
-    { at: '/formula', inputs: { n: '/heat/moles', dH: at } },
+    { at, inputs: { n: '/heat/moles' } },
     ['netPerMole', 'gross', 'net'],
     { origins: { n: 'given', dH: { origin: 'given', note: draft.source }, water: 'given' } },
   );
-  if (!(net > 0))
-    throw DraftRefused.at(
-      at,
-      'no_net_heat',
-      `Less than the heat in the water is left (${figure(net)} MJ/kg net). Check the heat, its moles and the state of the water.`,
-    );
   return {
     state: 'dry',
     measured: draft.water === 'liquid' ? 'gross' : 'net',

@@ -66,12 +66,6 @@ export function heatFromSupplier(book: Workbook, draft: DraftOf<'supplier'>, loo
     { at: '/heat_MJ', inputs: { w_H: '/hydrogen_pct' } },
     { origins: { w_H: draft.hydrogen_pct === undefined ? 'computed' : 'given' } },
   );
-  if (!(net > 0))
-    throw DraftRefused.at(
-      '/hydrogen_pct',
-      'no_net_heat',
-      'The water of this much hydrogen takes more heat than there is. Check the heat and the hydrogen.',
-    );
   const netOf = (heat: number) => netFromGross.run({ H_gross: perKg(heat) / (1 - wet), w_H });
   return { ...common, ...rangeOf(draft, net, netOf), state: 'dry', net_MJ_kg: net, gross_MJ_kg: gross };
 }
