@@ -1,4 +1,6 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { estimateRoom } from '@embertally/shared/tally/estimate-room';
+import { parseRoomInput } from '@embertally/shared/tally/parse-room-input';
 import { TestApp, type TestPerson } from '../../support/test-app.ts';
 
 let app: TestApp;
@@ -92,6 +94,38 @@ describe('an estimate', () => {
   ])('of %s is refused', async (_name, body) => {
     const answer = await person.visitor.post('/api/estimates', body).expect(422);
     expect((answer.body as { errors: object[] }).errors.length).toBeGreaterThan(0);
+  });
+
+  it('with samples is what the same process would have computed, band and all', async () => {
+    const sampled = input({ options: { samples: 2000, seed: 9 } });
+    const parsed = parseRoomInput(sampled);
+    if (!parsed.ok) throw new Error(JSON.stringify(parsed.errors));
+    const answer = await person.visitor.post('/api/estimates?workings=1', sampled).expect(200);
+    expect(answer.text).toBe(JSON.stringify(estimateRoom(parsed.value, { workings: true })));
+    expect(answer.body).toMatchObject({
+      load: { band: { p95: { method: 'uncertainty.monte-carlo@1' } } },
+      uncertainty: { samples: 2000, seed: 9 },
+    });
+    expect(answer.text).not.toMatch(/NaN|Infinity/);
+  });
+
+  it('with entries on the plan says which ignites which, as the same process would', async () => {
+    const [flats] = input().contents;
+    const placed = input({
+      contents: [1, 2].map((x_m) => ({
+        ...flats,
+        id: `at ${x_m}`,
+        x_m,
+        y_m: 1,
+        width_m: 0.5,
+        depth_m: 0.5,
+        height_m: 1,
+      })),
+    });
+    const parsed = parseRoomInput(placed);
+    if (!parsed.ok) throw new Error(JSON.stringify(parsed.errors));
+    const answer = await person.visitor.post('/api/estimates', placed).expect(200);
+    expect(answer.text).toBe(JSON.stringify(estimateRoom(parsed.value)));
   });
 
   it('asked for very often is held back, and another person is not', async () => {
