@@ -2,8 +2,10 @@ import type { Kind } from '../catalogue/catalogue-row.ts';
 import { kindByKey } from '../catalogue/kinds.ts';
 import type { RoomInputEntry } from '../tally/room-input.ts';
 import type { CountedPart } from '../tally/entry-heats.ts';
+import { mostlyFluid } from '../tally/mostly-fluid.ts';
 import type { IgnitionClass } from './ignition-class.ts';
 import { areaUnder } from './own-curve.ts';
+import { poolPeak } from './pool-peak.ts';
 import type { SpreadEntry } from './spread-entry.ts';
 import { measuredCurve } from './measured-curve.ts';
 import type { SpreadDefaultCode } from './spread-defaults.ts';
@@ -33,7 +35,7 @@ export interface EntryGiven {
   readonly note: (code: SpreadDefaultCode) => void;
 }
 
-export function peakOf({ entry, heat_MJ, note }: EntryGiven): number {
+export function peakOf({ entry, parts, heat_MJ, note }: EntryGiven): number {
   if (entry.peak_kW != null) return entry.peak_kW;
   const area = entry.width_m == null || entry.depth_m == null ? null : entry.width_m * entry.depth_m;
   if (area === null) {
@@ -44,6 +46,11 @@ export function peakOf({ entry, heat_MJ, note }: EntryGiven): number {
   if (kind?.peak_kW != null) {
     note('PEAK_FROM_KIND');
     return (kind.peak_kW / (kind.width_m * kind.depth_m)) * area;
+  }
+  const pool = mostlyFluid(parts) ? poolPeak(parts, area) : undefined;
+  if (pool !== undefined) {
+    note('PEAK_FROM_POOL');
+    return pool;
   }
   note('PEAK_FROM_FOOTPRINT');
   return USUAL_RATE_KW_M2 * area;
@@ -58,7 +65,7 @@ export function growthOf({ entry, heat_MJ, parts, roomAlpha_kW_s2, alphaOf, note
     if (fits) return { by: 'measured', points: measuredCurve(entry.curve) };
   }
   if (entry.growth != null) return { by: 't-squared', alpha_kW_s2: alphaOf(entry.growth) };
-  if (isFluid(parts)) {
+  if (mostlyFluid(parts)) {
     note('GROWTH_AT_ONCE');
     return { by: 'step' };
   }
@@ -119,15 +126,4 @@ export function enclosureOf({ entry, note }: EntryGiven): SpreadEntry['enclosure
 
 function kindOf({ kind }: RoomInputEntry): Kind | undefined {
   return kind == null ? undefined : kindByKey(kind);
-}
-
-/** Whether more than half of the heat is in liquids or gases, which burn at their peak from the start. */
-function isFluid(parts: readonly CountedPart[]): boolean {
-  let fluid = 0;
-  let all = 0;
-  for (const { part, counted } of parts) {
-    all += counted;
-    if (part.material?.hazards.some((hazard) => hazard === 'liquid' || hazard === 'gas')) fluid += counted;
-  }
-  return fluid > all / 2;
 }

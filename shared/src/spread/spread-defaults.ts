@@ -2,6 +2,8 @@
 export const SPREAD_DEFAULTS = {
   PEAK_FROM_KIND: 'No peak is given: the rate per area usual for the kind × the footprint.',
   PEAK_FROM_FOOTPRINT: 'No peak is given: 500 kW/m2 × the footprint (common practice).',
+  PEAK_FROM_POOL:
+    'Mostly liquid and no peak is given: a pool as large as its footprint (Babrauskas, from memory). What runs out burns over more.',
   PEAK_FROM_HEAT:
     'Neither peak nor footprint is given: the heat over 1200 s of free burning (Law & O’Brien, from memory).',
   CURVE_STRETCHED: 'The measured curve holds other heat than the entry: its rates are kept, its times stretched.',

@@ -1,6 +1,8 @@
-import type { Estimate } from '../methods/estimate.ts';
+import { hydrocarbonCurve } from '../methods/burnout/nominal-curves.ts';
+import { estimate, type Estimate, type EstimateWarning } from '../methods/estimate.ts';
 import { burnoutCase } from './burnout-case.ts';
 import type { BurnoutGiven } from './burnout-given.ts';
+import { cellulosicShare, LEAST_CELLULOSIC } from './cellulosic-share.ts';
 import { timeLimit } from './time-limit.ts';
 import { roomThermalInertia } from './room-linings.ts';
 import type { RoomTally } from './room-tally.ts';
@@ -9,8 +11,27 @@ import { noteMissing, type TallyContext } from './tally-context.ts';
 /** A fire behind a keyhole would last longer; by then every layer has long heated through. */
 const LONGEST_H = 1000;
 
-/** The section `burnout` of a tally: a fire that burns the room out, as kept first and then as designed. */
-export function burnoutSection(given: BurnoutGiven, context: TallyContext): RoomTally['burnout'] {
+type Burnout = RoomTally['burnout'];
+
+/**
+ * The section `burnout` of a tally: a fire that burns the room out, as kept first and then as designed, with every glass
+ * broken that would break; and the same before any breaks, because less air is not always better.
+ */
+export function burnoutSection(given: BurnoutGiven, context: TallyContext): Burnout {
+  const burnout = burnoutOf(given, context);
+  const { openings } = given;
+  const differs = openings.open.factor > 0 && openings.open.factor !== openings.afterGlass.factor;
+  const before = { ...openings, afterGlass: openings.open, outsideArea: openings.outsideAreaOpen };
+  const silent = { workings: context.workings, missing: [] };
+  const hydrocarbon = hydrocarbonOf(given, context);
+  return {
+    ...burnout,
+    ...(differs && burnout.asKept && { beforeGlass: burnoutOf({ ...given, openings: before }, silent) }),
+    ...(hydrocarbon && { hydrocarbon }),
+  };
+}
+
+function burnoutOf(given: BurnoutGiven, context: TallyContext): Omit<Burnout, 'beforeGlass' | 'hydrocarbon'> {
   const { areas, openings, linings, load } = given;
   const stage = openings.afterGlass;
   const why =
@@ -49,4 +70,33 @@ export function burnoutSection(given: BurnoutGiven, context: TallyContext): Room
     asKept: burnoutCase('asKept', load.asKept, thermalInertia, given, context),
     design: burnoutCase('design', load.design, inertia(load.design.value ?? 0), given, context),
   };
+}
+
+const VARIANT: EstimateWarning = {
+  code: 'VARIANT',
+  text: 'A variant beside the burn-out: a nominal curve, which knows neither the load nor the room.',
+};
+const AN_HOUR_MIN = 60;
+const DRAWN_PIECES = 60;
+
+/** The nominal curve for liquids and plastics, where they hold more than a fifth of the heat. */
+function hydrocarbonOf({ heats, input }: BurnoutGiven, { workings }: TallyContext): Burnout['hydrocarbon'] {
+  if (cellulosicShare(heats) >= LEAST_CELLULOSIC) return undefined;
+  const rating = input.room.rating_min ?? null;
+  const after_min = rating !== null && rating > 0 ? rating : AN_HOUR_MIN;
+  const temperature = estimate(
+    hydrocarbonCurve,
+    { t: after_min },
+    {
+      workings,
+      warnings: [VARIANT],
+      origins: { t: rating === after_min ? 'given' : { origin: 'default', note: 'the room has no rated time' } },
+    },
+  );
+  // Close together at first, where the curve is steep.
+  const curve = Array.from({ length: DRAWN_PIECES + 1 }, (_, k) => {
+    const t = after_min * (k / DRAWN_PIECES) ** 2;
+    return [t, hydrocarbonCurve.run({ t })] as const;
+  });
+  return { temperature, after_min, curve };
 }

@@ -6,7 +6,7 @@ import { estimate, type Estimate, type EstimateWarning } from '../methods/estima
 import { figure } from '../methods/figure.ts';
 import { rangeFaults } from '../methods/range-faults.ts';
 import type { BurnoutGiven } from './burnout-given.ts';
-import { cellulosicShare, LEAST_CELLULOSIC } from './cellulosic-share.ts';
+import { cellulosicShare, LEAST_CELLULOSIC, NOT_CELLULOSIC } from './cellulosic-share.ts';
 import { noteMissing, type TallyContext } from './tally-context.ts';
 
 const ALPHA_V = { least: 0.025, most: 0.25 } as const;
@@ -107,11 +107,6 @@ function situation({ areas, heats }: BurnoutGiven, alpha: number): EstimateWarni
       text: `The room (floor ${figure(areas.floor)} m2, height ${figure(areas.height)} m) is larger than those behind the method: 500 m2, 4 m.`,
     });
   }
-  if (cellulosicShare(heats) < LEAST_CELLULOSIC) {
-    warnings.push({
-      code: 'NOT_CELLULOSIC',
-      text: 'More than a fifth of the heat is in liquids or plastics, which burn hotter and sooner than the method assumes.',
-    });
-  }
+  if (cellulosicShare(heats) < LEAST_CELLULOSIC) warnings.push(NOT_CELLULOSIC);
   return warnings;
 }

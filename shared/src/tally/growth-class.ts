@@ -1,6 +1,7 @@
 import { useByKey } from '../catalogue/uses.ts';
 import type { EstimateWarning } from '../methods/estimate.ts';
 import type { EntryHeat } from './entry-heats.ts';
+import { mostlyFluid } from './mostly-fluid.ts';
 import type { RoomInput } from './room-input.ts';
 
 export type GrowthClass = 'slow' | 'medium' | 'fast' | 'ultra-fast';
@@ -8,6 +9,11 @@ export type GrowthClass = 'slow' | 'medium' | 'fast' | 'ultra-fast';
 const FASTEST_FIRST: readonly GrowthClass[] = ['ultra-fast', 'fast', 'medium', 'slow'];
 /** An entry with less of the load than this does not set the pace of the room. */
 const LEAST_SHARE = 0.05;
+
+const BURNS_AT_ONCE: EstimateWarning = {
+  code: 'BURNS_AT_ONCE',
+  text: 'Liquids or gases hold at least 5 % of the load. They burn at their peak from the start; ultra-fast is the nearest class.',
+};
 
 export interface ChosenGrowth {
   readonly growth: GrowthClass;
@@ -24,12 +30,12 @@ export function growthClass(input: RoomInput, heats: readonly EntryHeat[]): Chos
   const paces = new Set(
     heats
       .filter(({ counted, entry }) => entry.curve == null && counted > 0 && counted >= LEAST_SHARE * total)
-      .map(({ entry }) => entry.growth ?? null),
+      .map(({ entry, parts }) => entry.growth ?? (mostlyFluid(parts) ? 'at once' : null)),
   );
-  const fastest = FASTEST_FIRST.find((pace) => paces.has(pace));
+  const fastest = paces.has('at once') ? 'ultra-fast' : FASTEST_FIRST.find((pace) => paces.has(pace));
   if (fastest !== undefined) {
     const why = 'the fastest class among entries with at least 5 % of the load';
-    return { growth: fastest, origin: 'computed', why, warnings: [] };
+    return { growth: fastest, origin: 'computed', why, warnings: paces.has('at once') ? [BURNS_AT_ONCE] : [] };
   }
   const use = input.room.use == null ? undefined : useByKey(input.room.use);
   if (use) return { growth: use.growth, origin: 'catalogue', why: `usual for the use “${use.label}”`, warnings: [] };

@@ -28,6 +28,8 @@ export interface RoomOpenings {
   readonly glassAssumedBroken: boolean;
   /** Open or breaking, leading outside, m². */
   readonly outsideArea: number;
+  /** Of these, open from the start, m². */
+  readonly outsideAreaOpen: number;
   /** Roof vents that are not closed, m². */
   readonly roofVents: number;
 }
@@ -57,9 +59,14 @@ export function roomOpenings(room: RoomInputRoom, areas: RoomAreas, context: Tal
     afterGlass: after,
     used: glassAssumedBroken ? stage(counted, areas, roofVents, context, [GLASS_ASSUMED_BROKEN]) : before,
     glassAssumedBroken,
-    outsideArea: areaOf(counted.filter((opening) => opening.leads_to !== 'inside')),
+    outsideArea: areaOf(counted.filter(leadsOutside)),
+    outsideAreaOpen: areaOf(open.filter(leadsOutside)),
     roofVents,
   };
+}
+
+function leadsOutside({ leads_to }: RoomInputOpening): boolean {
+  return leads_to !== 'inside';
 }
 
 function stateOf({ state, kind }: RoomInputOpening): 'open' | 'fails' | 'closed' {

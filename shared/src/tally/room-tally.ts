@@ -61,6 +61,22 @@ export interface RoomTally {
     readonly openingFactor?: Estimate;
     readonly asKept?: BurnoutCase;
     readonly design?: BurnoutCase;
+    /** The same before any glass breaks, where that makes a difference: less air makes it longer and cooler. */
+    readonly beforeGlass?: {
+      readonly thermalInertia?: Estimate;
+      readonly openingFactor?: Estimate;
+      readonly asKept?: BurnoutCase;
+      readonly design?: BurnoutCase;
+    };
+    /** Variant for rooms with more than a fifth of the heat in liquids and plastics: gas temperature by a nominal curve. */
+    readonly hydrocarbon?: {
+      /** °C after the room's rated time, or after an hour. */
+      readonly temperature: Estimate;
+      /** min */
+      readonly after_min: number;
+      /** `[[min, °C], …]` */
+      readonly curve: readonly (readonly [number, number])[];
+    };
   };
   /** On the design curve of the room. */
   readonly response: {
