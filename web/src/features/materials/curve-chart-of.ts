@@ -6,7 +6,11 @@ import type { UnitSystem } from '@embertally/shared/units/unit-system';
 import type { CurveChart } from '../../components/chart/curve-chart.ts';
 
 /** A measured curve as a chart, with its peak and what it released in words. */
-export function curveChartOf(curve: DerivedCurve, name: string, units: UnitSystem): CurveChart {
+export function curveChartOf(
+  curve: Pick<DerivedCurve, 'per' | 'points' | 'heat_MJ' | 'peak' | 'peak_s'>,
+  name: string,
+  units: UnitSystem,
+): CurveChart {
   const rate = curve.per === 'piece' ? 'kW' : 'kW/m2';
   const shown = displayUnit(rate, units);
   const say = (value: number, unit: string): string => {

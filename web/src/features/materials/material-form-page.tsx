@@ -4,6 +4,7 @@ import { ErrorSummary } from '../../components/error-summary.tsx';
 import { Page } from '../../components/page.tsx';
 import { Part } from '../../components/part.tsx';
 import type { TrailStep } from '../../components/trail.tsx';
+import { CurveReader } from './curve/curve-reader.tsx';
 import { EvidenceField } from './evidence-field.tsx';
 import { MaterialSections } from './form/material-sections.tsx';
 import type { MaterialForm } from './form/use-material-form.ts';
@@ -29,6 +30,9 @@ export function MaterialFormPage({ title, lead, trail, material, next, verb }: M
       <form noValidate onSubmit={form.onSubmit} className="grid grid-cols-[minmax(0,1fr)] gap-6">
         <ErrorSummary {...form.summary} />
         <MaterialSections material={material} sections={sections.slice(0, -1)} />
+        <Part title="A measured curve">
+          <CurveReader material={material} />
+        </Part>
         <MaterialSections material={material} sections={sections.slice(-1)} />
         <Part title="Evidence">
           <EvidenceField material={material} />
