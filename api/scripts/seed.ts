@@ -9,6 +9,7 @@ import { PersonRepository } from '../src/repositories/person-repository.ts';
 import type { Services } from '../src/services/services.ts';
 import { demoChanges } from './demo/demo-changes.ts';
 import { DEMO_LIMITS } from './demo/demo-limits.ts';
+import { makeDemoMaterials } from './demo/make-demo-materials.ts';
 import { DEMO_BUILDING, DEMO_PEOPLE, DEMO_SITE, type DemoPerson } from './demo/demo-people.ts';
 
 const TRAIL: Trail = { requestId: 'demo-book', ip: '127.0.0.1' };
@@ -126,6 +127,7 @@ async function fill(services: Services, demo: DemoFile): Promise<void> {
     const input = { id: id(`limit ${room} ${limit.quantity}`), room_id: id(`room ${room}`), ...limit };
     await services.limits.create(as(role), await access(role), buildingId, input, TRAIL);
   }
+  await makeDemoMaterials({ services, as, idOf: id, trail: TRAIL });
 }
 
 /**
