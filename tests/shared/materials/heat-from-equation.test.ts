@@ -41,7 +41,7 @@ describe('a material from a thermochemical equation', () => {
     expect(material.basis?.finding).toBe('wrong-mole-basis');
     expect(material.basis?.proposal?.factor).toBe(0.5);
     expect(material.basis?.proposal?.net_MJ_kg).toBeCloseTo(44.42, 1);
-    expect(material.basis?.proposal?.text).toBe('Use 44.4 MJ/kg instead');
+    expect(material.basis?.proposal?.text).toBe('Multiplied by 0.5 it would be 44.4 MJ/kg.');
     expect(material.basis?.accepted).toBeNull();
   });
 
