@@ -1,5 +1,5 @@
 import { ExposedEntries, type ExposureRules, type Lighting } from './exposed-entries.ts';
-import { ownCurve } from './own-curve.ts';
+import { areaUnder, ownCurve } from './own-curve.ts';
 import { PieceClock } from './piece-clock.ts';
 import { RoomClock, type ClockStop } from './room-clock.ts';
 import type { SpreadScene } from './spread-scene.ts';
@@ -10,6 +10,10 @@ export const OPENINGS_KW = 1500;
 export const LONGEST_S = 4 * 3600;
 /** A growth phase is drawn in at least this many pieces, which makes its area at most 0.03 % too large. */
 const GROWTH_PIECES = 40;
+/** A fire cut short while it grew has but few of these pieces: it is followed again in finer ones until its area is right. */
+const MOST_AREA_ERROR = 0.00035;
+const FINER = 8;
+const FINEST = 64;
 const KJ_PER_MJ = 1000;
 /** With nothing left to light only the curve is followed, which is exact for any step, s. */
 const IDLE_STEP_S = 20;
@@ -79,7 +83,14 @@ export interface RunRules extends ExposureRules {
  * @param flashoverBy_s a fire without flashover by then is followed no further: for who looks for an earlier one
  */
 export function runSpread(scene: SpreadScene, first: number, rules: RunRules, flashoverBy_s = Infinity): SpreadRun {
-  return new Run(scene, first, rules, flashoverBy_s).result();
+  let longestPiece_s = Infinity;
+  for (let finer = 1; ; finer *= FINER) {
+    const run = new Run(scene, first, rules, flashoverBy_s, longestPiece_s);
+    const result = run.result();
+    const cutShort = result.stopped === 'starved' || result.stopped === 'four-hours';
+    if (!cutShort || finer > FINEST || run.isDrawnWell) return result;
+    longestPiece_s = run.burning_s / GROWTH_PIECES / finer;
+  }
 }
 
 class Run {
@@ -89,13 +100,14 @@ class Run {
   private readonly events: SpreadEvent[] = [];
   private readonly lit: (SpreadEvent | undefined)[];
   private flashover_s: number | null = null;
-  private longestPiece = Infinity;
+  private longestPiece: number;
 
   constructor(
     private readonly scene: SpreadScene,
     private readonly first: number,
     private readonly rules: RunRules,
     private readonly flashoverBy_s: number,
+    private readonly longestAllowed_s: number,
   ) {
     const { factorBefore, factorAfter, flashover_kW, oxygenLimitedHeat_MJ } = scene.room;
     const closed = factorBefore === 0 && factorAfter === 0;
@@ -105,6 +117,7 @@ class Run {
       heat_kJ: closed && oxygenLimitedHeat_MJ !== null ? oxygenLimitedHeat_MJ * KJ_PER_MJ : Infinity,
       time_s: LONGEST_S,
     });
+    this.longestPiece = longestAllowed_s;
     this.pieces = new PieceClock(scene.entries.length);
     this.exposed = new ExposedEntries(scene, rules);
     this.lit = new Array<SpreadEvent | undefined>(scene.entries.length).fill(undefined);
@@ -137,6 +150,17 @@ class Run {
       atCap_s: room.atCap_s,
       layerIncluded: scene.layer !== undefined,
     };
+  }
+
+  /** Burning time so far, s. */
+  get burning_s(): number {
+    return this.room.T;
+  }
+
+  /** Whether the drawn curve has the area of the heat released. */
+  get isDrawnWell(): boolean {
+    const { points, heat } = this.room;
+    return Math.abs(areaUnder(points) - heat) <= MOST_AREA_ERROR * heat;
   }
 
   private burn(): SpreadRun['stopped'] {
@@ -176,7 +200,7 @@ class Run {
       if (stop !== undefined) return stop;
       pieces.take();
       room.follow(pieces.total);
-      this.longestPiece = pieces.shortestCurved / GROWTH_PIECES;
+      this.longestPiece = Math.min(this.longestAllowed_s, pieces.shortestCurved / GROWTH_PIECES);
       if (mayEnd && pieces.burning === 0) return undefined;
     }
     return this.runSmoothly(T);

@@ -204,6 +204,31 @@ describe('the section on its own', () => {
   });
 });
 
+describe('a fire that is cut short while it grows', () => {
+  it.each([
+    ['starved early, peak given', 2, { mass_kg: 14_178, net_heat_MJ_kg: 0.000_696_312 }, { peak_kW: 145.124_7 }],
+    [
+      'starved early, peak from the footprint',
+      0.4,
+      { mass_kg: 2784, net_heat_MJ_kg: 0.000_553_645 },
+      { width_m: 0.4727 },
+    ],
+    ['starved at once', 0.4, { mass_kg: 1e5, net_heat_MJ_kg: 100 }, { peak_kW: 1e6, growth: 'slow' }],
+  ])('%s: the curve still holds what is released', (_name, height_m, part, more) => {
+    const [w, d] = [0.5, 0.5];
+    const ring_m = [
+      [0, 0],
+      [w, 0],
+      [w, d],
+      [0, d],
+    ];
+    const one = { id: 'a', count: 1, parts: [part], x_m: 0, y_m: 0, depth_m: 0.178, ...more };
+    const { spread } = estimateRoom(parsed({ name: 'Closet', ring_m, height_m }, [one]));
+    expect(spread?.events?.at(-1)?.cause).toBe('starved');
+    expect(Math.abs(area(spread?.curve) / (spread?.heatReleased?.value ?? NaN) - 1)).toBeLessThan(1e-3);
+  });
+});
+
 const number = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 const contents = fc.array(
   fc.record({
