@@ -15,6 +15,7 @@ import { spreadGaps } from '@embertally/shared/spread/spread-gaps';
 import type { SpreadEntry } from '@embertally/shared/spread/spread-entry';
 import type { SpreadRoom } from '@embertally/shared/spread/spread-room';
 import { areaOf, HALL, spreadCase, spreadEntry } from '../support/spread-samples.ts';
+import { RECOMPUTED_SPREAD_ROWS } from './rows/recomputed-spread-rows.ts';
 import { GAP_ROWS, SPREAD_ROWS, type SpreadRow, type SpreadRowRoom } from './rows/spread-rows.ts';
 
 const ROW_RADIATIVE_FRACTION = 0.35;
@@ -78,7 +79,11 @@ function rowById(id: string): SpreadRow {
 }
 
 describe('spread of fire against the outside world', () => {
-  it.each(SPREAD_ROWS.map((row) => [`${row.id} (${row.origin}: ${row.source})`, row] as const))('%s', (_title, row) => {
+  it.each(
+    [...SPREAD_ROWS, ...RECOMPUTED_SPREAD_ROWS].map(
+      (row) => [`${row.id} (${row.origin}: ${row.source})`, row] as const,
+    ),
+  )('%s', (_title, row) => {
     const { expected, tolerance_s = 1, doseTolerance = 0 } = row;
     const result = run(row);
     const exposure = new Map(result.exposures.map((one) => [one.id, one]));

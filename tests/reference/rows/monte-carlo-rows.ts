@@ -45,6 +45,18 @@ export const MONTE_CARLO_ROWS: readonly MonteCarloRow[] = [
     source: 'two million samples drawn with numpy',
   },
   {
+    id: 'recomputed-exact-moments',
+    method: 'uncertainty.monte-carlo',
+    items: [
+      { mass: triangular(60, 90, 130), heat: normal(17, 1.1) },
+      { mass: triangular(20, 45, 60), heat: normal(24, 2.4) },
+    ],
+    expected: { mean: 2586.6667, deviation: 346.1022 },
+    tolerance: { rel: 0.005 },
+    origin: 'independent',
+    source: 'second reader, exact variance of products of independent inputs',
+  },
+  {
     id: 'jcgm-101-four-normal',
     method: 'uncertainty.monte-carlo',
     // Masses about 10 kg of 1 MJ/kg: each deviates as the inputs of the example do.

@@ -1,0 +1,142 @@
+import { squareFire } from '../square-fire.ts';
+import { recomputed, type Recomputed } from '../recomputed.ts';
+import type { ReferenceRow } from '../reference-row.ts';
+
+/** Id, method, inputs, output, value. */
+const VALUES: readonly Recomputed[] = [
+  ['three-openings', 'room.openings-2002', { A: [1.54, 1.8, 1.8], h: [1.1, 2.0, 0.6] }, 'factor', 5.723841367473421],
+  ['opening-factor', 'room.opening-factor', { F: 5.723841367473421, A_t: 148 }, 'value', 0.03867460383427987],
+  [
+    'thomas',
+    'room.flashover-thomas',
+    { A_T: 2 * 5.2 * 4.1 + 2 * 9.3 * 2.7 - 1.1 * 2.1, F: 1.1 * 2.1 ** 1.5, A_f: 21.32 },
+    'value',
+    1971.6480347237698,
+  ],
+  ['babrauskas', 'room.flashover-babrauskas', { F: 1.1 * 2.1 ** 1.5, A_T_per_F: 27 }, 'value', 2510.631021277321],
+  [
+    'lining-heated-through',
+    'room.lining-heat-transfer',
+    { t: 400, k: [0.17], rho: [960], c: [1100], d: [0.0125] },
+    'h_k',
+    0.0136,
+  ],
+  [
+    'lining-thick',
+    'room.lining-heat-transfer',
+    { t: 200, k: [0.17], rho: [960], c: [1100], d: [0.0125] },
+    'h_k',
+    0.02995997329771841,
+  ],
+  [
+    'mqh',
+    'room.flashover-mqh',
+    { h_k: 0.0136, A_T: 2 * 5.2 * 4.1 + 2 * 9.3 * 2.7 - 1.1 * 2.1, F: 1.1 * 2.1 ** 1.5, A_f: 21.32, H: 2.7 },
+    'value',
+    1238.523724601045,
+  ],
+  ['kawagoe', 'room.kawagoe', { F: 4.2 * Math.sqrt(1.6) }, 'rate', 0.47813638221745897],
+  [
+    'hot-layer-at-a-wall',
+    'room.hot-layer-mqh',
+    { Q: 750, h_k: 0.0136, A_T: 2 * 5.2 * 4.1 + 2 * 9.3 * 2.7 - 1.1 * 2.1, F: 1.1 * 2.1 ** 1.5, position: 'wall' },
+    'value',
+    458.4497806791273,
+  ],
+  [
+    'fpa',
+    'temperature.forced-fpa',
+    { Q: 350, m: 0.24, T_0: 293, c_p: 1, h_k: 0.018, A_T: 88 },
+    'value',
+    297.1697262897566,
+  ],
+  [
+    'deal-beyler',
+    'temperature.forced-deal-beyler',
+    { Q: 420, m: 0.7, c_p: 1, h_k: (0.4 * Math.sqrt((0.48 * 1440 * 840) / 420)) / 1000, A_T: 95 },
+    'value',
+    198.78228577707526,
+  ],
+  [
+    'closed-room',
+    'temperature.closed-room',
+    { Q: 160, t: 210, k: 0.48, rho: 1440, c: 840, A_T: 112, m: 84 * 1.2, c_p: 1 },
+    'rise',
+    61.002236338117115,
+  ],
+  ['standard-curve', 'burnout.standard-curve', { t: 37 }, 'value', 873.1009750144383],
+  ['external-curve', 'burnout.external-curve', { t: 8 }, 'value', 644.948484588186],
+  ['hydrocarbon-curve', 'burnout.hydrocarbon-curve', { t: 12 }, 'value', 1052.6869468062587],
+  [
+    'parametric-ventilation',
+    'burnout.parametric-2002',
+    { O: 0.055, b: 1250, q_td: 180, t_lim: 20 / 60 },
+    'peak',
+    953.9483153888427,
+  ],
+  ['parametric-fuel', 'burnout.parametric-2002', { O: 0.09, b: 900, q_td: 65, t_lim: 0.25 }, 'peak', 701.8727135262178],
+  [
+    'two-layers',
+    'burnout.thermal-inertia-2002',
+    { t_max: 0.75, s: [0.015, 0.12], rho: [1400, 90], c: [900, 1000], lambda: [0.55, 0.04] },
+    'b',
+    397.514782664305,
+  ],
+  [
+    'roof-openings',
+    'burnout.ventilation-weight-2002',
+    { H: 3.4, alpha_v: 0.12, alpha_h: 0.04 },
+    'w_f',
+    1.0486153081169973,
+  ],
+  [
+    'equivalent-time',
+    'burnout.equivalent-time-2002',
+    { q_fd: 520, k_b: 0.055, w_f: (6 / 3.4) ** 0.3 * (0.62 + 90 * 0.28 ** 4), k_c: 1 },
+    'value',
+    39.78654558249234,
+  ],
+  ['jcss', 'burnout.equivalent-time-jcss', { q_0: 450, A_f: 60, A_t: 230, f: 0.045 }, 'value', 2213.5516628448445],
+  [
+    'law',
+    'burnout.equivalent-time-law',
+    { A_f: 60, q_f: 450, H_c: 17, A_v: 7.5, A_t: 230 },
+    'value',
+    38.87936860418076,
+  ],
+  ['pettersson', 'burnout.equivalent-time-pettersson', { q_t: 120, O: 0.045 }, 'value', 37.90092347159895],
+  ['flame-height', 'plume.flame-height', { Q: 1800, D: 1.4, ratio: 14.3 }, 'value', 3.2836916868057964],
+  [
+    'plume-rise',
+    'plume.temperature',
+    { Q_c: 1170, z: 6, z_0: 0.2361294, T_0: 293, rho_0: 1.2 },
+    'value',
+    149.8259260059,
+  ],
+  ['plume-flow', 'plume.mass-flow', { Q_c: 1170, z: 6, z_0: 0.2361294, L: 3.2836916868 }, 'value', 16.108978097932855],
+  ['jet-rise', 'plume.ceiling-jet', { Q: 900, H: 3.5, r: 2.2, place: 'free' }, 'rise', 84.7085895231716],
+  ['jet-velocity', 'plume.ceiling-jet', { Q: 900, H: 3.5, r: 0.5, place: 'free' }, 'velocity', 6.104677437782359],
+  [
+    'detector-steady',
+    'plume.detector-steady',
+    {
+      RTI: 52.44,
+      rise: 84.7085895231716,
+      u: (0.195 * 900 ** (1 / 3) * Math.sqrt(3.5)) / 2.2 ** (5 / 6),
+      T_a: 22,
+      T_act: 72,
+    },
+    'time',
+    34.62640968919878,
+  ],
+  [
+    'detector-growing',
+    'plume.detector-response',
+    { ...squareFire(1000 / 150 ** 2, 400), H: 4.5, r: 2.5, place: 'free', RTI: 80, T_a: 20, T_act: 74 },
+    'time',
+    183.04349779193075,
+  ],
+];
+
+/** Openings, flashover, gas temperatures, burn-out, plumes and detectors, worked out by somebody who had the published relations and not the code. */
+export const RECOMPUTED_ROOM_ROWS: readonly ReferenceRow[] = VALUES.map(recomputed);
