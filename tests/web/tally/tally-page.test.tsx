@@ -14,6 +14,7 @@ describe('the tally of a room', () => {
     expect(headings()).toEqual([
       'Dock',
       'What it is made of',
+      'How sure',
       'How fast it could come out',
       'When it would be noticed',
       'What the room does',

@@ -10,10 +10,18 @@ const say = (message: CalculationMessage): void => {
   postMessage(message);
 };
 
+/** Each word of progress draws the page anew. */
+const PROGRESS_EVERY_ms = 100;
+
 function calculate({ kind, input }: CalculationTask): CalculationValue[CalculationTask['kind']] {
   switch (kind) {
     case 'uncertainty': {
-      const onSampled = (fraction: number) => say({ kind: 'progress', fraction });
+      let said = 0;
+      const onSampled = (fraction: number) => {
+        if (performance.now() - said < PROGRESS_EVERY_ms) return;
+        said = performance.now();
+        say({ kind: 'progress', fraction });
+      };
       const tally = estimateRoom(input, { workings: true, spread: false, onSampled });
       return { uncertainty: tally.uncertainty, band: tally.load.band, missing: tally.missing };
     }

@@ -3,6 +3,7 @@ import type { Entry, Room } from '@embertally/shared/survey/survey-document';
 import type { RoomTally } from '@embertally/shared/tally/room-tally';
 import { lazy, memo, type ReactNode, Suspense, useDeferredValue, useMemo } from 'react';
 import type { TablePart } from '../panels/tables-context.ts';
+import type { Calculation } from '../session/use-calculation.ts';
 import { HowFast } from './how-fast.tsx';
 import { MadeOf } from './made-of.tsx';
 import { MissingList } from './missing-list.tsx';
@@ -13,6 +14,7 @@ import { TallyCautions } from './tally-cautions.tsx';
 import { TallyHeadline } from './tally-headline.tsx';
 import { WhatTheRoomDoes } from './what-the-room-does.tsx';
 
+const HowSure = lazy(async () => ({ default: (await import('./uncertainty/how-sure.tsx')).HowSure }));
 const SpreadPart = lazy(async () => ({ default: (await import('./spread/spread-part.tsx')).SpreadPart }));
 
 const HowFastKept = memo(HowFast);
@@ -26,6 +28,8 @@ const NAMED_BY_THEIR_SECTION: readonly string[] = ['response', 'spread', 'air'];
 
 interface TallyArgumentProps {
   readonly tally: RoomTally;
+  /** How sure it is; the band of the tally is the sampled one once this is ready. */
+  readonly sure: Calculation<'uncertainty'>;
   readonly room: Room;
   readonly entries: ReadonlyMap<string, Entry>;
   /** Of this room. */
@@ -38,7 +42,7 @@ interface TallyArgumentProps {
 
 /** The results of one room, read from top to bottom as an argument. */
 export function TallyArgument(props: TallyArgumentProps) {
-  const { tally, room, entries, limits, contentsAction, onGive, onPickEntry } = props;
+  const { tally, sure, room, entries, limits, contentsAction, onGive, onPickEntry } = props;
   // The density and the ledger move with the very change; curves and tables below them follow without holding it up.
   const later = useDeferredValue(tally);
   const missing = useMemo(
@@ -54,6 +58,9 @@ export function TallyArgument(props: TallyArgumentProps) {
         action={contentsAction}
         {...(onPickEntry === undefined ? {} : { onPick: onPickEntry })}
       />
+      <Suspense fallback={null}>
+        <HowSure sure={sure} name={room.name} onPick={onPickEntry} />
+      </Suspense>
       <HowFastKept tally={later} />
       <ResponsePartKept tally={later} onGive={onGive} />
       <WhatTheRoomDoesKept tally={later} rating_min={room.rating_min} />

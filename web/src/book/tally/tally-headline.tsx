@@ -58,7 +58,8 @@ export function TallyHeadline({ tally, limits }: TallyHeadlineProps) {
             />
             <p className="text-small text-soft">
               Nine times in ten between <Figure path="load.band.p5" estimate={band.p5} unit="bare" /> and{' '}
-              <Figure path="load.band.p95" estimate={band.p95} />, going by how each entry is known.
+              <Figure path="load.band.p95" estimate={band.p95} />, going by how each entry is known
+              {tally.uncertainty === undefined ? ', to first order' : ', from samples'}.
             </p>
           </div>
         )}

@@ -9,8 +9,10 @@ import { useOpenTables } from '../panels/tables-context.ts';
 import { useBook } from '../session/use-book.ts';
 import { useBookSession } from '../session/use-book-session.ts';
 import { useRoomTally } from '../session/use-room-tally.ts';
+import { useRoomUncertainty } from '../session/use-room-uncertainty.ts';
 import { roomLine } from './room-line.ts';
 import { TallyArgument } from './tally-argument.tsx';
+import { withSamples } from './with-samples.ts';
 import { type WorkingAsked, WorkingContext } from './working-context.ts';
 import './tally.css';
 
@@ -26,7 +28,9 @@ export function TallyPage() {
   const roomId = useBook((state) => state.roomInHand);
   const surveyId = useBook((state) => state.survey.id);
   const canEdit = useBook((state) => state.canEdit);
-  const tally = useRoomTally(roomId);
+  const quick = useRoomTally(roomId);
+  const sure = useRoomUncertainty(roomId);
+  const tally = useMemo(() => (quick === null ? null : withSamples(quick, sure.value)), [quick, sure.value]);
   const [asked, setAsked] = useState<WorkingAsked | null>(null);
   const limits = useMemo(() => allLimits.filter((limit) => limit.room_id === roomId), [allLimits, roomId]);
   const room = roomId === null ? undefined : document.rooms.get(roomId);
@@ -98,6 +102,7 @@ export function TallyPage() {
           <TallyArgument
             key={room.id}
             tally={tally}
+            sure={sure}
             room={room}
             entries={document.entries}
             limits={limits}

@@ -1,19 +1,18 @@
 import { lazy, Suspense, useId, useRef, useState } from 'react';
-import { Button } from '../button.tsx';
+import { canPaint } from './can-paint.ts';
+import { ChartKeys } from './chart-keys.tsx';
 import type { CurveChart } from './curve-chart.ts';
 import { curveCsv } from './curve-csv.ts';
 import { CurveTable } from './curve-table.tsx';
 import { readCurve } from './read-curve.ts';
 import { saveFile } from './save-file.ts';
+import { savePicture } from './save-picture.ts';
 import './chart.css';
 
 const CurveCanvas = lazy(() => import('./curve-canvas.tsx').then((module) => ({ default: module.CurveCanvas })));
 
 const STEPS = 200;
 const figure = (value: number): string => value.toLocaleString('en-GB', { maximumSignificantDigits: 3 });
-
-/** Whether this browser can paint at all; where it cannot, the table stands in the picture's place. */
-const canPaint = (): boolean => typeof Path2D !== 'undefined';
 
 interface ChartFigureProps {
   readonly chart: CurveChart;
@@ -33,12 +32,6 @@ export function ChartFigure({ chart, playedAt = null }: ChartFigureProps) {
   const last = Math.max(0, ...chart.series.map((series) => series.points.at(-1)?.[0] ?? 0));
   const readAt = playedAt ?? (step === null ? null : (step / STEPS) * last);
 
-  const savePicture = (): void => {
-    const address = picture.current();
-    if (address === null) return;
-    const bytes = Uint8Array.from(atob(address.slice(address.indexOf(',') + 1)), (char) => char.charCodeAt(0));
-    saveFile(`${chart.fileName}.png`, new Blob([bytes], { type: 'image/png' }));
-  };
   const saveNumbers = (): void => {
     saveFile(`${chart.fileName}.csv`, new Blob([curveCsv(chart)], { type: 'text/csv;charset=utf-8' }));
   };
@@ -86,26 +79,14 @@ export function ChartFigure({ chart, playedAt = null }: ChartFigureProps) {
           {readAt === null || asTable ? '' : readingText(chart, readAt)}
         </output>
       </div>
-      <div className="flex flex-wrap gap-x-4 text-small print:hidden">
-        <Button
-          look="quiet"
-          className="text-small"
-          aria-pressed={asTable}
-          onClick={() => {
-            setAsTable(!asTable);
-          }}
-        >
-          {asTable ? 'Show as chart' : 'Show as table'}
-        </Button>
-        {!asTable && (
-          <Button look="quiet" className="text-small" onClick={savePicture}>
-            Save picture
-          </Button>
-        )}
-        <Button look="quiet" className="text-small" onClick={saveNumbers}>
-          Save numbers (CSV)
-        </Button>
-      </div>
+      <ChartKeys
+        asTable={asTable}
+        onTable={setAsTable}
+        onPicture={() => {
+          savePicture(chart.fileName, picture.current());
+        }}
+        onNumbers={saveNumbers}
+      />
     </figure>
   );
 }
