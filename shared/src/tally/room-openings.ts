@@ -1,6 +1,7 @@
 import { estimate, estimateOutputs, type Estimate, type EstimateWarning } from '../methods/estimate.ts';
 import { openingFactor } from '../methods/room/opening-factor.ts';
 import { openings as openingsMethod } from '../methods/room/openings.ts';
+import { openingState } from './opening-state.ts';
 import type { RoomAreas } from './room-areas.ts';
 import type { RoomInputOpening, RoomInputRoom } from './room-input.ts';
 import type { TallyContext } from './tally-context.ts';
@@ -43,13 +44,11 @@ const NO_OPENING: EstimateWarning = {
   text: 'The room has no opening that is open or would break.',
 };
 
-const USUAL_STATE = { door: 'closed', window: 'fails', vent: 'open', shutter: 'closed', gap: 'open' } as const;
-
 /** The openings of a room before and after the glass breaks. Nothing said about an opening: open, leading outside. */
 export function roomOpenings(room: RoomInputRoom, areas: RoomAreas, context: TallyContext): RoomOpenings {
   const all = room.openings ?? [];
-  const open = all.filter((opening) => stateOf(opening) === 'open');
-  const counted = all.filter((opening) => stateOf(opening) !== 'closed');
+  const open = all.filter((opening) => openingState(opening) === 'open');
+  const counted = all.filter((opening) => openingState(opening) !== 'closed');
   const roofVents = (room.roof_vents_state ?? 'fails') === 'closed' ? 0 : (room.roof_vents_m2 ?? 0);
   const glassAssumedBroken = open.length === 0 && counted.length > 0;
   const before = stage(open, areas, roofVents, context);
@@ -67,10 +66,6 @@ export function roomOpenings(room: RoomInputRoom, areas: RoomAreas, context: Tal
 
 function leadsOutside({ leads_to }: RoomInputOpening): boolean {
   return leads_to !== 'inside';
-}
-
-function stateOf({ state, kind }: RoomInputOpening): 'open' | 'fails' | 'closed' {
-  return state ?? (kind == null ? 'open' : USUAL_STATE[kind]);
 }
 
 function areaOf(openings: readonly RoomInputOpening[]): number {
