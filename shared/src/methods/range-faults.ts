@@ -7,9 +7,13 @@ export interface RangeFault {
   readonly text: string;
 }
 
+/** A bound this small only keeps out nothing at all, so that is what is said. */
+const LEAST = 1e-6;
+
 /** The range of an input as words: `0.02 to 0.2`, `0 or more`. */
 export function rangeText([min, max]: readonly [number, number]): string {
   if (min === -Infinity && max === Infinity) return 'any';
+  if (min > 0 && min <= LEAST) return max === Infinity ? 'more than 0' : `more than 0, up to ${figure(max)}`;
   if (max === Infinity) return `${figure(min)} or more`;
   if (min === -Infinity) return `${figure(max)} or less`;
   return `${figure(min)} to ${figure(max)}`;
