@@ -1,6 +1,7 @@
-import { figure } from '../methods/figure.ts';
+import { formatNumber } from '../units/format-number.ts';
 import type { CalorimeterChoices } from './calorimeter-choices.ts';
 import type { CalorimeterNote } from './calorimeter-reading.ts';
+import { curveBasis } from './curve-basis.ts';
 import type { Curve } from './curve.ts';
 import { curveTotals } from './curve-totals.ts';
 
@@ -13,19 +14,21 @@ interface BelowZero {
 }
 
 /** Readings below 0: said, explained, and set to 0 only where the person decided so. */
-export function belowZero(curve: Curve, { negatives }: CalorimeterChoices, notes: CalorimeterNote[]): BelowZero {
+export function belowZero(curve: Curve, choices: CalorimeterChoices, notes: CalorimeterNote[]): BelowZero {
   const below = curve.rate.filter((q) => q < 0);
   if (below.length === 0) return { curve, undecided: false };
+  const { negatives } = choices;
+  const { heatUnit, rateUnit } = curveBasis(choices);
   const { heat_MJ, peak } = curveTotals(curve);
   const raised = { time_s: curve.time_s, rate: curve.rate.map((q) => Math.max(0, q)) };
   const added = curveTotals(raised).heat_MJ - heat_MJ;
   const lowest = below.reduce((least, q) => Math.min(least, q), 0);
   const noise = -lowest <= NOISE * peak;
-  const what = `${below.length} ${below.length === 1 ? 'reading is' : 'readings are'} below 0, the lowest ${figure(lowest)}`;
+  const what = `${below.length} ${below.length === 1 ? 'reading is' : 'readings are'} below 0, the lowest ${formatNumber(lowest, 3)} ${rateUnit}`;
   const why = noise
-    ? `, ${figure((-100 * lowest) / peak)} % of the peak: the analyser’s noise around 0.`
+    ? `, ${formatNumber((-100 * lowest) / peak, 2)} % of the peak: the analyser’s noise around 0.`
     : ': more than noise. Check column, sign and baseline.';
-  const result = `to 0 adds ${figure(added)} MJ (${figure((100 * added) / heat_MJ)} %).`;
+  const result = `to 0 adds ${formatNumber(added, 3)} ${heatUnit} (${formatNumber((100 * added) / heat_MJ, 2)} %).`;
   notes.push({
     code: noise ? 'NOISE_BELOW_ZERO' : 'BELOW_ZERO',
     text:

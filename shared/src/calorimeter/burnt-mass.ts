@@ -1,4 +1,4 @@
-import { figure } from '../methods/figure.ts';
+import { formatNumber } from '../units/format-number.ts';
 import type { CalorimeterNote } from './calorimeter-reading.ts';
 import type { ReadColumns } from './read-columns.ts';
 
@@ -16,7 +16,7 @@ export function burntMass(read: ReadColumns, heat_MJ: number | null, notes: Calo
   if (burnt === null || heat_MJ === null || heat_MJ <= MOST_MJ_KG * burnt) return burnt;
   notes.push({
     code: 'MASS',
-    text: `By the file ${figure(1000 * burnt)} g burnt, which makes ${figure(heat_MJ / burnt)} MJ/kg: more than solids and liquids have. It is not used; enter the mass that burnt by hand.`,
+    text: `By the file ${formatNumber(1000 * burnt, 3)} g burnt, which makes ${formatNumber(heat_MJ / burnt, 3)} MJ/kg: more than solids and liquids have. It is not used; enter the mass that burnt by hand.`,
   });
   return null;
 }

@@ -5,12 +5,13 @@ import type { CalorimeterChoices } from './calorimeter-choices.ts';
 import type { CalorimeterNote, CalorimeterPreview, CalorimeterReading } from './calorimeter-reading.ts';
 import { choiceFaults } from './choice-faults.ts';
 import { cleanTimes, type RawCurve } from './clean-times.ts';
-import { perArea, type Role } from './column-units.ts';
+import type { Role } from './column-units.ts';
+import { curveBasis } from './curve-basis.ts';
 import type { Curve } from './curve.ts';
 import { curveTotals } from './curve-totals.ts';
 import { FaultList } from './fault-list.ts';
 import { fromStart } from './from-start.ts';
-import { figure } from '../methods/figure.ts';
+import { formatNumber } from '../units/format-number.ts';
 import { rateOfGases } from './rate-of-gases.ts';
 import { readColumns, type ReadColumns } from './read-columns.ts';
 import { resampleCurve } from './resample-curve.ts';
@@ -60,7 +61,7 @@ function rawCurve(
   if (gases === null) return null;
   notes.push({
     code: 'BASELINE',
-    text: `Air before the fire by the file: ${figure(100 * gases.oxygenBefore)} % oxygen, ${figure(100 * gases.carbonDioxideBefore)} % carbon dioxide; ${choices.humidity === undefined ? 'taken as dry' : `${figure(100 * choices.humidity)} % water vapour`}. 13.1 MJ per kg of oxygen, good to 5 %.`,
+    text: `Air before the fire by the file: ${formatNumber(100 * gases.oxygenBefore, 4)} % oxygen, ${formatNumber(100 * gases.carbonDioxideBefore, 2)} % carbon dioxide; ${choices.humidity === undefined ? 'taken as dry' : `${formatNumber(100 * choices.humidity, 2)} % water vapour`}. 13.1 MJ per kg of oxygen, good to 5 %.`,
   });
   return { time_s, rate: gases.rate, lines: read.lines };
 }
@@ -72,7 +73,7 @@ function previewOf(
   read: ReadColumns,
   notes: CalorimeterNote[],
 ): CalorimeterPreview {
-  const per = choices.from === 'rate' && perArea(choices.units.rate ?? '') ? 'm2' : 'piece';
+  const { per } = curveBasis(choices);
   const totals = curveTotals(curve);
   const area = per === 'm2' ? choices.specimen_m2 : 1;
   const piece = area === undefined ? null : totals.heat_MJ * area;

@@ -1,5 +1,5 @@
 import { netAsReceived } from '../methods/heat/net-as-received.ts';
-import { figure } from '../methods/figure.ts';
+import { formatNumber } from '../units/format-number.ts';
 import { basisProposal } from './basis-proposal.ts';
 import type { MaterialBasis } from './derived-material.ts';
 import type { Expectation, WayHeat } from './way-heat.ts';
@@ -51,7 +51,7 @@ function dryForReceived(heat: WayHeat, { name, net }: Expectation, water: number
       heat,
       'dry-for-received',
       factor,
-      `By ${name} this looks like the heat of the dry material, but it is stated as received with ${figure(100 * water)} % water.`,
+      `By ${name} this looks like the heat of the dry material, but it is stated as received with ${formatNumber(100 * water, 3)} % water.`,
     ),
   };
 }

@@ -1,6 +1,6 @@
 import { basisCorrection } from '../methods/chemistry/basis-correction.ts';
 import { netAsReceived } from '../methods/heat/net-as-received.ts';
-import { figure } from '../methods/figure.ts';
+import { formatNumber } from '../units/format-number.ts';
 import type { DerivedMaterial, MaterialBasis } from './derived-material.ts';
 import { DraftRefused } from './draft-refused.ts';
 import type { MaterialDraft } from './material-draft.ts';
@@ -33,10 +33,14 @@ export function settleHeat(book: Workbook, draft: MaterialDraft, heat: WayHeat):
     throw DraftRefused.at(
       heat.pointer,
       'too_high',
-      `${figure(net)} MJ/kg is more than any fuel has (hydrogen: 120 net).${found?.proposal ? ` ${found.text}` : ' Check the value and its unit.'}`,
+      `${formatNumber(net, 3)} MJ/kg is more than any fuel has (hydrogen: 120 net).${found?.proposal ? ` ${found.text}` : ' Check the value and its unit.'}`,
     );
   if (net < 0 && heat.water === null)
-    throw DraftRefused.at(heat.pointer, 'no_heat', `It gives no heat (${figure(net)} MJ/kg). Check ${heat.suspects}.`);
+    throw DraftRefused.at(
+      heat.pointer,
+      'no_heat',
+      `It gives no heat (${formatNumber(net, 3)} MJ/kg). Check ${heat.suspects}.`,
+    );
   if (net < 0) book.warn('NO_HEAT', 'The water takes more heat than the material gives; it counts with 0 MJ/kg.');
   const k = factor ?? 1;
   const settledNet = Math.max(0, net);
@@ -82,7 +86,7 @@ function basisOf(
 ): MaterialBasis | null {
   if (found === null) return null;
   if (factor !== null) {
-    book.warn('BASIS_CORRECTED', `Corrected from ${figure(stated)} MJ/kg as stated. ${found.text}`);
+    book.warn('BASIS_CORRECTED', `Corrected from ${formatNumber(stated, 3)} MJ/kg as stated. ${found.text}`);
     return { ...found, proposal: null, accepted: { factor, stated_net_MJ_kg: stated } };
   }
   if (found.proposal !== null || found.finding === 'implausible') book.warn('BASIS', found.text);

@@ -110,10 +110,10 @@ describe('whatever a person states', () => {
         if (basis?.proposal) expect(basis.proposal.net_MJ_kg).not.toBe(net_MJ_kg);
         expect(JSON.stringify(derivation.value)).not.toMatch(/NaN|Infinity|undefined/);
       }),
-      { numRuns: 1500 },
+      { numRuns: 800 },
     );
-    expect(gave).toBeGreaterThan(200);
-  });
+    expect(gave).toBeGreaterThan(100);
+  }, 30_000);
 
   it('an equation for n moles gives the same material for every n', () => {
     fc.assert(

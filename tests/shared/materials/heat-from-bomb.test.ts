@@ -118,7 +118,7 @@ describe('a material from bomb runs', () => {
     const codes = (stated: object) => faultsOf({ ...stated }).map(({ pointer, code }) => `${pointer} ${code}`);
     expect(codes(bomb(runsOf(20).slice(0, 2)))).toEqual(['/runs too_few_runs']);
     expect(codes(bomb([...runsOf(20), run(0.0005, 24)]))).toEqual(['/runs runs_disagree']);
-    expect(faultsOf(bomb([...runsOf(20), run(0.0005, 24)]))[0]?.message).toMatch(/Run 4 \(24 MJ\/kg\)/);
+    expect(faultsOf(bomb([...runsOf(20), run(0.0005, 24)]))[0]?.message).toMatch(/Run 4 \(24\.0 MJ\/kg\)/);
     expect(codes(bomb(runsOf(20).map((one, i) => (i === 1 ? { ...one, rise_K: 0 } : one))))).toEqual([
       '/runs/1/rise_K no_rise',
     ]);

@@ -1,6 +1,6 @@
 import { bombAcceptance } from '../../methods/calorimetry/bomb-acceptance.ts';
 import { bombRun as bombRunMethod } from '../../methods/calorimetry/bomb-run.ts';
-import { figure } from '../../methods/figure.ts';
+import { formatNumber } from '../../units/format-number.ts';
 import { DraftRefused } from '../draft-refused.ts';
 import type { DraftOf } from '../material-draft.ts';
 import type { MaterialFault } from '../material-fault.ts';
@@ -25,7 +25,7 @@ export function bombMean(book: Workbook, draft: DraftOf<'bomb'>): BombMean {
     .map(({ run, i }) => ({
       pointer: `/runs/${i}/rise_K`,
       code: 'no_rise',
-      message: `Run ${i + 1} shows a rise of ${figure(run.rise_K)} K: nothing burnt, or a reading is wrong. Check it, or leave the run out and say why.`,
+      message: `Run ${i + 1} shows a rise of ${formatNumber(run.rise_K, 3)} K: nothing burnt, or a reading is wrong. Check it, or leave the run out and say why.`,
     }));
   if (counted.length < LEAST_RUNS)
     faults.push({
@@ -86,7 +86,7 @@ function meanOfRuns(book: Workbook, heats: readonly number[], counted: readonly 
     throw DraftRefused.at(
       '/runs',
       'runs_disagree',
-      `The runs lie ${figure(range)} MJ/kg apart; EN ISO 1716 accepts ${figure(allowed)} here. Run ${counted[farthest]!.i + 1} (${figure(heats[farthest]!)} MJ/kg) is farthest from the mean of ${figure(mean)}. Check its mass and rise, add two runs, or leave a run out and say why.`,
+      `The runs lie ${formatNumber(range, 3)} MJ/kg apart; EN ISO 1716 accepts ${formatNumber(allowed, 3)} here. Run ${counted[farthest]!.i + 1} (${formatNumber(heats[farthest]!, 3)} MJ/kg) is farthest from the mean of ${formatNumber(mean, 3)}. Check its mass and rise, add two runs, or leave a run out and say why.`,
     );
   }
   return { gross: mean, halfRange: range / 2 };

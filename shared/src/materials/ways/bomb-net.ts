@@ -1,7 +1,7 @@
 import { netFromCondensate } from '../../methods/calorimetry/net-from-condensate.ts';
 import { netOfFormula } from '../../methods/chemistry/net-of-formula.ts';
 import { netFromGross } from '../../methods/heat/net-from-gross.ts';
-import { figure } from '../../methods/figure.ts';
+import { formatNumber } from '../../units/format-number.ts';
 import { waterHydrogen, type Composition } from '../composition.ts';
 import { DraftRefused } from '../draft-refused.ts';
 import type { DraftOf } from '../material-draft.ts';
@@ -33,7 +33,7 @@ export function bombNet(
         throw DraftRefused.at(
           '/hydrogen/water_kg_kg',
           'too_little_water',
-          `The sample alone held ${figure(water)} kg of water per kg; the condensate cannot be less. Check both.`,
+          `The sample alone held ${formatNumber(water, 3)} kg of water per kg; the condensate cannot be less. Check both.`,
         );
       return book.run(
         netFromCondensate,

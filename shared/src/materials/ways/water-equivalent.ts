@@ -1,6 +1,6 @@
 import { bombCalibration } from '../../methods/calorimetry/bomb-calibration.ts';
 import { calibrationMean } from '../../methods/calorimetry/calibration-mean.ts';
-import { figure } from '../../methods/figure.ts';
+import { formatNumber } from '../../units/format-number.ts';
 import type { DraftOf } from '../material-draft.ts';
 import type { Workbook } from '../workbook.ts';
 
@@ -43,7 +43,7 @@ export function waterEquivalent(book: Workbook, { calibration }: DraftOf<'bomb'>
       'CALIBRATION',
       values.length < 5
         ? `The calibration rests on ${values.length} ${values.length === 1 ? 'run' : 'runs'}; five are usual. Add runs, or state that the laboratory keeps more.`
-        : `The calibration runs lie ${figure(spread * 100)} % apart; up to 0.5 % is usual. The range of the heat is widened by it.`,
+        : `The calibration runs lie ${formatNumber(spread * 100, 2)} % apart; up to 0.5 % is usual. The range of the heat is widened by it.`,
     );
   return { value_MJ_K: mean, spread: spread / 2, benzoic_MJ_kg: H };
 }
