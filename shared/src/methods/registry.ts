@@ -147,9 +147,9 @@ import { olderUnits } from './load/older-units.ts';
 import { pertFractile } from './statistics/pert-fractile.ts';
 import { triangularFractile } from './statistics/triangular-fractile.ts';
 import { varianceShare } from './uncertainty/variance-share.ts';
-import { MONTE_CARLO_METHOD } from '../uncertainty/monte-carlo-method.ts';
-import { HOW_MANY_METHOD, WHAT_CHANGES_METHOD } from '../questions/question-method.ts';
-import { GAP_METHOD, SPREAD_METHOD } from '../spread/spread-method.ts';
+import { MONTE_CARLO_METHOD } from './models/monte-carlo-method.ts';
+import { HOW_MANY_METHOD, WHAT_CHANGES_METHOD } from './models/question-method.ts';
+import { GAP_METHOD, SPREAD_METHOD } from './models/spread-method.ts';
 import type { MethodSummary } from './define-method.ts';
 
 /** A method whose inputs and result are known only when it runs. */

@@ -4,7 +4,7 @@ import { modelEstimate } from '../spread/model-estimate.ts';
 import type { Gap } from '../spread/gap-line.ts';
 import { spreadGaps } from '../spread/spread-gaps.ts';
 import { spreadInput } from '../spread/spread-input.ts';
-import { GAP_METHOD } from '../spread/spread-method.ts';
+import { GAP_METHOD } from '../methods/models/spread-method.ts';
 import { roomBasis } from '../tally/room-basis.ts';
 import type { RoomInput } from '../tally/room-input.ts';
 

@@ -7,7 +7,7 @@ import { estimateRoom } from '../tally/estimate-room.ts';
 import type { RoomInput, RoomInputEntry, RoomInputLimit } from '../tally/room-input.ts';
 import type { Answer } from './answer.ts';
 import { questionEstimate } from './question-estimate.ts';
-import { HOW_MANY_METHOD } from './question-method.ts';
+import { HOW_MANY_METHOD } from '../methods/models/question-method.ts';
 import { searchChange, type Sight } from './search-change.ts';
 
 export interface HowMany {

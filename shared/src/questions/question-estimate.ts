@@ -1,6 +1,6 @@
 import type { Estimate, EstimateWarning } from '../methods/estimate.ts';
 import type { WorkingInput, WorkingStep } from '../methods/working.ts';
-import type { QuestionMethod } from './question-method.ts';
+import type { QuestionMethod } from '../methods/models/question-method.ts';
 
 interface Given {
   /** Null with `never`: no answer in the range that was searched. */

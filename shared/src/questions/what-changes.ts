@@ -5,7 +5,7 @@ import { estimateRoom } from '../tally/estimate-room.ts';
 import type { Answer } from './answer.ts';
 import type { Lever } from './lever.ts';
 import { questionEstimate } from './question-estimate.ts';
-import { WHAT_CHANGES_METHOD } from './question-method.ts';
+import { WHAT_CHANGES_METHOD } from '../methods/models/question-method.ts';
 import { READINGS, type ReadingName } from './reading.ts';
 import { searchChange, type SearchResult, type Sight } from './search-change.ts';
 

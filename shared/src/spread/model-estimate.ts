@@ -1,6 +1,6 @@
 import type { Estimate, EstimateWarning } from '../methods/estimate.ts';
 import type { WorkingInput, WorkingStep } from '../methods/working.ts';
-import type { SpreadMethod } from './spread-method.ts';
+import type { SpreadMethod } from '../methods/models/spread-method.ts';
 
 /** One number of a model of many parts, with what a working says of it. */
 export interface ModelNumber {

@@ -4,7 +4,7 @@ import { modelEstimate } from '../spread/model-estimate.ts';
 import type { SpreadEvent } from '../spread/run-spread.ts';
 import type { SpreadInput, SpreadResult } from '../spread/simulate-spread.ts';
 import type { SpreadEntry } from '../spread/spread-entry.ts';
-import { SPREAD_METHOD } from '../spread/spread-method.ts';
+import { SPREAD_METHOD } from '../methods/models/spread-method.ts';
 import type { SpreadTallyEvent } from './room-tally.ts';
 import type { TallyContext } from './tally-context.ts';
 

@@ -5,7 +5,7 @@ import type { SpreadInput } from '../spread/simulate-spread.ts';
 import type { Gap } from '../spread/gap-line.ts';
 import { shortGaps } from '../spread/short-gaps.ts';
 import type { SpreadGap } from '../spread/spread-gaps.ts';
-import { GAP_METHOD } from '../spread/spread-method.ts';
+import { GAP_METHOD } from '../methods/models/spread-method.ts';
 import type { SpreadTally, SpreadTallyGap } from './room-tally.ts';
 import type { TallyContext } from './tally-context.ts';
 

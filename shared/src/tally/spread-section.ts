@@ -3,7 +3,7 @@ import { figure } from '../methods/figure.ts';
 import { modelEstimate } from '../spread/model-estimate.ts';
 import { simulateSpread, type SpreadInput, type SpreadResult } from '../spread/simulate-spread.ts';
 import { spreadInput } from '../spread/spread-input.ts';
-import { SPREAD_METHOD } from '../spread/spread-method.ts';
+import { SPREAD_METHOD } from '../methods/models/spread-method.ts';
 import type { RoomBasis } from './room-basis.ts';
 import type { RoomTally, SpreadTally } from './room-tally.ts';
 import { spreadEvents } from './spread-events.ts';

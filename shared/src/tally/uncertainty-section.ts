@@ -1,6 +1,6 @@
 import { characteristicLoad } from '../methods/load/characteristic-load.ts';
 import { modelEstimate } from '../spread/model-estimate.ts';
-import { MONTE_CARLO_METHOD, type SampledQuantity } from '../uncertainty/monte-carlo-method.ts';
+import { MONTE_CARLO_METHOD, type SampledQuantity } from '../methods/models/monte-carlo-method.ts';
 import type { RoomUncertainty, UncertaintyBand } from '../uncertainty/room-uncertainty.ts';
 import type { LoadModel } from '../uncertainty/load-model.ts';
 import { sampleLoad, type LoadSamples } from '../uncertainty/sample-load.ts';

@@ -5,7 +5,7 @@ import { fillSamples } from './fill-samples.ts';
 import type { LoadSamples } from './sample-load.ts';
 import { fillUniform, randomStream } from './random-stream.ts';
 import { AREA_SPREAD, GROWTH_SPREAD, HEIGHT_SPREAD, OPENING_SPREAD, OVERLOOKED, PEAK_SPREAD } from './survey-spread.ts';
-import type { SampledQuantity } from './monte-carlo-method.ts';
+import type { SampledQuantity } from '../methods/models/monte-carlo-method.ts';
 
 /** What the room adds to its load; null where the tally has no such number. */
 export interface RoomModel {

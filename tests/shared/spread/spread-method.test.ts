@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { GAP_METHOD, SPREAD_METHOD } from '@embertally/shared/spread/spread-method';
+import { GAP_METHOD, SPREAD_METHOD } from '@embertally/shared/methods/models/spread-method';
 import { SPREAD_DEFAULTS } from '@embertally/shared/spread/spread-defaults';
 
 describe.each([SPREAD_METHOD, GAP_METHOD])('$ref', ({ id, version, ref, sources, assumptions, limits }) => {

@@ -1,4 +1,4 @@
-import { GAP_METHOD, SPREAD_METHOD } from '@embertally/shared/spread/spread-method';
+import { GAP_METHOD, SPREAD_METHOD } from '@embertally/shared/methods/models/spread-method';
 import type { SpreadTally } from '@embertally/shared/tally/room-tally';
 import { FormulaText } from '../../../components/working/formula-text.tsx';
 import { plainUnits } from '../../../lib/plain-units.ts';

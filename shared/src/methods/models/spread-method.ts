@@ -1,5 +1,5 @@
-import type { MethodOutput, MethodSummary } from '../methods/define-method.ts';
-import { en1991, recalled } from '../methods/sources.ts';
+import type { MethodOutput, MethodSummary } from '../define-method.ts';
+import { en1991, recalled } from '../sources.ts';
 
 /** What a method of many parts says of itself, with what it gives and what it leaves out. */
 export interface SpreadMethod<Output extends string = string> extends MethodSummary {

@@ -1,5 +1,5 @@
-import { recalled } from '../methods/sources.ts';
-import type { SpreadMethod } from '../spread/spread-method.ts';
+import { recalled } from '../sources.ts';
+import type { SpreadMethod } from './spread-method.ts';
 
 export type SampledQuantity = 'total' | 'perFloor' | 'peak' | 'equivalentTime';
 

@@ -1,5 +1,5 @@
-import type { MethodInputs, MethodOutput, MethodSummary } from '../methods/define-method.ts';
-import { recalled } from '../methods/sources.ts';
+import type { MethodInputs, MethodOutput, MethodSummary } from '../define-method.ts';
+import { recalled } from '../sources.ts';
 
 /** A question is a search over the book's own methods: it has no relation of its own. */
 export interface QuestionMethod extends MethodSummary {
