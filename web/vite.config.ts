@@ -25,8 +25,8 @@ export default defineConfig({
         codeSplitting: {
           groups: [
             {
-              // The small parts nearly every screen uses travel together: one request instead of a dozen. What stands
-              // on the headless library (dialogs, tabs, menus) stays with the screens that open it.
+              // The small parts nearly every screen uses travel together: one request instead of a dozen. Dialogs,
+              // tabs and pickers stay with the screens that open them.
               name: 'kit',
               test: /web\/src\/(components|lib)\/(?!chart\/|working\/|combobox|confirm-dialog|dialog|menu|tabs|load-scale|quantity-field|room-summaries)|web\/src\/features\/(session|sites)|shared\/src\/(contracts\/(contract|problem|sessions|sites)|policy)/,
               minShareCount: 2,

@@ -33,9 +33,26 @@ if (!('ResizeObserver' in globalThis)) missing.ResizeObserver = NothingObserved;
 if (!('IntersectionObserver' in globalThis)) missing.IntersectionObserver = NothingObserved;
 Object.assign(globalThis, missing);
 if (!('hidePopover' in HTMLElement.prototype)) {
-  Object.assign(HTMLElement.prototype, { hidePopover: () => undefined, showPopover: () => undefined });
+  Object.assign(HTMLElement.prototype, {
+    showPopover(this: HTMLElement) {
+      this.style.display = 'block';
+    },
+    hidePopover(this: HTMLElement) {
+      this.style.display = '';
+    },
+  });
 }
 if (!('scrollIntoView' in Element.prototype)) Object.assign(Element.prototype, { scrollIntoView: () => undefined });
+if (!('showModal' in HTMLDialogElement.prototype)) {
+  Object.assign(HTMLDialogElement.prototype, {
+    showModal(this: HTMLDialogElement) {
+      this.open = true;
+    },
+    close(this: HTMLDialogElement) {
+      this.open = false;
+    },
+  });
+}
 window.scrollTo = () => undefined;
 // Nothing is laid out, so nothing would count as visible; focus goes only to what is.
 Element.prototype.getClientRects = function (this: Element): DOMRectList {

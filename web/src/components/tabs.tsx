@@ -1,5 +1,4 @@
-import * as Ariakit from '@ariakit/react';
-import type { ReactNode } from 'react';
+import { type KeyboardEvent, type ReactNode, useId, useRef } from 'react';
 
 export interface TabPage<T extends string> {
   readonly id: T;
@@ -15,28 +14,62 @@ interface TabsProps<T extends string> {
   readonly onChoose: (id: T) => void;
 }
 
-/** A few pages in one place, one shown at a time. */
+const STEPS: Readonly<Record<string, (at: number, many: number) => number>> = {
+  ArrowRight: (at, many) => (at + 1) % many,
+  ArrowLeft: (at, many) => (at - 1 + many) % many,
+  Home: () => 0,
+  End: (_at, many) => many - 1,
+};
+
+/** A few pages in one place, one shown at a time. Tab comes to the chosen one, the arrow keys choose another. */
 export function Tabs<T extends string>({ label, tabs, chosen, onChoose }: TabsProps<T>) {
+  const made = useId();
+  const list = useRef<HTMLDivElement>(null);
+  const tabId = (id: T): string => `${made}-${id}`;
+  const panelId = (id: T): string => `${made}-${id}-page`;
+
+  const onKeyDown = (event: KeyboardEvent): void => {
+    const at = tabs.findIndex((tab) => tab.id === chosen);
+    const next = STEPS[event.key]?.(at, tabs.length);
+    const tab = next === undefined ? undefined : tabs[next];
+    if (next === undefined || tab === undefined) return;
+    event.preventDefault();
+    onChoose(tab.id);
+    list.current?.querySelectorAll('button')[next]?.focus();
+  };
   return (
-    <Ariakit.TabProvider
-      selectedId={chosen}
-      setSelectedId={(id) => {
-        const tab = tabs.find((candidate) => candidate.id === id);
-        if (tab !== undefined) onChoose(tab.id);
-      }}
-    >
-      <Ariakit.TabList className="tab-list" aria-label={label}>
+    <>
+      <div ref={list} role="tablist" className="tab-list" aria-label={label} onKeyDown={onKeyDown}>
         {tabs.map((tab) => (
-          <Ariakit.Tab key={tab.id} id={tab.id} className="tab">
+          <button
+            key={tab.id}
+            type="button"
+            role="tab"
+            id={tabId(tab.id)}
+            className="tab"
+            aria-selected={tab.id === chosen}
+            aria-controls={panelId(tab.id)}
+            tabIndex={tab.id === chosen ? 0 : -1}
+            onClick={() => {
+              onChoose(tab.id);
+            }}
+          >
             {tab.label}
-          </Ariakit.Tab>
+          </button>
         ))}
-      </Ariakit.TabList>
+      </div>
       {tabs.map((tab) => (
-        <Ariakit.TabPanel key={tab.id} tabId={tab.id} className="pt-4">
+        <div
+          key={tab.id}
+          role="tabpanel"
+          id={panelId(tab.id)}
+          aria-labelledby={tabId(tab.id)}
+          hidden={tab.id !== chosen}
+          className="pt-4"
+        >
           {tab.content}
-        </Ariakit.TabPanel>
+        </div>
       ))}
-    </Ariakit.TabProvider>
+    </>
   );
 }
