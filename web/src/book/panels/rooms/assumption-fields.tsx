@@ -1,3 +1,4 @@
+import { useMemo } from 'react';
 import type { Done, Refusal } from '@embertally/shared/survey/command';
 import { entriesOfRoom } from '@embertally/shared/survey/derive/entries-of-room';
 import { assumptionsOrNone, NO_ASSUMPTIONS } from '@embertally/shared/survey/no-assumptions';
@@ -46,7 +47,8 @@ const TABLE = [
 
 /** What the tally is to take for the room in place of its defaults. */
 export function AssumptionFields({ room, run }: AssumptionFieldsProps) {
-  const entries = useBook((state) => entriesOfRoom(state.document, room.id));
+  const document = useBook((state) => state.document);
+  const entries = useMemo(() => entriesOfRoom(document, room.id), [document, room.id]);
   const current = room.assumptions ?? NO_ASSUMPTIONS;
   const set = (patch: Partial<Assumptions>) => run(assumptionsOrNone({ ...current, ...patch }));
   const firstGone = current.first_entry !== null && !entries.some((entry) => entry.id === current.first_entry);
