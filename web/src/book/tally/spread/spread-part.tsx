@@ -19,7 +19,9 @@ interface SpreadPartProps {
 
 /** Which entry ignites which: worked out in the background once the survey is quiet, then played on the plan. */
 export function SpreadPart({ tally, room, entries, onGive }: SpreadPartProps) {
-  const [chosen, setChosen] = useState<string | null>(null);
+  // Until somebody chooses here it is what the room says of itself.
+  const [asked, setAsked] = useState<string | null>();
+  const chosen = asked === undefined ? (room.assumptions?.first_entry ?? null) : asked;
   const first = chosen !== null && entries.get(chosen)?.room_id === room.id ? chosen : null;
   const { state, value, message, stop, again } = useRoomSpread(room.id, first);
   const missing = value?.missing.filter(({ section }) => section === 'spread') ?? [];
@@ -54,7 +56,7 @@ export function SpreadPart({ tally, room, entries, onGive }: SpreadPartProps) {
       )}
       {spread?.events !== undefined && (
         <>
-          <FirstEntry spread={spread} room={room} entries={entries} chosen={first} onChoose={setChosen} />
+          <FirstEntry spread={spread} room={room} entries={entries} chosen={first} onChoose={setAsked} />
           <SpreadAnswer tally={tally} spread={spread} room={room} entries={entries} />
         </>
       )}
