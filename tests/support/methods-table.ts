@@ -1,13 +1,9 @@
-import { readdirSync } from 'node:fs';
-import { join } from 'node:path';
 import type { MethodSummary } from '@embertally/shared/methods/define-method';
 import { METHODS, MODELS } from '@embertally/shared/methods/registry';
 import { rangeText } from '@embertally/shared/methods/range-faults';
-import type { ReferenceRow } from '../reference/reference-row.ts';
-import { root } from './import-graph.ts';
 import { KNOWN_LIMITS } from './known-limits.ts';
+import { referenceRows, type HeldRow } from './reference-rows.ts';
 
-const ROWS = join(root, 'tests', 'reference', 'rows');
 const HELD_TO = { published: 'published', independent: 'independently computed', invariant: 'invariant' } as const;
 const cell = (text: string): string => text.replaceAll('|', '\\|');
 
@@ -33,16 +29,6 @@ const TOPICS: Readonly<Record<string, string>> = {
   question: 'Questions turned round',
 };
 
-async function referenceRows(): Promise<readonly ReferenceRow[]> {
-  const modules = await Promise.all(
-    readdirSync(ROWS)
-      .filter((name) => name.endsWith('-rows.ts'))
-      .sort()
-      .map((name) => import(join(ROWS, name)) as Promise<Record<string, readonly ReferenceRow[]>>),
-  );
-  return modules.flatMap((module) => Object.values(module).flat());
-}
-
 const topicOf = ({ id }: MethodSummary): string => id.split('.', 1)[0]!;
 const ALL: readonly MethodSummary[] = [...METHODS, ...MODELS];
 
@@ -57,7 +43,7 @@ export async function methodsTable(): Promise<string> {
     .join('\n');
 }
 
-function tableOf(methods: readonly MethodSummary[], rows: readonly ReferenceRow[]): string {
+function tableOf(methods: readonly MethodSummary[], rows: readonly HeldRow[]): string {
   const lines = methods.map((method) => {
     const sources = method.sources
       .map(

@@ -96,7 +96,7 @@ export const HANDBOOK_FIRE_ROWS: readonly ReferenceRow[] = [
     fromMemory: true,
   },
   {
-    id: 'boundary-standard',
+    id: 'boundary-12.6-of-168',
     method: 'radiation.boundary',
     inputs: { F: 0.075, intensity: 'standard' },
     expected: { value: 12.6 },
@@ -106,7 +106,7 @@ export const HANDBOOK_FIRE_ROWS: readonly ReferenceRow[] = [
     fromMemory: true,
   },
   {
-    id: 'boundary-reduced',
+    id: 'boundary-12.6-of-84',
     method: 'radiation.boundary',
     inputs: { F: 0.15, intensity: 'reduced' },
     expected: { value: 12.6 },

@@ -3,55 +3,9 @@ import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { describe, expect, it } from 'vitest';
 import { methodByRef, METHODS, MODELS } from '@embertally/shared/methods/registry';
-import { BURNOUT_ROWS } from '../../reference/rows/burnout-rows.ts';
-import { CALORIMETRY_ROWS } from '../../reference/rows/calorimetry-rows.ts';
-import { CHEMISTRY_ROWS } from '../../reference/rows/chemistry-rows.ts';
-import { GROWTH_ROWS } from '../../reference/rows/growth-rows.ts';
-import { HEAT_ROWS } from '../../reference/rows/heat-rows.ts';
-import { LOAD_ROWS } from '../../reference/rows/load-rows.ts';
-import { MATERIAL_ROWS } from '../../reference/rows/material-rows.ts';
-import { ROOM_ROWS } from '../../reference/rows/room-rows.ts';
-import { STATISTICS_ROWS } from '../../reference/rows/statistics-rows.ts';
-import { TEMPERATURE_ROWS } from '../../reference/rows/temperature-rows.ts';
-import { PLUME_ROWS } from '../../reference/rows/plume-rows.ts';
-import { RADIATION_ROWS } from '../../reference/rows/radiation-rows.ts';
-import { POOL_ROWS } from '../../reference/rows/pool-rows.ts';
-import { SMOKE_ROWS } from '../../reference/rows/smoke-rows.ts';
-import { WATER_ROWS } from '../../reference/rows/water-rows.ts';
-import { STORAGE_ROWS } from '../../reference/rows/storage-rows.ts';
-import { SCHEME_ROWS } from '../../reference/rows/scheme-rows.ts';
-import { DISTRIBUTION_ROWS } from '../../reference/rows/distribution-rows.ts';
-import { FURTHER_ROWS } from '../../reference/rows/further-rows.ts';
-import { HOW_MANY_ROWS, WHAT_CHANGES_ROWS } from '../../reference/rows/question-rows.ts';
-import { GAP_ROWS, SPREAD_ROWS } from '../../reference/rows/spread-rows.ts';
-import { UNCERTAINTY_ROWS } from '../../reference/rows/uncertainty-rows.ts';
+import { referenceRows } from '../../support/reference-rows.ts';
 
-const rows = [
-  ...BURNOUT_ROWS,
-  ...CALORIMETRY_ROWS,
-  ...CHEMISTRY_ROWS,
-  ...GROWTH_ROWS,
-  ...HEAT_ROWS,
-  ...LOAD_ROWS,
-  ...MATERIAL_ROWS,
-  ...ROOM_ROWS,
-  ...STATISTICS_ROWS,
-  ...TEMPERATURE_ROWS,
-  ...PLUME_ROWS,
-  ...RADIATION_ROWS,
-  ...POOL_ROWS,
-  ...SMOKE_ROWS,
-  ...WATER_ROWS,
-  ...STORAGE_ROWS,
-  ...SCHEME_ROWS,
-  ...DISTRIBUTION_ROWS,
-  ...UNCERTAINTY_ROWS,
-  ...SPREAD_ROWS,
-  ...GAP_ROWS,
-  ...FURTHER_ROWS,
-  ...HOW_MANY_ROWS,
-  ...WHAT_CHANGES_ROWS,
-];
+const rows = await referenceRows();
 const folder = join(dirname(fileURLToPath(import.meta.url)), '../../../shared/src/methods');
 
 describe.each([...METHODS, ...MODELS].map((method) => [method.ref, method] as const))('%s', (ref, method) => {
@@ -72,6 +26,23 @@ describe.each([...METHODS, ...MODELS].map((method) => [method.ref, method] as co
 
   it('is found by the name that stands beside its numbers', () => {
     expect(methodByRef(ref)).toBe(method);
+  });
+});
+
+describe('the values from outside', () => {
+  it('each have a name of their own and hold a method that exists', () => {
+    const seen = new Set<string>();
+    expect(rows.filter(({ id }) => seen.size === seen.add(id).size).map(({ id }) => id)).toEqual([]);
+    const known = new Set([...METHODS, ...MODELS].map(({ id }) => id));
+    expect(rows.filter(({ method }) => !known.has(method)).map(({ id }) => id)).toEqual([]);
+  });
+
+  it('are all read by a test', () => {
+    const reference = join(dirname(fileURLToPath(import.meta.url)), '../../reference');
+    const tests = readdirSync(reference).filter((name) => name.endsWith('.test.ts'));
+    const text = tests.map((name) => readFileSync(join(reference, name), 'utf8')).join();
+    const lists = readdirSync(join(reference, 'rows')).filter((name) => name.endsWith('-rows.ts'));
+    expect(lists.filter((name) => !text.includes(`./rows/${name}`))).toEqual([]);
   });
 });
 
