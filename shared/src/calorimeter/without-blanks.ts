@@ -15,10 +15,16 @@ export function withoutBlanks(
 ): RawCurve {
   const { time_s, rate, lines } = raw;
   const full = (i: number) => !Number.isNaN(time_s[i]) && !Number.isNaN(rate[i]);
-  const kept = Array.from(time_s.keys()).filter(full);
-  const first = kept[0] ?? 0;
-  const last = kept.at(-1) ?? -1;
-  const inside = last - first + 1 - kept.length;
+  const first = Math.max(
+    0,
+    time_s.findIndex((_, i) => full(i)),
+  );
+  const last = time_s.findLastIndex((_, i) => full(i));
+  const take = (values: Float64Array) => values.filter((_, i) => full(i));
+  const whole = first === 0 && last === time_s.length - 1 && time_s.every((_, i) => full(i));
+  if (whole) return raw;
+  const kept = take(time_s).length;
+  const inside = last < 0 ? 0 : last - first + 1 - kept;
   if (inside > 0 && blanks !== 'bridge')
     for (let i = first; i <= last; i += 1)
       if (!full(i))
@@ -33,7 +39,6 @@ export function withoutBlanks(
   if (after > 0 && last >= 0) notes.push({ code: 'BLANK_END', text: `The last ${count(after)} blank and left off.` });
   if (inside > 0 && blanks === 'bridge')
     notes.push({ code: 'BLANK_INSIDE', text: `${inside} blank readings in between are passed over, straight across.` });
-  const take = (values: Float64Array) => Float64Array.from(kept, (i) => values[i]!);
   return { time_s: take(time_s), rate: take(rate), lines: take(lines) };
 }
 
