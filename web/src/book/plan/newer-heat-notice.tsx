@@ -33,7 +33,9 @@ export function NewerHeatNotice({ entries, canEdit }: NewerHeatNoticeProps) {
         <button
           type="button"
           className="strip-verb"
-          onClick={() => {
+          onClick={(event) => {
+            // The notice goes with its reason; the focus stays where it stood.
+            event.currentTarget.parentElement?.closest<HTMLElement>('[tabindex]')?.focus();
             session.run(
               takeNewerHeat,
               { entry_ids: behind.map(({ entry }) => entry.id), newer: [...newer.inForce.values()] },

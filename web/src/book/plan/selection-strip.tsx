@@ -89,7 +89,7 @@ export function SelectionStrip({ host }: { readonly host: PlanHost }) {
   const content = body();
   if (content === null) return null;
   return (
-    <div ref={strip} className="strip" role="group" aria-label="What is picked">
+    <div ref={strip} className="strip" role="group" tabIndex={-1} aria-label="What is picked">
       {content}
     </div>
   );

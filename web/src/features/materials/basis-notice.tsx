@@ -39,15 +39,10 @@ export function BasisNotice({ basis, onTake, onPutBack }: BasisNoticeProps) {
   return (
     <Notice tone={QUIET.has(finding) ? 'plain' : 'caution'} title={TITLES[finding]}>
       <p>{basis.text}</p>
-      {proposal === null ? null : (
-        <>
-          <p>{proposal.text}</p>
-          {onTake === undefined ? null : (
-            <Button className="mt-2" onClick={onTake}>
-              Use {heat(proposal.net_MJ_kg)} instead
-            </Button>
-          )}
-        </>
+      {proposal === null || onTake === undefined ? null : (
+        <Button className="mt-2" onClick={onTake}>
+          Use {heat(proposal.net_MJ_kg)} instead
+        </Button>
       )}
       {accepted === null ? null : (
         <>

@@ -79,7 +79,7 @@ export function OutcomePanel({ material }: { readonly material: MaterialForm }) 
               }}
             />
           )}
-          <WarningList warnings={derived.warnings} />
+          <WarningList warnings={derived.warnings.filter(({ text }) => text !== derived.basis?.text)} />
         </div>
       </Part>
       {chart === null ? null : (

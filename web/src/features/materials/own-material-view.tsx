@@ -105,7 +105,7 @@ function VersionFigures({ version, materials }: VersionFiguresProps) {
             <HeatFigures derived={derived} />
           </div>
           {derived.basis === null ? null : <BasisNotice basis={derived.basis} />}
-          <WarningList warnings={derived.warnings} />
+          <WarningList warnings={derived.warnings.filter(({ text }) => text !== derived.basis?.text)} />
         </div>
       </Part>
       {chart === null ? null : (

@@ -14,7 +14,7 @@ export function ContentsPart() {
   if (room === undefined) return <p className="text-soft">No room is in hand: choose one under Rooms.</p>;
   const entries = entriesOfRoom(document, room.id);
   return (
-    <div className="grid grid-cols-[minmax(0,1fr)] gap-4">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-4" tabIndex={-1}>
       {canEdit && (
         <div>
           <Disclosure title={`Add contents to ${room.name}`} open={entries.length === 0}>
