@@ -23,8 +23,13 @@ export class OwnMaterialVersion {
   @Column({ type: 'text' }) state!: 'draft' | 'put-forward' | 'approved' | 'returned' | 'withdrawn';
   /** What the person stated. */
   @Column({ type: 'jsonb' }) draft!: unknown;
-  /** What the server derived from it, with the versions of the methods; `json` keeps it as written. */
+  /** What the server derived from it, with the versions of the methods and without workings; `json` keeps it as written. */
   @Column({ type: 'json' }) derived!: unknown;
+  @Column({ type: 'double precision' }) net_MJ_kg!: number;
+  @Column({ type: 'double precision' }) low_MJ_kg!: number;
+  @Column({ type: 'double precision' }) high_MJ_kg!: number;
+  /** Long and seldom read. */
+  @Column({ type: 'json' }) workings!: unknown;
   @Column({ type: 'uuid' }) author_id!: string;
   @Column({ type: 'timestamptz' }) made_at!: Date;
   @Column({ type: 'timestamptz' }) edited_at!: Date;

@@ -11,6 +11,8 @@ export interface OwnMaterialRow {
   readonly tag: number;
 }
 
+type WithoutWorkings = Omit<DerivedMaterial, 'workings'>;
+
 /** A version without what it says at length. */
 export interface VersionRow {
   readonly id: string;
@@ -40,7 +42,8 @@ export interface VersionRow {
 
 export interface FullVersionRow extends VersionRow {
   readonly draft: MaterialDraft;
-  readonly derived: DerivedMaterial;
+  readonly derived: WithoutWorkings;
+  readonly workings: DerivedMaterial['workings'];
   readonly tag: number;
 }
 
@@ -48,8 +51,7 @@ export interface PlaceableRow {
   readonly material_id: string;
   readonly version: number;
   readonly draft: MaterialDraft;
-  /** Without workings. */
-  readonly derived: Omit<DerivedMaterial, 'workings'>;
+  readonly derived: WithoutWorkings;
   readonly approved_by: string;
   readonly approved_at: Date;
 }
@@ -57,8 +59,7 @@ export interface PlaceableRow {
 const MATERIAL = 'm.id, m.label, m.latest, m.in_force, m.tag';
 
 const VERSION = `v.id, v.material_id, v.version, v.state, v.draft->>'label' AS label, v.draft->>'way' AS way,
-  (v.derived->>'net_MJ_kg')::float8 AS "net_MJ_kg", (v.derived->>'low_MJ_kg')::float8 AS "low_MJ_kg",
-  (v.derived->>'high_MJ_kg')::float8 AS "high_MJ_kg", v.draft ? 'curve' AS has_curve,
+  v."net_MJ_kg", v."low_MJ_kg", v."high_MJ_kg", v.draft ? 'curve' AS has_curve,
   v.author_id, a.name AS author, v.made_at, v.edited_at, v.put_forward_at,
   v.decided_by AS decided_by_id, d.name AS decided_by, v.decided_at, v.decision_reason,
   v.withdrawn_by AS withdrawn_by_id, w.name AS withdrawn_by, v.withdrawn_at, v.withdrawal_reason`;
@@ -108,7 +109,7 @@ export class OwnMaterialRepository extends SqlRepository {
 
   version(organisationId: string, materialId: string, version: number): Promise<FullVersionRow | null> {
     return this.row<FullVersionRow>(
-      `SELECT ${VERSION}, v.draft, v.derived, m.tag FROM own_material_version v
+      `SELECT ${VERSION}, v.draft, v.derived, v.workings, m.tag FROM own_material_version v
        JOIN own_material m ON m.id = v.material_id ${VERSION_PEOPLE}
        WHERE m.organisation_id = $1 AND v.material_id = $2 AND v.version = $3`,
       [organisationId, materialId, version],
@@ -140,7 +141,7 @@ export class OwnMaterialRepository extends SqlRepository {
   /** The versions in force, by name. */
   placeable(organisationId: string): Promise<readonly PlaceableRow[]> {
     return this.rows<PlaceableRow>(
-      `SELECT v.material_id, v.version, v.draft, (v.derived::jsonb - 'workings') AS derived,
+      `SELECT v.material_id, v.version, v.draft - 'curve' AS draft, v.derived,
          p.name AS approved_by, v.decided_at AS approved_at
        FROM own_material m JOIN own_material_version v ON v.material_id = m.id AND v.version = m.in_force
        JOIN person p ON p.id = v.decided_by
@@ -189,19 +190,19 @@ export class OwnMaterialRepository extends SqlRepository {
     readonly at: Date;
   }): Promise<void> {
     await this.rows(
-      `INSERT INTO own_material_version (id, material_id, version, state, draft, derived, author_id, made_at, edited_at)
-       VALUES ($1, $2, $3, 'draft', $4, $5, $6, $7, $7)`,
-      [row.id, row.material_id, row.version, row.draft, row.derived, row.author_id, row.at],
+      `INSERT INTO own_material_version (id, material_id, version, state, draft, author_id, made_at, edited_at,
+         derived, "net_MJ_kg", "low_MJ_kg", "high_MJ_kg", workings)
+       VALUES ($1, $2, $3, 'draft', $4, $5, $6, $6, $7, $8, $9, $10, $11)`,
+      [row.id, row.material_id, row.version, row.draft, row.author_id, row.at, ...derivedColumns(row.derived)],
     );
   }
 
   async setContent(versionId: string, draft: MaterialDraft, derived: DerivedMaterial, at: Date): Promise<void> {
-    await this.rows('UPDATE own_material_version SET draft = $2, derived = $3, edited_at = $4 WHERE id = $1', [
-      versionId,
-      draft,
-      derived,
-      at,
-    ]);
+    await this.rows(
+      `UPDATE own_material_version SET draft = $2, edited_at = $3, derived = $4, "net_MJ_kg" = $5, "low_MJ_kg" = $6,
+         "high_MJ_kg" = $7, workings = $8 WHERE id = $1`,
+      [versionId, draft, at, ...derivedColumns(derived)],
+    );
   }
 
   async removeVersion(versionId: string): Promise<void> {
@@ -210,8 +211,9 @@ export class OwnMaterialRepository extends SqlRepository {
 
   async putForward(versionId: string, derived: DerivedMaterial, at: Date): Promise<void> {
     await this.rows(
-      `UPDATE own_material_version SET state = 'put-forward', derived = $2, put_forward_at = $3 WHERE id = $1`,
-      [versionId, derived, at],
+      `UPDATE own_material_version SET state = 'put-forward', put_forward_at = $2, derived = $3, "net_MJ_kg" = $4,
+         "low_MJ_kg" = $5, "high_MJ_kg" = $6, workings = $7 WHERE id = $1`,
+      [versionId, at, ...derivedColumns(derived)],
     );
   }
 
@@ -252,4 +254,9 @@ export class OwnMaterialRepository extends SqlRepository {
       [versionId, fileIds],
     );
   }
+}
+
+/** In the order `derived`, net, low, high, `workings`; the driver would take a list for one of PostgreSQL's own. */
+function derivedColumns({ workings, ...derived }: DerivedMaterial): readonly unknown[] {
+  return [derived, derived.net_MJ_kg, derived.low_MJ_kg, derived.high_MJ_kg, JSON.stringify(workings)];
 }

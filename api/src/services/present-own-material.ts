@@ -44,7 +44,7 @@ export function presentFullVersion(
     material_id: row.material_id,
     tag: row.tag,
     draft: row.draft,
-    derived: row.derived,
+    derived: { ...row.derived, workings: row.workings },
     evidence: files.map(storedFile),
   };
 }

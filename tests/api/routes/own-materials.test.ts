@@ -240,6 +240,8 @@ describe('a version', () => {
     for (const statement of [
       `UPDATE own_material_version SET draft = '{}' WHERE material_id = $1`,
       `UPDATE own_material_version SET derived = '{}' WHERE material_id = $1`,
+      `UPDATE own_material_version SET "net_MJ_kg" = 1 WHERE material_id = $1`,
+      `UPDATE own_material_version SET workings = '[]' WHERE material_id = $1`,
       `UPDATE own_material_version SET state = 'draft' WHERE material_id = $1`,
       `UPDATE own_material_version SET decided_by = author_id WHERE material_id = $1`,
       `DELETE FROM own_material_version WHERE material_id = $1`,
