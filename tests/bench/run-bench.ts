@@ -3,6 +3,7 @@ import type { BenchRow } from './bench-row.ts';
 import { benchApi } from './bench-api.ts';
 import { benchBundle } from './bench-bundle.ts';
 import { benchEstimateRoom } from './bench-estimate-room.ts';
+import { benchMonteCarlo } from './bench-monte-carlo.ts';
 import { benchReport } from './bench-report.ts';
 import { benchSpread } from './bench-spread.ts';
 import { benchStart } from './bench-start.ts';
@@ -11,6 +12,7 @@ import { benchStart } from './bench-start.ts';
 const benches: readonly (() => Promise<readonly BenchRow[]>)[] = [
   benchEstimateRoom,
   benchSpread,
+  benchMonteCarlo,
   benchBundle,
   benchApi,
   benchReport,

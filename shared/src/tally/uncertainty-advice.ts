@@ -51,7 +51,7 @@ function weighing(heats: readonly EntryHeat[], tried: Tried): UncertaintyAdvice 
   const gains = heats
     .map(({ entry, counted }) => {
       const spread = MASS_SPREAD[entry.evidence ?? 'estimated'];
-      return { entry, gain: counted * counted * (spread * spread - MASS_SPREAD.weighed ** 2) };
+      return { entry, gain: counted * counted * (spread * spread - MASS_SPREAD.weighed * MASS_SPREAD.weighed) };
     })
     .filter(({ gain }) => gain > 0)
     .sort((a, b) => b.gain - a.gain || (a.entry.id < b.entry.id ? -1 : 1))

@@ -86,7 +86,7 @@ function bandOfSamples(
 ): UncertaintyBand {
   const N = sorted.length;
   const mean = sorted.reduce((sum, x) => sum + x, 0) / N;
-  const deviation = Math.sqrt(sorted.reduce((sum, x) => sum + (x - mean) ** 2, 0) / N);
+  const deviation = Math.sqrt(sorted.reduce((sum, x) => sum + (x - mean) * (x - mean), 0) / N);
   const number = (value: number, step: string) =>
     modelEstimate(
       MONTE_CARLO_METHOD,

@@ -4,7 +4,7 @@ import type { Distribution } from './distribution.ts';
 /** Relative standard deviation of a mass by how it was come to know; counting adds 2 % for the count itself. */
 export const MASS_SPREAD: Readonly<Record<Evidence, number>> = {
   weighed: 0.03,
-  counted: Math.hypot(0.1, 0.02),
+  counted: Math.sqrt(0.1 * 0.1 + 0.02 * 0.02),
   measured: 0.2,
   estimated: 0.3,
   hearsay: 0.5,

@@ -24,6 +24,8 @@ export interface VariancePart {
   readonly variance: number;
 }
 
+/** A power would differ in its last digit between engines. */
+const square = (x: number): number => x * x;
 /** Points for heats of one material that are not the same everywhere. */
 const POINTS = 400;
 
@@ -52,8 +54,8 @@ export function varianceShares(model: LoadModel, room: RoomInputs): VarianceShar
       weights[term.heat]! += f.mean * term.mass * kept;
     }
     mean += f.mean * all;
-    const byMass = (f.deviation * all) ** 2;
-    const byCabinet = (psi.deviation * f.mean * inside) ** 2;
+    const byMass = square(f.deviation * all);
+    const byCabinet = square(psi.deviation * f.mean * inside);
     parts.push({ of: 'mass', index, variance: byMass });
     if (entry.cabinet !== null) parts.push({ of: 'enclosure', index, variance: byCabinet });
     together += togetherOf(model, entry, f, psi, inside);
@@ -67,11 +69,11 @@ export function varianceShares(model: LoadModel, room: RoomInputs): VarianceShar
   const g = 1 + o.mean;
   const r = momentsOf(room.floor).deviation;
   if (!(mean > 0)) return { variance: 0, mean: 0, parts: [] };
-  const square = mean * mean;
-  const relative = parts.map((part) => ({ ...part, variance: part.variance / square }));
-  relative.push({ of: 'overlooked', index: 0, variance: (o.deviation / g) ** 2 });
+  const whole = square(mean);
+  const relative = parts.map((part) => ({ ...part, variance: part.variance / whole }));
+  relative.push({ of: 'overlooked', index: 0, variance: square(o.deviation / g) });
   relative.push({ of: 'floor', index: 0, variance: r * r });
-  const variance = (1 + load / square) * (1 + (o.deviation / g) ** 2) * (1 + r * r) - 1;
+  const variance = (1 + load / whole) * (1 + square(o.deviation / g)) * (1 + r * r) - 1;
   return { variance, mean: mean * g, parts: relative };
 }
 
@@ -87,13 +89,13 @@ function togetherOf(
   const inCabinet = new Map<number, number>();
   for (const { heat, mass, inCabinet: sampled } of entry.terms) {
     const { material, distribution, moisture } = model.heats[heat]!;
-    const spread = mass * Math.hypot(momentsOf(distribution).deviation, moisture);
+    const spread = mass * Math.sqrt(square(momentsOf(distribution).deviation) + square(moisture));
     all.set(material, (all.get(material) ?? 0) + spread * (sampled ? psi.mean : 1));
     if (sampled) inCabinet.set(material, (inCabinet.get(material) ?? 0) + spread);
   }
   const squares = (sums: ReadonlyMap<number, number>) => [...sums.values()].reduce((sum, one) => sum + one * one, 0);
-  const [v, w] = [f.deviation ** 2, psi.deviation ** 2];
-  return v * squares(all) + (v + f.mean ** 2) * w * squares(inCabinet) + v * w * inside * inside;
+  const [v, w] = [square(f.deviation), square(psi.deviation)];
+  return v * squares(all) + (v + square(f.mean)) * w * squares(inCabinet) + v * w * inside * inside;
 }
 
 function heatsByMaterial({ materials, heats }: LoadModel): readonly number[][] {
@@ -104,10 +106,11 @@ function heatsByMaterial({ materials, heats }: LoadModel): readonly number[][] {
 
 /** Variance of the weighted sum of one material's heats, which all follow the same uniform number. */
 function varianceOfHeats(model: LoadModel, indices: readonly number[], weights: Float64Array): number {
-  const wet = indices.reduce((sum, index) => sum + weights[index]! * model.heats[index]!.moisture, 0) ** 2;
+  const wet = square(indices.reduce((sum, index) => sum + weights[index]! * model.heats[index]!.moisture, 0));
   const [first] = indices;
   if (first === undefined) return 0;
-  if (indices.length === 1) return (weights[first]! * momentsOf(model.heats[first]!.distribution).deviation) ** 2 + wet;
+  if (indices.length === 1)
+    return square(weights[first]! * momentsOf(model.heats[first]!.distribution).deviation) + wet;
   let sum = 0;
   let squares = 0;
   for (let point = 0; point < POINTS; point += 1) {
@@ -119,5 +122,5 @@ function varianceOfHeats(model: LoadModel, indices: readonly number[], weights: 
     sum += value;
     squares += value * value;
   }
-  return Math.max(0, squares / POINTS - (sum / POINTS) ** 2) + wet;
+  return Math.max(0, squares / POINTS - square(sum / POINTS)) + wet;
 }

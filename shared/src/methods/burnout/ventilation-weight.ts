@@ -24,7 +24,9 @@ export const ventilationWeight = defineMethod({
   },
   run({ H, alpha_v, alpha_h }) {
     const b_v = Math.max(10, 12.5 * (1 + 10 * alpha_v - alpha_v * alpha_v));
-    const w_f = (6 / H) ** 0.3 * (0.62 + (90 * (0.4 - alpha_v) ** 4) / (1 + b_v * alpha_h));
+    // Powers written out: the last digit of a power differs between engines, and samples must not.
+    const gap = (0.4 - alpha_v) * (0.4 - alpha_v);
+    const w_f = Math.exp(0.3 * Math.log(6 / H)) * (0.62 + (90 * gap * gap) / (1 + b_v * alpha_h));
     return { w_f: Math.max(0.5, w_f), b_v };
   },
 });

@@ -21,41 +21,39 @@ const PLACES = [
 export function BandTable({ bands }: { readonly bands: RoomUncertainty['bands'] }) {
   const units = useUnits();
   return (
-    <div className="overflow-x-auto">
-      <table className="tally-ledger w-full text-small">
-        <caption className="unseen">How sure each number is: in so many percent of the samples it is lower</caption>
-        <thead>
-          <tr>
-            <th scope="col">Lower in</th>
-            {PLACES.map(([key, label]) => (
-              <th key={key} scope="col" data-align="end">
-                {label}
+    <table className="tally-ledger w-full text-small">
+      <caption className="unseen">How sure each number is: in so many percent of the samples it is lower</caption>
+      <thead>
+        <tr>
+          <th scope="col">Lower in</th>
+          {PLACES.map(([key, label]) => (
+            <th key={key} scope="col" data-align="end">
+              {label}
+            </th>
+          ))}
+        </tr>
+      </thead>
+      <tbody>
+        {ROWS.map(([key, label]) => {
+          const band = bands[key];
+          if (band === undefined) return null;
+          return (
+            <tr key={key}>
+              <th scope="row">
+                {label},{' '}
+                <span className="whitespace-nowrap text-soft">
+                  <UnitText unit={displayUnit(band.p5.unit, units)?.symbol ?? band.p5.unit} />
+                </span>
               </th>
-            ))}
-          </tr>
-        </thead>
-        <tbody>
-          {ROWS.map(([key, label]) => {
-            const band = bands[key];
-            if (band === undefined) return null;
-            return (
-              <tr key={key}>
-                <th scope="row">
-                  {label},{' '}
-                  <span className="whitespace-nowrap text-soft">
-                    <UnitText unit={displayUnit(band.p5.unit, units)?.symbol ?? band.p5.unit} />
-                  </span>
-                </th>
-                {PLACES.map(([place]) => (
-                  <td key={place} data-align="end">
-                    <Figure path={`uncertainty.bands.${key}.${place}`} estimate={band[place]} unit="bare" />
-                  </td>
-                ))}
-              </tr>
-            );
-          })}
-        </tbody>
-      </table>
-    </div>
+              {PLACES.map(([place]) => (
+                <td key={place} data-align="end">
+                  <Figure path={`uncertainty.bands.${key}.${place}`} estimate={band[place]} unit="bare" />
+                </td>
+              ))}
+            </tr>
+          );
+        })}
+      </tbody>
+    </table>
   );
 }
