@@ -7,7 +7,7 @@ export interface PlacedEstimate {
   readonly estimate: Estimate;
 }
 
-const SECTIONS = ['load', 'growth', 'room', 'burnout'] as const;
+const SECTIONS = ['load', 'growth', 'response', 'room', 'burnout', 'spread', 'air'] as const;
 /** Shown as tables of their own: one row per entry or material instead of one working each. */
 const IN_TABLES: readonly string[] = ['load.byEntry', 'load.byMaterial'];
 

@@ -5,17 +5,20 @@ import { writeTitle } from '../layout/write-heading.ts';
 import type { Sheet } from '../pdf/sheet.ts';
 import type { ReportBook, RoomReport } from '../report-book.ts';
 import { RoomNotes } from './room-notes.ts';
+import { writeAir } from './tally-air.ts';
 import { writeBurnout } from './tally-burnout.ts';
 import { writeCurve } from './tally-curve.ts';
 import { writeHeadline } from './tally-headline.ts';
 import { writeLedger } from './tally-ledger.ts';
 import { writeMadeOf } from './tally-made-of.ts';
 import { writeCautionTitles, writeMissing, writeNotes } from './tally-notes.ts';
+import { writeResponse } from './tally-response.ts';
 import { writeRoomFigures } from './tally-room.ts';
+import { writeSpread } from './tally-spread.ts';
 
 /**
- * The tally of one room, read from top to bottom as an argument: how much, of what, how fast, what the room does with it,
- * what could not be computed, which cautions stand with it. Returns its first sheet.
+ * The tally of one room, read from top to bottom as an argument: how much, of what, how fast, when it would be
+ * noticed, what the room does with it, what sets what alight, smoke and air, what could not be computed, which cautions stand with it. Returns its first sheet.
  */
 export function writeTallyPages(
   flow: Flow,
@@ -39,8 +42,11 @@ export function writeTallyPages(
   writeMadeOf(flow, report, room, notes);
   writeLedger(flow, report, room);
   writeCurve(flow, report, room, notes);
+  writeResponse(flow, report, room, notes);
   writeRoomFigures(flow, report, room, notes);
   writeBurnout(flow, report, room, notes);
+  writeSpread(flow, report, room, notes);
+  writeAir(flow, report, room, notes);
   writeMissing(flow, room);
   writeNotes(flow, notes);
   writeCautionTitles(flow, room);
