@@ -127,7 +127,9 @@ class Run {
     const stopped = this.scene.canBurn(this.first) ? this.burn() : 'burnt-out';
     const { room, scene } = this;
     const total = scene.heat_MJ;
-    const released = Math.min(total, room.heat / KJ_PER_MJ);
+    // What rounding leaves over is no heat left unburnt.
+    const spent = room.heat / KJ_PER_MJ;
+    const released = spent > total * (1 - ROUNDING) ? total : spent;
     return {
       first: scene.entries[this.first]!.id,
       events: this.events,
