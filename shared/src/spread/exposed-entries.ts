@@ -160,8 +160,8 @@ export class ExposedEntries {
       this.beside[target]! += this.specialFlux(pair, T + dT / 2, share);
       if (above_m === null) continue;
       const reaching = rateForFlame(above_m, this.scene.source(source)!.diameter);
-      const rateAtTime = (time: number) => share * this.ownRate(source, time);
-      const [before, after] = [rateAtTime(T), rateAtTime(T + dT)];
+      const before = share * this.ownRate(source, T);
+      const after = share * this.ownRate(source, T + dT);
       if (before < reaching && after < reaching) continue;
       const passed = before >= reaching ? 0 : (reaching - before) / (after - before);
       this.flameShare[target] = Math.min(this.flameShare[target]!, passed);
@@ -198,16 +198,17 @@ export class ExposedEntries {
   private mostGivenBy(target: number, T: number): number | undefined {
     let from: number | undefined;
     let most = 0;
-    const offer = (source: number, given: number) => {
-      if (given > most) [from, most] = [source, given];
-    };
     for (let i = 0; i < this.scene.entries.length; i += 1) {
       if (!this.clock.isBurning(i)) continue;
       const weight = this.scene.view(i).weights[target]!;
-      if (weight * this.clock.curveOf(i)!.peak > most) offer(i, weight * this.ownRate(i, T));
+      if (weight * this.clock.curveOf(i)!.peak <= most) continue;
+      const given = weight * this.ownRate(i, T);
+      if (given > most) [from, most] = [i, given];
     }
     for (const pair of this.special) {
-      if (pair.target === target) offer(pair.source, this.specialFlux(pair, T, 1));
+      if (pair.target !== target) continue;
+      const given = this.specialFlux(pair, T, 1);
+      if (given > most) [from, most] = [pair.source, given];
     }
     return from;
   }

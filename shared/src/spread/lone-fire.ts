@@ -61,9 +61,7 @@ const [WIDEST, NARROWEST] = [1 / (4 * Math.PI * 0.01 ** 2), 1 / (4 * Math.PI * 1
  */
 export function criticalView(fire: LoneFire, ignition: Ignition, rule: 'dose' | 'held', fluxFactor: number): number {
   const lights = (view: number) =>
-    rule === 'held'
-      ? isHeld(fire, ignition, view, fluxFactor)
-      : doseOf(fire, ignition, view, fluxFactor) >= ignition.dose;
+    rule === 'held' ? isHeld(fire, ignition, view, fluxFactor) : isDosed(fire, ignition, view, fluxFactor);
   if (lights(0)) return 0;
   if (!lights(WIDEST)) return Infinity;
   let [low, high] = [Math.log(NARROWEST), Math.log(WIDEST)];
@@ -92,13 +90,14 @@ function fluxOf(fire: LoneFire, { rate, layer }: LonePiece, view: number, fluxFa
   return fluxFactor * Math.min(MOST_FLUX_KW_M2, fire.radiativeFraction * rate * view) + layer;
 }
 
-function doseOf(fire: LoneFire, ignition: Ignition, view: number, fluxFactor: number): number {
+function isDosed(fire: LoneFire, ignition: Ignition, view: number, fluxFactor: number): boolean {
   let dose = 0;
   for (const piece of fire.pieces) {
     const above = fluxOf(fire, piece, view, fluxFactor) - ignition.critical_kW_m2;
     if (above > 0) dose += (ignition.exponent === 2 ? above * above : above) * piece.dt;
+    if (dose >= ignition.dose) return true;
   }
-  return dose;
+  return false;
 }
 
 function isHeld(fire: LoneFire, ignition: Ignition, view: number, fluxFactor: number): boolean {

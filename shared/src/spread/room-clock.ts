@@ -81,7 +81,6 @@ export class RoomClock {
     const { marks, T: from } = this;
     if (Math.min(this.demand, marks.cap_kW) >= marks.flashover_kW) return 'flashover';
     const capped = this.demandAt((from + to) / 2) > marks.cap_kW;
-    const timeTo = (T: number) => (capped ? this.heatBetween(from, T) / marks.cap_kW : T - from);
     let end = to;
     let stop: ClockStop | undefined;
     if (Math.min(this.demandAt(end), marks.cap_kW) >= marks.flashover_kW) {
@@ -92,17 +91,22 @@ export class RoomClock {
       end = firstAt((T) => this.heat + this.heatBetween(from, T) >= marks.heat_kJ, from, end);
       stop = 'starved';
     }
-    if (this.t + timeTo(end) >= marks.time_s) {
-      end = firstAt((T) => this.t + timeTo(T) >= marks.time_s, from, end);
+    if (this.t + this.timeTo(end, capped) >= marks.time_s) {
+      end = firstAt((T) => this.t + this.timeTo(T, capped) >= marks.time_s, from, end);
       stop = 'time';
     }
-    const time = timeTo(end);
+    const time = this.timeTo(end, capped);
     this.heat += this.heatBetween(from, end);
     this.t = stop === 'time' ? marks.time_s : this.t + time;
     this.T = end;
     if (capped) this.atCap_s += time;
     this.record();
     return stop;
+  }
+
+  /** Clock time to a burning time ahead, s. */
+  private timeTo(T: number, capped: boolean): number {
+    return capped ? this.heatBetween(this.T, T) / this.marks.cap_kW : T - this.T;
   }
 
   private demandAt(T: number): number {

@@ -1,9 +1,18 @@
 import { distanceOf, gapLine } from './gap-line.ts';
-import { criticalView, loneFire } from './lone-fire.ts';
+import { criticalView, loneFire, type LoneFire } from './lone-fire.ts';
 import { clearDistance, squaredDistanceTo, type PlacedRectangle } from './placed-rectangle.ts';
 import type { RadiatingFootprint } from './radiation.ts';
 import type { SpreadInput } from './simulate-spread.ts';
-import { answersOf, bringsFlashover, FARTHEST_M, gapViews, NO_GAP, SAFETY, type SpreadGap } from './spread-gaps.ts';
+import {
+  answersOf,
+  bringsFlashover,
+  FARTHEST_M,
+  gapViews,
+  NO_GAP,
+  SAFETY,
+  type GapViews,
+  type SpreadGap,
+} from './spread-gaps.ts';
 import { SpreadScene } from './spread-scene.ts';
 
 /** The pairs that stand nearer than what is enough, of all that were looked at. */
@@ -39,7 +48,7 @@ export function shortGaps(input: Pick<SpreadInput, 'room' | 'entries' | 'ignitio
   for (const from of scene.entries.keys())
     if (scene.canBurn(from)) pairs += lookFrom(scene, from, input.ignition, ignitions, found);
   found.sort((a, b) => b.shortfall - a.shortfall);
-  return { pairs, short: found.length, gaps: found.slice(0, most).map((one) => inFull(scene, one, input.ignition)) };
+  return { pairs, short: found.length, gaps: found.slice(0, most).map(inFullBy(scene, input.ignition, ignitions)) };
 }
 
 /** Adds the short pairs of one source; how many pairs it has within 10 m. */
@@ -91,11 +100,19 @@ function isFarEnough(source: RadiatingFootprint, here: PlacedRectangle, there: P
   return Math.sqrt(squaredDistanceTo(there, here.x, here.y)) - spread > distanceOf(view);
 }
 
-function inFull(scene: SpreadScene, { from, to, gap_m }: Candidate, rule: SpreadInput['ignition']): SpreadGap {
-  const fire = loneFire(scene, from);
-  const { id, ignition } = scene.entries[to]!;
-  const answers = bringsFlashover(scene, fire)
-    ? NO_GAP
-    : answersOf(scene.source(from)!, scene.footprint(from)!, scene.footprint(to)!, gapViews(fire, ignition, rule));
-  return { from: scene.entries[from]!.id, to: id, gap_m, ...answers };
+/** Works a row out in full; rows of one source share its fire, and of these those that light alike share their views. */
+function inFullBy(scene: SpreadScene, rule: SpreadInput['ignition'], ignitions: readonly string[]) {
+  const fires = new Map<number, LoneFire>();
+  const known = new Map<string, GapViews>();
+  return ({ from, to, gap_m }: Candidate): SpreadGap => {
+    const fire = fires.get(from) ?? loneFire(scene, from);
+    fires.set(from, fire);
+    const { id, ignition } = scene.entries[to]!;
+    const ids = { from: scene.entries[from]!.id, to: id, gap_m };
+    if (bringsFlashover(scene, fire)) return { ...ids, ...NO_GAP };
+    const key = `${from} ${ignitions[to]}`;
+    const views = known.get(key) ?? gapViews(fire, ignition, rule);
+    known.set(key, views);
+    return { ...ids, ...answersOf(scene.source(from)!, scene.footprint(from)!, scene.footprint(to)!, views) };
+  };
 }
