@@ -33,17 +33,18 @@ export function perArea(rateUnit: string): boolean {
   return rateUnit.endsWith('/m2');
 }
 
+/** A raised 2 of a file in an older encoding arrives as the sign for what cannot be read. */
 const SPELLINGS: readonly (readonly [RegExp, string])[] = [
   [/^(s|sec|secs|second|seconds)$/, 's'],
   [/^(min|mins|minute|minutes)$/, 'min'],
   [/^(h|hr|hrs|hour|hours)$/, 'h'],
   [/^(h?h:mm:ss|hh:mm:ss|mm:ss)$/, 'clock'],
-  [/^kw$/, 'kW'],
+  [/^(kw|kj(\/|·)?s(-1)?)$/, 'kW'],
   [/^w$/, 'W'],
   [/^mw$/, 'MW'],
-  [/^kw(\/|·|\*)?m(2|²|\^2|\^-2|-2)$/, 'kW/m2'],
-  [/^w(\/|·|\*)?m(2|²|\^2|\^-2|-2)$/, 'W/m2'],
-  [/^mw(\/|·|\*)?m(2|²|\^2|\^-2|-2)$/, 'MW/m2'],
+  [/^kw(\/|·|\*)?m(2|²|\uFFFD|\^2|\^-2|-2)$/, 'kW/m2'],
+  [/^w(\/|·|\*)?m(2|²|\uFFFD|\^2|\^-2|-2)$/, 'W/m2'],
+  [/^mw(\/|·|\*)?m(2|²|\uFFFD|\^2|\^-2|-2)$/, 'MW/m2'],
   [/^(volfr|vol\.?fraction|volumefraction|molfr|molefraction|fraction|mol\/mol|-|1)$/, 'fraction'],
   [/^(%|vol%|vol-%|vol\.%|%vol|pct|percent)$/, '%'],
   [/^ppm(v|vol)?$/, 'ppm'],

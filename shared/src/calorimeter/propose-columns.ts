@@ -29,7 +29,12 @@ export function proposeColumns(columns: readonly CalorimeterColumn[]): Proposal 
   for (const role of ROLES) {
     const fitting = columns.filter((column) => fits(column, role));
     const best = fitting.find(({ unit }) => unit !== null) ?? fitting[0];
-    if (best === undefined) continue;
+    if (best === undefined) {
+      // Gases and masses matter where the rate itself is missing; beside a rate they would only be noise.
+      if (mapped.rate === undefined)
+        notes.push(...columns.filter((column) => isNamed(column, role)).map((column) => passedOver(column, role)));
+      continue;
+    }
     mapped[role] = best.index;
     units[role] = unitOf(best, role);
     if (best.unit === null && role === 'rate')
@@ -44,12 +49,23 @@ export function proposeColumns(columns: readonly CalorimeterColumn[]): Proposal 
   return { columns: mapped, units, notes };
 }
 
+function isNamed({ name }: CalorimeterColumn, role: Role): boolean {
+  const plain = name.toLowerCase().replaceAll(/[_.\s]+/g, ' ');
+  return NAMES[role].test(plain.trim());
+}
+
+/** Why a column that bears the name is not proposed. */
+function passedOver({ name, unitText, empty, index }: CalorimeterColumn, role: Role): string {
+  const which = `“${name}” (column ${index + 1}) is not proposed as ${ROLE_WORDS[role]}`;
+  if (empty) return `${which}: it has no readings.`;
+  const units = Object.keys(COLUMN_UNITS[role]).join(', ');
+  return unitText === ''
+    ? `${which}: it names no unit. Choose it with one of ${units}.`
+    : `${which}: “${unitText}” is none of ${units}.`;
+}
+
 function fits(column: CalorimeterColumn, role: Role): boolean {
-  const name = column.name
-    .toLowerCase()
-    .replaceAll(/[_.\s]+/g, ' ')
-    .trim();
-  if (column.empty || !NAMES[role].test(name)) return false;
+  if (column.empty || !isNamed(column, role)) return false;
   if (column.unit === null) return column.unitText === '' && ASSUMED[role] !== undefined;
   return column.unit in COLUMN_UNITS[role];
 }

@@ -35,6 +35,22 @@ describe('what a file is proposed to be', () => {
     ]);
   });
 
+  it('says why a column that bears the name is passed over', () => {
+    const { notes } = describeCalorimeterCsv(
+      csv('Time (s),HRR (kcal/h),Mass (g),CO2 (kg/kg)', '0,1,,1', '1,2,,1', '2,3,,1'),
+    );
+    expect(notes).toEqual([
+      '“HRR” (column 2) is not proposed as heat release rate: “kcal/h” is none of kW, W, MW, kW/m2, W/m2, MW/m2.',
+      '“CO2” (column 4) is not proposed as carbon dioxide: “kg/kg” is none of fraction, %, ppm.',
+      '“Mass” (column 3) is not proposed as mass of the test piece: it has no readings.',
+    ]);
+  });
+
+  it('reads a raised 2 that an older encoding spoilt', () => {
+    const { proposed } = describeCalorimeterCsv(csv('Time (s),HRR (kW/m\uFFFD)', ...TRIANGLE));
+    expect(proposed.units.rate).toBe('kW/m2');
+  });
+
   it('offers gases where there is no rate', () => {
     const { proposed } = describeCalorimeterCsv(csv('Time (s),O2 (%),MFR (g/s)', '0,20.9,1', '1,20.9,1', '2,20.9,1'));
     expect(proposed).toMatchObject({ from: 'gases', columns: { time: 0, oxygen: 1, flow: 2 } });
