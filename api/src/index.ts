@@ -31,7 +31,8 @@ async function main(env: Env): Promise<void> {
     await seedDemo({ services: house.services, database: house.database, clock: systemClock, dataDir: env.dataDir });
   }
   const server = createServer(house.app);
-  server.requestTimeout = 60_000;
+  // A file of 25 MB from a tablet at 1 Mbit/s takes 200 s.
+  server.requestTimeout = 300_000;
   server.headersTimeout = 15_000;
 
   let stopping = false;

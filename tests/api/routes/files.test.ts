@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { request as httpRequest } from 'node:http';
-import { readdirSync } from 'node:fs';
+import { mkdirSync, readdirSync, rmdirSync } from 'node:fs';
+import { join } from 'node:path';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { StoredFile } from '@embertally/shared/contracts/files';
 import { sampleCsv, sampleJpeg, samplePdf, samplePng } from '../../support/sample-files.ts';
@@ -204,7 +205,34 @@ describe('an upload', () => {
   });
 });
 
+describe('a file that could not get its name', () => {
+  it('is not there, and is when it is sent again', async () => {
+    const id = randomUUID();
+    mkdirSync(join(app.filesFolder, `file-${id}`));
+    await send(person, path('report.pdf', id), 'application/pdf', samplePdf()).expect(500);
+    await person.visitor.get(`/api/files/${id}`).expect(404);
+    expect(stored().filter((name) => name.endsWith('.part'))).toEqual([]);
+    rmdirSync(join(app.filesFolder, `file-${id}`));
+    await send(person, path('report.pdf', id), 'application/pdf', samplePdf()).expect(201);
+    await person.visitor.get(`/api/files/${id}`).expect(200);
+  });
+});
+
 describe('files that nothing refers to', () => {
+  it('stay while somebody is about to refer to them', async () => {
+    const { id } = (await send(person, path(), 'application/pdf', samplePdf()).expect(201)).body as StoredFile;
+    await app.owner.query(`UPDATE stored_file SET created_at = created_at - interval '2 days' WHERE id = $1`, [id]);
+    const attaching = await app.owner.connect();
+    await attaching.query('BEGIN');
+    await attaching.query('SELECT 1 FROM stored_file WHERE id = $1 FOR SHARE', [id]);
+    await app.house.services.files.sweep();
+    await person.visitor.get(`/api/files/${id}`).expect(200);
+    await attaching.query('COMMIT');
+    attaching.release();
+    await app.house.services.files.sweep();
+    await person.visitor.get(`/api/files/${id}`).expect(404);
+  });
+
   it('go a day after they came, and what never arrived after an hour; the rest stays', async () => {
     const { files } = app.house.services;
     const sweep = () => files.sweep();
