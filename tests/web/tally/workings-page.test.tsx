@@ -1,6 +1,8 @@
 import { listLimits } from '@embertally/shared/contracts/limits';
 import { readDocument, readSurvey } from '@embertally/shared/contracts/surveys';
 import { toStored } from '@embertally/shared/survey/stored';
+// Read beforehand: the page fetches this part only once its numbers stand.
+import '@embertally/web/src/book/tally/further/further-part.tsx';
 import { createQueryClient } from '@embertally/web/src/lib/query-client.ts';
 import { WorkingsPage } from '@embertally/web/src/pages/workings-page.tsx';
 import { QueryClientProvider } from '@tanstack/react-query';
@@ -49,6 +51,19 @@ describe('the workings of a room', () => {
     expect(density.textContent).toMatch(/85\.0 MJ\/m/);
     expect(density.textContent).toMatch(/recorded|computed/);
     expect(screen.getByText('Figures for planning, not permission')).toBeTruthy();
+  });
+
+  it('end with further readings that are not used in the tally', async () => {
+    answering();
+    open('Dock');
+    expect(await screen.findByText(/variant, not used in the tally/, undefined, { timeout: 15_000 })).toBeTruthy();
+  });
+
+  it('put the three flashover criteria side by side and say why they differ', async () => {
+    answering();
+    open('Dock');
+    expect(await screen.findByText('Heat release at which the room would flash over')).toBeTruthy();
+    expect(screen.getByText(/The three differ because/)).toBeTruthy();
   });
 
   it('say that this is the working survey and not an issue of it', async () => {

@@ -2,12 +2,18 @@ import type { Limit } from '@embertally/shared/contracts/limits';
 import type { SurveyDocument } from '@embertally/shared/survey/survey-document';
 import { roomInput } from '@embertally/shared/survey/room-input';
 import { estimateRoom } from '@embertally/shared/tally/estimate-room';
-import { useMemo } from 'react';
-import { allEstimates } from './all-estimates.ts';
+import { lazy, Suspense, useMemo } from 'react';
+import { Skeleton } from '../../components/skeleton.tsx';
+import { allEstimates, GAPS_WORKED_OUT } from './all-estimates.ts';
+import { FlashoverTable } from './flashover-table.tsx';
 import { MissingList } from './missing-list.tsx';
 import { TallyCautions } from './tally-cautions.tsx';
 import { WorkingView } from '../../components/working/working-view.tsx';
 import './tally.css';
+
+const FurtherPart = lazy(() =>
+  import('./further/further-part.tsx').then((module) => ({ default: module.FurtherPart })),
+);
 
 interface RoomWorkingsProps {
   readonly document: SurveyDocument;
@@ -15,12 +21,10 @@ interface RoomWorkingsProps {
   readonly limits: readonly Limit[];
 }
 
-/** Every number of a room with its whole working, one after the other, then what is missing and the cautions. */
+/** Every number of a room with its whole working, one after the other; then what is missing, further readings, cautions. */
 export function RoomWorkings({ document, roomId, limits }: RoomWorkingsProps) {
-  const tally = useMemo(
-    () => estimateRoom(roomInput(document, roomId, limits), { workings: true }),
-    [document, roomId, limits],
-  );
+  const input = useMemo(() => roomInput(document, roomId, limits), [document, roomId, limits]);
+  const tally = useMemo(() => estimateRoom(input, { workings: true }), [input]);
   const sections = useMemo(() => allEstimates(tally), [tally]);
   return (
     <div className="tally grid grid-cols-[minmax(0,1fr)] gap-8">
@@ -35,6 +39,11 @@ export function RoomWorkings({ document, roomId, limits }: RoomWorkingsProps) {
             </li>
           ))}
           <li>
+            <a href="#workings-further" className="inline-block py-1">
+              Further readings
+            </a>
+          </li>
+          <li>
             <a href="#workings-cautions" className="inline-block py-1">
               Cautions
             </a>
@@ -48,6 +57,21 @@ export function RoomWorkings({ document, roomId, limits }: RoomWorkingsProps) {
               {section.title}
             </h2>
           </div>
+          {section.key === 'room' && (
+            <div className="mt-3">
+              <FlashoverTable flashover={tally.room.flashover} />
+              <p className="mt-2 max-w-[72ch] text-small text-soft">
+                The three differ because each was fitted to other tests: Thomas balances heat in rooms of ordinary size,
+                Babrauskas takes half of what the openings can feed, the third follows the rise of a hot layer and knows
+                the linings. The lowest that applies is used.
+              </p>
+            </div>
+          )}
+          {section.key === 'spread' && (tally.spread?.gaps?.length ?? 0) > GAPS_WORKED_OUT && (
+            <p className="mt-3 max-w-[72ch] text-soft">
+              {`Of ${tally.spread?.pairsShort ?? 0} pairs that stand too near, the ${GAPS_WORKED_OUT} that lack most are worked out here.`}
+            </p>
+          )}
           {section.estimates.map(({ path, name, estimate }) => (
             <article key={path} className="working-block" aria-labelledby={`working-${path}`}>
               <h3 id={`working-${path}`} className="text-body font-bold">
@@ -59,6 +83,9 @@ export function RoomWorkings({ document, roomId, limits }: RoomWorkingsProps) {
         </section>
       ))}
       <MissingList missing={tally.missing} />
+      <Suspense fallback={<Skeleton label="Working out further readings" lines={6} />}>
+        <FurtherPart input={input} tally={tally} />
+      </Suspense>
       <div id="workings-cautions">
         <TallyCautions ids={tally.cautions} />
       </div>
