@@ -6,13 +6,16 @@ import { parametricCurve } from '@embertally/shared/methods/burnout/parametric-c
 import { heatFromFormation } from '@embertally/shared/methods/chemistry/heat-from-formation';
 import { airBuoyancy } from '@embertally/shared/methods/calorimetry/air-buoyancy';
 import { grossAshFree } from '@embertally/shared/methods/heat/gross-ash-free';
+import { netFromGross } from '@embertally/shared/methods/heat/net-from-gross';
 import { deltaQ1 } from '@embertally/shared/methods/load/delta-q1';
 import { designLoadItalian } from '@embertally/shared/methods/load/design-load-italian';
 import { enclosureFactor } from '@embertally/shared/methods/load/enclosure-factor';
 import { protectedLoads } from '@embertally/shared/methods/load/protected-loads';
 import { plumeTemperature } from '@embertally/shared/methods/plume/plume-temperature';
 import { POOL_FUELS } from '@embertally/shared/methods/pool/pool-fuels';
+import { flashoverBabrauskas } from '@embertally/shared/methods/room/flashover-babrauskas';
 import { flashoverMqh } from '@embertally/shared/methods/room/flashover-mqh';
+import { flashoverThomas } from '@embertally/shared/methods/room/flashover-thomas';
 import { hotLayerMqh } from '@embertally/shared/methods/room/hot-layer-mqh';
 import { ventilationLimit } from '@embertally/shared/methods/room/ventilation-limit';
 import { gumbelFractile } from '@embertally/shared/methods/statistics/gumbel-fractile';
@@ -77,6 +80,21 @@ describe('traps of data and of editions', () => {
     expect([pool('acetone'), pool('transformer-oil')]).toEqual([25.8, 46.4]);
     expect(heatOf('acetone')).toBeCloseTo(28.5, 1);
     expect(heatOf('transformer-oil')).toBeLessThan(44);
+  });
+
+  it('gross and net are 7 % apart for polyethylene and for wood: web tables mostly print gross', () => {
+    for (const [gross, w_H] of [
+      [46.4, 0.1437],
+      [19.9, 0.06],
+    ] as const)
+      expect(gross / netFromGross.run({ H_gross: gross, w_H }) - 1).toBeCloseTo(0.07, 2);
+  });
+
+  it('the three flashover criteria are far apart in a large room, so none of them is left out', () => {
+    const [A_T, F] = [490, 15.8114];
+    expect(flashoverThomas.run({ A_T, F, A_f: 150 })).toBeCloseTo(9798.7, 0);
+    expect(flashoverBabrauskas.run({ F, A_T_per_F: A_T / F })).toBeCloseTo(11_858.5, 0);
+    expect(flashoverMqh.run({ h_k: 0.03, A_T, F, A_f: 150, H: 4 })).toBeCloseTo(9299.8, 0);
   });
 
   it('gross heat per dry mass and per dry mass without ash are two things', () => {
