@@ -5,14 +5,18 @@ import { meanThermalInertia } from '@embertally/shared/methods/burnout/mean-ther
 import { parametricCurve } from '@embertally/shared/methods/burnout/parametric-curve';
 import { heatFromFormation } from '@embertally/shared/methods/chemistry/heat-from-formation';
 import { airBuoyancy } from '@embertally/shared/methods/calorimetry/air-buoyancy';
+import { constantPressure } from '@embertally/shared/methods/calorimetry/constant-pressure';
 import { grossAshFree } from '@embertally/shared/methods/heat/gross-ash-free';
 import { netFromGross } from '@embertally/shared/methods/heat/net-from-gross';
 import { deltaQ1 } from '@embertally/shared/methods/load/delta-q1';
 import { designLoadItalian } from '@embertally/shared/methods/load/design-load-italian';
 import { enclosureFactor } from '@embertally/shared/methods/load/enclosure-factor';
 import { protectedLoads } from '@embertally/shared/methods/load/protected-loads';
+import { ceilingJet } from '@embertally/shared/methods/plume/ceiling-jet';
 import { plumeTemperature } from '@embertally/shared/methods/plume/plume-temperature';
+import { poolFire } from '@embertally/shared/methods/pool/pool-fire';
 import { POOL_FUELS } from '@embertally/shared/methods/pool/pool-fuels';
+import { rangeFaults } from '@embertally/shared/methods/range-faults';
 import { flashoverBabrauskas } from '@embertally/shared/methods/room/flashover-babrauskas';
 import { flashoverMqh } from '@embertally/shared/methods/room/flashover-mqh';
 import { flashoverThomas } from '@embertally/shared/methods/room/flashover-thomas';
@@ -54,6 +58,7 @@ describe('traps of data and of editions', () => {
     expect(gross).toBeCloseTo(26.42, 2);
     const inAir = airBuoyancy.run({ H_vac: 26.434, rho_s: 1.32, rho_w: 8.4, rho_a: 0.0012 });
     expect(inAir).toBeCloseTo(26.454, 3);
+    expect(constantPressure.run({ dU: -3225.62, dn: -0.5, T: 298.15 })).toBeCloseTo(-3226.86, 2);
   });
 
   it('heats of the catalogue are those at 298 K from undisturbed sources', () => {
@@ -95,6 +100,23 @@ describe('traps of data and of editions', () => {
     expect(flashoverThomas.run({ A_T, F, A_f: 150 })).toBeCloseTo(9798.7, 0);
     expect(flashoverBabrauskas.run({ F, A_T_per_F: A_T / F })).toBeCloseTo(11_858.5, 0);
     expect(flashoverMqh.run({ h_k: 0.03, A_T, F, A_f: 150, H: 4 })).toBeCloseTo(9299.8, 0);
+  });
+
+  it('relations give plausible numbers far outside their tests, so each says where it was left', () => {
+    const left = [
+      rangeFaults(flashoverThomas, { A_T: 900, F: 10, A_f: 400 }),
+      rangeFaults(flashoverBabrauskas, { F: 1, A_T_per_F: 120 }),
+      rangeFaults(flashoverMqh, { h_k: 0.03, A_T: 900, F: 10, A_f: 400, H: 6 }),
+      rangeFaults(ceilingJet, { Q: 1000, H: 25, r: 3, place: 'free' }),
+      rangeFaults(poolFire, { rate: 0.05, by: 'depends-on-diameter', kBeta: 2, D: 0.1, H: 40, rho: 740, V: 1 }),
+    ];
+    expect(left.map((faults) => faults.map(({ input }) => input).join())).toEqual([
+      'A_f',
+      'A_T_per_F',
+      'A_f,H',
+      'H',
+      'D',
+    ]);
   });
 
   it('gross heat per dry mass and per dry mass without ash are two things', () => {

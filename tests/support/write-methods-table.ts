@@ -13,5 +13,6 @@ const note = `Made by \`npm run safety\` from what each method declares and from
 - **held to**: how many values from outside the code it is tested against: *published* ones, ones *independently computed* by another implementation, by hand or by a second reader who had
   not seen the code, and *invariants* that every right implementation has.
 - ***from memory***: the source was not read again when the value or the relation was written down.
-- **known limits**: what is known against it first, then what it takes for granted. Mistakes that are easy to make in this trade have a test each, in \`tests/reference/traps.test.ts\`.`;
+- **known limits**: what is known against it first, then what it takes for granted. Mistakes that are easy to make in this trade have a test each, in
+  \`tests/reference/traps.test.ts\` and \`traps-of-data.test.ts\`.`;
 writeFileSync(file, `${before}\n## Methods\n\n${note}\n\n${await methodsTable()}`);
