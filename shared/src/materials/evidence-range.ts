@@ -2,7 +2,7 @@
 export type HeatEvidence = 'exact' | 'laboratory' | 'class' | 'mixed';
 
 /** Half-width of the range over the value. */
-export const HEAT_SPREAD: Readonly<Record<HeatEvidence, number>> = {
+const HEAT_SPREAD: Readonly<Record<HeatEvidence, number>> = {
   exact: 0.01,
   laboratory: 0.03,
   class: 0.07,

@@ -4,7 +4,7 @@ import { elementsDraft } from './elements-draft.ts';
 import { moistureDraft } from './moisture-draft.ts';
 
 /** A run with benzoic acid that gives the water equivalent of the calorimeter. */
-export const calibrationRun = z.strictObject({
+const calibrationRun = z.strictObject({
   mass_kg: positive(0.1),
   /** Corrected temperature rise. */
   rise_K: positive(20),
@@ -13,10 +13,9 @@ export const calibrationRun = z.strictObject({
   /** Heat of the nitric and sulfuric acid that formed. */
   acid_MJ: z.optional(atLeastZero(0.01)),
 });
-export type CalibrationRun = z.infer<typeof calibrationRun>;
 
 /** A run with the material. */
-export const bombRun = z.strictObject({
+const bombRun = z.strictObject({
   mass_kg: positive(0.1),
   /** Temperature rise, corrected for the heat exchanged with the surroundings. */
   rise_K: z.number().check(z.minimum(-20), z.maximum(20)),
@@ -27,7 +26,6 @@ export const bombRun = z.strictObject({
   /** Why this run does not count; a run is left out by a person who says why, never by the book. */
   left_out: z.optional(someText(300)),
 });
-export type BombRun = z.infer<typeof bombRun>;
 
 /** Runs in an oxygen bomb: gross heat at constant volume, brought to net, as received. */
 export const bombDraft = {

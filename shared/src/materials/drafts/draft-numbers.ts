@@ -9,6 +9,3 @@ export const atLeastZero = (most: number) => z.number().check(z.minimum(0), z.ma
 
 /** A share of a mass in percent. */
 export const percent = z.number().check(z.minimum(0), z.maximum(100));
-
-/** Largest heat of any fuel with room to spare, MJ/kg: hydrogen has 142 gross. */
-export const MOST_MJ_KG = 150;
