@@ -41,6 +41,9 @@ const NAMES: Readonly<Record<string, string>> = {
   'growth.heatReleased': 'Heat released',
   'burnout.thermalInertia': 'Thermal inertia of the linings',
   'burnout.openingFactor': 'Opening factor of the burn-out',
+  'burnout.beforeGlass.thermalInertia': 'Thermal inertia of the linings, before any glass breaks',
+  'burnout.beforeGlass.openingFactor': 'Opening factor of the burn-out, before any glass breaks',
+  'burnout.hydrocarbon.temperature': 'Gas temperature by the hydrocarbon curve',
   'response.sprinkler': 'Answer of the first sprinkler',
   'response.detector': 'Answer of the first detector',
   'response.heatDetector': 'Answer of the heat detector',
@@ -102,9 +105,10 @@ const CASE_NAMES: Readonly<Record<string, string>> = {
 export function figureName(path: string, row?: string): string {
   const known = NAMES[path];
   if (known !== undefined) return known;
-  const burnout = /^burnout\.(asKept|design)\.(.+)$/.exec(path);
-  const quantity = burnout?.[2] === undefined ? undefined : CASE_NAMES[burnout[2]];
-  if (quantity !== undefined) return `${quantity}, ${CASES[burnout?.[1] ?? ''] ?? ''}`;
+  const burnout = /^burnout\.(beforeGlass\.)?(asKept|design)\.(.+)$/.exec(path);
+  const quantity = burnout?.[3] === undefined ? undefined : CASE_NAMES[burnout[3]];
+  const stage = burnout?.[1] === undefined ? '' : ', before any glass breaks';
+  if (quantity !== undefined) return `${quantity}, ${CASES[burnout?.[2] ?? ''] ?? ''}${stage}`;
   if (path.startsWith('load.byMaterial.') || path.startsWith('load.byEntry.')) return `Heat in ${row ?? 'this row'}`;
   const spread = /^spread\.(?:events|gaps)\.\d+\.(\w+)$/.exec(path)?.[1];
   const ofRow = spread === undefined ? undefined : SPREAD_NAMES[spread];

@@ -70,6 +70,10 @@ export const ODD_ROOMS: Readonly<Record<string, RoomInput>> = {
     room: room({ openings: [{ width_m: 2, height_m: 1.2, sill_m: 0.9, state: 'fails' }], use: 'office' }),
     contents: [entry({ count: 10 })],
   },
+  'a door open and a window that breaks': {
+    room: room({ openings: [door, { width_m: 2, height_m: 1.2, sill_m: 0.9, state: 'fails' }], use: 'office' }),
+    contents: [entry({ count: 10, x_m: 2, y_m: 2, width_m: 1, depth_m: 1 })],
+  },
   'a hall': {
     room: room({
       ring_m: square(80),

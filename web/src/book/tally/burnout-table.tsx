@@ -17,12 +17,16 @@ const ROWS: readonly {
 ];
 
 interface BurnoutTableProps {
-  readonly burnout: RoomTally['burnout'];
+  /** Of the section, or the same before any glass breaks. */
+  readonly burnout: Pick<RoomTally['burnout'], 'asKept' | 'design'>;
+  /** Path of `burnout` in the tally. */
+  readonly path: 'burnout' | 'burnout.beforeGlass';
+  readonly caption: string;
   readonly rating_min: number | null;
 }
 
 /** The burn-out twice: for the heat as kept, which comes first, and for the design load. */
-export function BurnoutTable({ burnout, rating_min }: BurnoutTableProps) {
+export function BurnoutTable({ burnout, path, caption, rating_min }: BurnoutTableProps) {
   const { asKept, design } = burnout;
   const rows = ROWS.filter((row) => (asKept && row.of(asKept)) ?? (design && row.of(design)));
   if (rows.length === 0) return null;
@@ -33,7 +37,7 @@ export function BurnoutTable({ burnout, rating_min }: BurnoutTableProps) {
         {estimate === undefined ? (
           <span className="text-soft">–</span>
         ) : (
-          <Figure path={`burnout.${name}.${row.path}`} estimate={estimate} />
+          <Figure path={`${path}.${name}.${row.path}`} estimate={estimate} />
         )}
       </td>
     );
@@ -51,7 +55,7 @@ export function BurnoutTable({ burnout, rating_min }: BurnoutTableProps) {
   return (
     <>
       <table className="tally-ledger w-full text-small">
-        <caption className="pb-1 text-left text-soft">If everything here burns out</caption>
+        <caption className="pb-1 text-left text-soft">{caption}</caption>
         <thead>
           <tr>
             <th scope="col">

@@ -57,8 +57,23 @@ export function WhatTheRoomDoes({ tally, rating_min }: WhatTheRoomDoesProps) {
         </div>
         {chart !== null && <ChartFigure chart={chart} />}
         <div className="empty:hidden">
-          <BurnoutTable burnout={burnout} rating_min={rating_min} />
+          <BurnoutTable
+            burnout={burnout}
+            path="burnout"
+            caption="If everything here burns out"
+            rating_min={rating_min}
+          />
         </div>
+        {burnout.beforeGlass && (
+          <div className="empty:hidden">
+            <BurnoutTable
+              burnout={burnout.beforeGlass}
+              path="burnout.beforeGlass"
+              caption="The same before any glass breaks: less air, a longer and often cooler fire"
+              rating_min={rating_min}
+            />
+          </div>
+        )}
         <div className="empty:hidden">
           <FigureList
             rows={[
@@ -69,6 +84,11 @@ export function WhatTheRoomDoes({ tally, rating_min }: WhatTheRoomDoesProps) {
                 path: 'burnout.thermalInertia',
                 label: 'Thermal inertia of the linings',
                 estimate: burnout.thermalInertia,
+              },
+              {
+                path: 'burnout.hydrocarbon.temperature',
+                label: `Liquids and plastics: hydrocarbon curve after ${burnout.hydrocarbon?.after_min ?? 0} min`,
+                estimate: burnout.hydrocarbon?.temperature,
               },
               { path: 'room.floorArea', label: 'Floor area', estimate: room.floorArea },
               { path: 'room.enclosingArea', label: 'All enclosing surfaces', estimate: room.enclosingArea },
