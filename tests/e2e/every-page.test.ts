@@ -18,6 +18,7 @@ describe('every page, narrow and wide, light and dark', () => {
   let server: RunningServer;
   let browser: Browser;
   let inspector: JourneyPerson;
+  let manager: JourneyPerson;
   let newcomer: JourneyPerson;
   let siteId: string;
   let surveyId: string;
@@ -30,6 +31,7 @@ describe('every page, narrow and wide, light and dark', () => {
     browser = await launchBrowser();
     const demo = JSON.parse(readFileSync(join(folder, 'demo.json'), 'utf8')) as DemoFile;
     inspector = demo.people.find(({ role }) => role === 'inspector')!;
+    manager = demo.people.find(({ role }) => role === 'manager')!;
     newcomer = await signUp(server, 'Wren Tolly', 'Quayside Works');
     const { page, context } = await openPage(browser);
     await signIn(page, server, inspector);
@@ -63,7 +65,7 @@ describe('every page, narrow and wide, light and dark', () => {
 
   it.each(LOOKS)('signed out, $name', async ({ viewport, colorScheme }) => {
     const { page, context, expectQuiet } = await openPage(browser, { viewport, colorScheme });
-    for (const path of ['/sign-in', '/sign-up', '/cautions', '/nowhere']) {
+    for (const path of ['/sign-in', '/sign-up', '/cautions', '/methods', '/nowhere']) {
       await page.goto(server.url + path);
       await page.getByRole('heading', { level: 1 }).waitFor();
       await expectAccessible(page, path);
@@ -108,10 +110,40 @@ describe('every page, narrow and wide, light and dark', () => {
     await context.close();
   });
 
+  it.each(LOOKS)('with own materials, $name', async ({ viewport, colorScheme }) => {
+    const { page, context, expectQuiet } = await openPage(browser, { viewport, colorScheme });
+    await signIn(page, server, manager);
+    const id = await page.evaluate(async () => {
+      const { items } = (await (await fetch('/api/own-materials')).json()) as { items: { id: string }[] };
+      return items[0]!.id;
+    });
+    const paths = [
+      '/catalogue?list=own',
+      '/catalogue/materials/timber',
+      `/catalogue/materials/${id}`,
+      '/catalogue/materials/new',
+      '/catalogue/materials/new?way=bomb',
+      '/catalogue/materials/new?way=composition',
+      `/catalogue/materials/new?of=${id}&from=1`,
+    ];
+    for (const path of paths) {
+      await page.goto(server.url + path);
+      await page.getByRole('heading', { level: 1 }).waitFor();
+      await page.getByText(/^Reading /).waitFor({ state: 'detached' });
+      await expectAccessible(page, path);
+      const over = await page.evaluate(
+        () => document.documentElement.scrollWidth - document.documentElement.clientWidth,
+      );
+      expect(over, `sideways overflow of ${path} in px`).toBeLessThanOrEqual(0);
+    }
+    expectQuiet();
+    await context.close();
+  });
+
   it('with nothing yet, 390 px', async () => {
     const { page, context, expectQuiet } = await openPage(browser, { viewport: WIDTHS.narrow });
     await signIn(page, server, newcomer);
-    for (const path of ['/', '/sites', '/account']) {
+    for (const path of ['/', '/sites', '/account', '/catalogue?list=own']) {
       await page.goto(server.url + path);
       await page.getByRole('heading', { level: 1 }).waitFor();
       await expectAccessible(page, `${path}, empty`);

@@ -101,6 +101,14 @@ export const routes: RouteObject[] = [
             ),
           },
           {
+            path: patterns.methods,
+            handle: open,
+            lazy: loadPage(
+              () => import('./pages/methods-page.tsx'),
+              (m) => m.MethodsPage,
+            ),
+          },
+          {
             path: patterns.cautions,
             handle: open,
             lazy: loadPage(

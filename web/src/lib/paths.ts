@@ -12,6 +12,7 @@ export const patterns = {
   newMaterial: '/catalogue/materials/new',
   material: '/catalogue/materials/:materialId',
   cautions: '/cautions',
+  methods: '/methods',
   account: '/account',
 } as const;
 
@@ -39,6 +40,7 @@ export const paths = {
   material: (key: string, version?: number) =>
     `/catalogue/materials/${encodeURIComponent(key)}${version === undefined ? '' : `?version=${version}`}`,
   cautions: () => '/cautions',
+  methods: () => '/methods',
   account: () => '/account',
 } as const;
 

@@ -1,9 +1,11 @@
 import { useQuery } from '@tanstack/react-query';
 import { EmptyState } from '../components/empty-state.tsx';
 import { LoadFailed } from '../components/load-failed.tsx';
+import { LinkButton } from '../components/link-button.tsx';
 import { Page } from '../components/page.tsx';
 import { Skeleton } from '../components/skeleton.tsx';
 import { cautionsQuery } from '../features/cautions/api/cautions.ts';
+import { paths } from '../lib/paths.ts';
 
 export function CautionsPage() {
   const cautions = useQuery(cautionsQuery());
@@ -11,6 +13,7 @@ export function CautionsPage() {
     <Page
       title="Cautions"
       lead="Results here are planning estimates. These notices stand with them on every screen, report and export; none of them replaces the local fire code, the authority having jurisdiction or licensed practice."
+      actions={<LinkButton to={paths.methods()}>All methods</LinkButton>}
     >
       {cautions.isPending ? (
         <Skeleton label="Reading the cautions" lines={8} />

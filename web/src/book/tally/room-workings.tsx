@@ -3,6 +3,8 @@ import type { SurveyDocument } from '@embertally/shared/survey/survey-document';
 import { roomInput } from '@embertally/shared/survey/room-input';
 import { estimateRoom } from '@embertally/shared/tally/estimate-room';
 import { lazy, Suspense, useMemo } from 'react';
+import { Link } from 'react-router-dom';
+import { paths } from '../../lib/paths.ts';
 import { Skeleton } from '../../components/skeleton.tsx';
 import { allEstimates, GAPS_WORKED_OUT } from './all-estimates.ts';
 import { FlashoverTable } from './flashover-table.tsx';
@@ -89,7 +91,12 @@ export function RoomWorkings({ document, roomId, limits }: RoomWorkingsProps) {
       <div id="workings-cautions">
         <TallyCautions ids={tally.cautions} />
       </div>
-      <p className="figure text-small text-soft">Computed by {tally.engine}</p>
+      <p className="text-small text-soft">
+        <span className="figure">Computed by {tally.engine}</span>{' '}
+        <Link to={paths.methods()} className="not-on-paper">
+          All methods
+        </Link>
+      </p>
     </div>
   );
 }
