@@ -1,6 +1,7 @@
 import { OutOfRangeError } from '../methods/estimate.ts';
 import { lognormalParameters } from '../methods/statistics/lognormal-parameters.ts';
 import { normalQuantile } from '../methods/statistics/normal-distribution.ts';
+import { portableExp } from '../methods/statistics/portable-functions.ts';
 import { pertFractile } from '../methods/statistics/pert-fractile.ts';
 import { triangularFractile } from '../methods/statistics/triangular-fractile.ts';
 
@@ -46,7 +47,7 @@ export function quantileOf(distribution: Distribution, p: number): number {
       const { mean, deviation } = distribution;
       if (!(mean > 0)) throw new OutOfRangeError('A lognormal distribution has a mean above 0.');
       const { mu, sigma } = lognormalParameters(mean, deviation / mean);
-      return Math.exp(mu + sigma * normalQuantile(p));
+      return portableExp(mu + sigma * normalQuantile(p));
     }
     case 'triangular':
       return triangularFractile.run(threePoints(distribution, p)).fractile;

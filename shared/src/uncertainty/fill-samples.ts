@@ -1,6 +1,7 @@
 import { OutOfRangeError } from '../methods/estimate.ts';
 import { lognormalParameters } from '../methods/statistics/lognormal-parameters.ts';
 import { normalQuantile } from '../methods/statistics/normal-distribution.ts';
+import { portableExp } from '../methods/statistics/portable-functions.ts';
 import type { Distribution } from './distribution.ts';
 import { pertTable } from './pert-table.ts';
 
@@ -36,7 +37,7 @@ function lognormalSamples(mean: number, deviation: number): FillSamples {
   if (!(mean > 0)) throw new OutOfRangeError('A lognormal distribution has a mean above 0.');
   const { mu, sigma } = lognormalParameters(mean, deviation / mean);
   return (uniform, out, count) => {
-    for (let i = 0; i < count; i += 1) out[i] = Math.exp(mu + sigma * normalQuantile(uniform[i]!));
+    for (let i = 0; i < count; i += 1) out[i] = portableExp(mu + sigma * normalQuantile(uniform[i]!));
   };
 }
 

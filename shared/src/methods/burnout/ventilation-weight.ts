@@ -1,5 +1,6 @@
 import { defineMethod } from '../define-method.ts';
 import { dbSi, en1991 } from '../sources.ts';
+import { portableExp, portableLog } from '../statistics/portable-functions.ts';
 
 /** Ventilation factor w_f of the equivalent time, at least 0.5. α_v outside 0.025 to 0.25 is for the caller to decide. */
 export const ventilationWeight = defineMethod({
@@ -26,7 +27,7 @@ export const ventilationWeight = defineMethod({
     const b_v = Math.max(10, 12.5 * (1 + 10 * alpha_v - alpha_v * alpha_v));
     // Powers written out: the last digit of a power differs between engines, and samples must not.
     const gap = (0.4 - alpha_v) * (0.4 - alpha_v);
-    const w_f = Math.exp(0.3 * Math.log(6 / H)) * (0.62 + (90 * gap * gap) / (1 + b_v * alpha_h));
+    const w_f = portableExp(0.3 * portableLog(6 / H)) * (0.62 + (90 * gap * gap) / (1 + b_v * alpha_h));
     return { w_f: Math.max(0.5, w_f), b_v };
   },
 });

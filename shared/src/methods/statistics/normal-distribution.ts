@@ -1,3 +1,5 @@
+import { portableLog } from './portable-functions.ts';
+
 /** Coefficients of AS 241, highest power first: the centre, the tail, the far tail. */
 const A = [
   2509.0809287301227, 33430.57558358813, 67265.7709270087, 45921.95393154987, 13731.69376550946, 1971.5909503065513,
@@ -42,7 +44,7 @@ export function normalQuantile(p: number): number {
   }
   const tail = q < 0 ? p : 1 - p;
   if (tail <= 0) return q < 0 ? -Infinity : Infinity;
-  const r = Math.sqrt(-Math.log(tail));
+  const r = Math.sqrt(-portableLog(tail));
   const z = r <= 5 ? polynomial(C, r - 1.6) / polynomial(D, r - 1.6) : polynomial(E, r - 5) / polynomial(F, r - 5);
   return q < 0 ? -z : z;
 }

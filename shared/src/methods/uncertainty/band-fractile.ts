@@ -3,6 +3,7 @@ import { OutOfRangeError } from '../estimate.ts';
 import { definition, gum } from '../sources.ts';
 import { lognormalParameters } from '../statistics/lognormal-parameters.ts';
 import { normalQuantile } from '../statistics/normal-distribution.ts';
+import { portableExp } from '../statistics/portable-functions.ts';
 
 /** How sure the survey is: the value the load per floor area stays below with probability p, first order. */
 export const bandFractile = defineMethod({
@@ -32,6 +33,6 @@ export const bandFractile = defineMethod({
     if (!Number.isFinite(V))
       throw new OutOfRangeError('The load is next to nothing beside its uncertainty: check both.');
     const { mu, sigma } = lognormalParameters(mean, V);
-    return Math.exp(mu + sigma * normalQuantile(p));
+    return portableExp(mu + sigma * normalQuantile(p));
   },
 });

@@ -76,7 +76,7 @@ function Answer({
   const chart = useMemo(() => shareChart(shares, `${fileSlug(name)}-what-matters-most`), [shares, name]);
   if (chart === null) return <p className="text-small text-soft">Nothing is recorded that could be unsure.</p>;
   return (
-    <div className="grid gap-4">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-4">
       <div>
         <p className="mb-1 max-w-[72ch] text-small">
           {SAMPLES} samples, seed {seed}: masses by how each entry is known, one heat for each material, what a survey
