@@ -45,14 +45,15 @@ export function SpreadGaps({ spread, nameOf, onShow }: SpreadGapsProps) {
         10 m of each other. Enough counts twice the radiation; however long counts its peak for ever. Each pair is taken
         alone: with three entries a larger gap can even light the third one.
       </p>
-      <table className="tally-ledger w-full text-small">
+      <table role="table" className="tally-ledger gap-table w-full text-small">
         <caption className="unseen">Gaps that are too small, in {metre}</caption>
-        <thead>
-          <tr>
+        <thead role="rowgroup">
+          <tr role="row">
             {[['names', `From, to`] as const, ...LENGTHS.map((key) => [key, HEADS[key]] as const)].map(
               ([key, label]) => (
                 <th
                   key={key}
+                  role="columnheader"
                   scope="col"
                   data-align={key === 'names' ? undefined : 'end'}
                   aria-sort={sort?.key === key ? sort.direction : undefined}
@@ -64,10 +65,10 @@ export function SpreadGaps({ spread, nameOf, onShow }: SpreadGapsProps) {
             )}
           </tr>
         </thead>
-        <tbody>
+        <tbody role="rowgroup">
           {shown.map((row) => (
-            <tr key={`${row.from} ${row.to}`}>
-              <th scope="row">
+            <tr key={`${row.from} ${row.to}`} role="row">
+              <th role="rowheader" scope="row">
                 <button
                   type="button"
                   className="ledger-entry"
@@ -80,7 +81,7 @@ export function SpreadGaps({ spread, nameOf, onShow }: SpreadGapsProps) {
                 </button>
               </th>
               {LENGTHS.map((key) => (
-                <td key={key} data-align="end">
+                <td key={key} role="cell" data-align="end">
                   <Figure path={`spread.gaps.${row.index}.${key}`} estimate={row[key]} row={row.names} unit="bare" />
                 </td>
               ))}

@@ -9,6 +9,7 @@ import { MissingReasons } from '../missing-reasons.tsx';
 import { TallySection } from '../tally-section.tsx';
 import { FirstEntry } from './first-entry.tsx';
 import { SpreadAnswer } from './spread-answer.tsx';
+import './spread.css';
 
 interface SpreadPartProps {
   readonly tally: RoomTally;
