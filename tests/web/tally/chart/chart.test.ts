@@ -47,6 +47,13 @@ describe('a curve', () => {
     expect(curveCsv(CHART)).toBe('time_min,heat_release_MW,heat_release_openings_MW\r\n0,0,6\r\n10,5,6\r\n20,0,6\r\n');
   });
 
+  it('saves the moments something answers at in columns of their own', () => {
+    const moments = [{ id: 'sprinkler', label: 'sprinkler 3 min 0 s', x: 3, tone: 'verdigris' as const, dash: [1, 3] }];
+    expect(curveCsv({ ...CHART, moments })).toBe(
+      'time_min,heat_release_MW,heat_release_openings_MW,time_sprinkler_min\r\n0,0,6,3\r\n10,5,6,3\r\n20,0,6,3\r\n',
+    );
+  });
+
   it('leaves a cell empty where a line does not reach: no zero is made up', () => {
     const short = {
       ...CHART.series[0]!,
