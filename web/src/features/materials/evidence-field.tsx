@@ -28,7 +28,7 @@ export function EvidenceField({ material }: { readonly material: MaterialForm })
               <span className="min-w-0 break-words">{file.name}</span>
               <Button
                 look="quiet"
-                aria-label={`Take ${file.name} off`}
+                aria-label={`Take off ${file.name}`}
                 onClick={() => {
                   takeOff(file.id);
                   input.current?.focus();

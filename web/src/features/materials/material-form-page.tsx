@@ -26,7 +26,17 @@ export function MaterialFormPage({ title, lead, trail, material, next, verb }: M
   const { form, way } = material;
   const sections = sectionsOf(way);
   return (
-    <Page title={title} lead={lead} trail={trail} right={<OutcomePanel material={material} />}>
+    <Page
+      title={title}
+      lead={lead}
+      trail={trail}
+      right={
+        // Stays in sight beside a long form.
+        <div className="wide:sticky wide:top-4 wide:max-h-[calc(100dvh-2rem)] wide:overflow-y-auto">
+          <OutcomePanel material={material} />
+        </div>
+      }
+    >
       <form noValidate onSubmit={form.onSubmit} className="grid grid-cols-[minmax(0,1fr)] gap-6">
         <ErrorSummary {...form.summary} />
         <MaterialSections material={material} sections={sections.slice(0, -1)} />

@@ -54,10 +54,8 @@ export function readDraft(way: MaterialWay, typed: Values, extras: DraftExtras, 
   };
 }
 
-function missing(field: PlacedField): string {
-  const title = fieldTitle(field);
-  const asked = field.line === null ? title.charAt(0).toLowerCase() + title.slice(1) : title;
-  return field.spec.as === 'choice' || field.spec.as === 'material'
-    ? `Choose: ${asked}`
-    : `Enter ${field.line === null ? '' : 'it: '}${asked}`;
+function missing({ spec, line }: PlacedField): string {
+  const verb = spec.as === 'choice' || spec.as === 'material' ? 'Choose' : 'Enter';
+  const asked = spec.label.charAt(0).toLowerCase() + spec.label.slice(1);
+  return line === null ? `${verb}: ${asked}` : `${line}: ${verb.toLowerCase()} the ${asked}`;
 }

@@ -32,7 +32,7 @@ export function RowsFields({ material, section }: RowsFieldsProps) {
             {count > 1 ? (
               <Button
                 look="quiet"
-                aria-label={`Take ${rows.noun.toLowerCase()} ${index + 1} out`}
+                aria-label={`Take out ${rows.noun.toLowerCase()} ${index + 1}`}
                 onClick={() => {
                   form.fill(without(form.values, section, index, count));
                   add.current?.focus();
