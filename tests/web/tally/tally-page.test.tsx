@@ -1,8 +1,18 @@
 import { editEntries } from '@embertally/shared/survey/commands/edit-entries';
 import { TallyPage } from '@embertally/web/src/book/tally/tally-page.tsx';
-import { act, screen, waitFor, within } from '@testing-library/react';
+import { act, cleanup, screen, waitFor, within } from '@testing-library/react';
 import { describe, expect, it } from 'vitest';
-import { box, crate, groundFloor, uid, withEntries, withRoom } from '../../support/survey-builder.ts';
+import {
+  box,
+  crate,
+  door,
+  groundFloor,
+  uid,
+  wallBetween,
+  withEntries,
+  withOpening,
+  withRoom,
+} from '../../support/survey-builder.ts';
 import { dock, limitOn, press, renderBookPart } from './render-book-part.tsx';
 
 const headings = () => screen.getAllByRole('heading').map((heading) => heading.textContent);
@@ -108,6 +118,26 @@ describe('the tally of a room', () => {
       .getAllByRole('columnheader')
       .map((cell) => cell.textContent);
     expect(columns.slice(1)).toEqual(['As kept', 'Design load']);
+  });
+
+  it('tells the burn-out before any glass breaks only where some would', () => {
+    const name = /before any glass breaks/;
+    renderBookPart(<TallyPage />, dock());
+    expect(screen.queryByRole('table', { name })).toBeNull();
+    cleanup();
+    const plain = dock();
+    const wall = wallBetween(plain, [0, 4], [6, 4]);
+    renderBookPart(
+      <TallyPage />,
+      withOpening(
+        plain,
+        door(wall, 1, { id: uid('window'), kind: 'window', state: 'fails', sill_m: 0.9, height_m: 1.2 }),
+      ),
+    );
+    const table = screen.getByRole('table', { name });
+    expect(
+      within(table).getByRole('button', { name: /Equivalent time of exposure, as kept, before any glass/ }),
+    ).toBeTruthy();
   });
 
   it('shows the flashover criteria side by side with their ranges', () => {
