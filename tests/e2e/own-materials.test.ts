@@ -92,7 +92,7 @@ describe('one’s own materials, in a real browser on the real server', () => {
       mimeType: 'text/csv',
       buffer: Buffer.from('formula,heat\nC8H18,44.4\n'),
     });
-    await page.getByRole('button', { name: 'Take report.csv off' }).waitFor();
+    await page.getByRole('button', { name: 'Take off report.csv' }).waitFor();
     await keep();
     octane = new URL(page.url()).pathname;
     await page.getByRole('button', { name: 'Put forward' }).click();
@@ -149,7 +149,7 @@ describe('one’s own materials, in a real browser on the real server', () => {
     await page.getByText(/It reaches 300 kW after 1 min 0 s and gives off 18\.0 MJ in all/).waitFor();
     await page.getByRole('button', { name: 'Keep this curve' }).click();
     await page.getByText('triangle.csv: 5 points').waitFor();
-    await page.getByRole('button', { name: 'Take triangle.csv off' }).waitFor();
+    await page.getByRole('button', { name: 'Take off triangle.csv' }).waitFor();
     await keep();
     await page.getByRole('heading', { name: 'How it burnt when it was measured' }).waitFor();
   });
