@@ -6,7 +6,7 @@ import { lazy, Suspense, useMemo } from 'react';
 import { Link } from 'react-router-dom';
 import { paths } from '../../lib/paths.ts';
 import { Skeleton } from '../../components/skeleton.tsx';
-import { allEstimates, GAPS_WORKED_OUT } from './all-estimates.ts';
+import { allEstimates, GAPS_WORKED_OUT, type NamedEstimate } from './all-estimates.ts';
 import { FlashoverTable } from './flashover-table.tsx';
 import { MissingList } from './missing-list.tsx';
 import { TallyCautions } from './tally-cautions.tsx';
@@ -79,7 +79,12 @@ export function RoomWorkings({ document, roomId, limits }: RoomWorkingsProps) {
               <h3 id={`working-${path}`} className="text-body font-bold">
                 {name}
               </h3>
-              <WorkingView estimate={estimate} name={name} level={4} />
+              <WorkingView
+                estimate={estimate}
+                name={name}
+                level={4}
+                sameAs={firstOfItsMethod(section.estimates, path, estimate.method)}
+              />
             </article>
           ))}
         </section>
@@ -99,4 +104,11 @@ export function RoomWorkings({ document, roomId, limits }: RoomWorkingsProps) {
       </p>
     </div>
   );
+}
+
+/** Rows of a list share their method: the first row says where it comes from for all of them. */
+function firstOfItsMethod(estimates: readonly NamedEstimate[], path: string, method: string): string | undefined {
+  if (!/\.\d+\./.test(path)) return undefined;
+  const first = estimates.find((one) => one.estimate.method === method);
+  return first === undefined || first.path === path ? undefined : first.name;
 }

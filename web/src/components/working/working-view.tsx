@@ -22,10 +22,12 @@ interface WorkingViewProps {
   readonly level?: 2 | 4;
   /** What the number is called; tells its table apart from those of other numbers. */
   readonly name: string;
+  /** A number laid out above that has the same sources, assumptions and reasons: they are not said again. */
+  readonly sameAs?: string | undefined;
 }
 
 /** How one number came about: relation, what went in and where it came from, steps, sources, range, reasons. */
-export function WorkingView({ estimate, name, level = 2 }: WorkingViewProps) {
+export function WorkingView({ estimate, name, level = 2, sameAs }: WorkingViewProps) {
   const Heading = level === 2 ? 'h2' : 'h4';
   const show = useQuantity();
   const value = estimate.value === null ? null : show(estimate.value, estimate.unit);
@@ -82,8 +84,9 @@ export function WorkingView({ estimate, name, level = 2 }: WorkingViewProps) {
       )}
       <section>
         <Heading>Where it comes from</Heading>
-        <ul className="grid gap-1">
-          {(estimate.sources ?? []).map((source) => (
+        {sameAs !== undefined && <p className="text-soft">As above, for “{sameAs}”; taken as so there as well.</p>}
+        <ul className="grid gap-1 empty:hidden">
+          {(sameAs === undefined ? (estimate.sources ?? []) : []).map((source) => (
             <li key={`${source.title} ${source.locator}`}>
               {source.title}
               {source.edition !== undefined && ` (${source.edition})`}, <FormulaText>{source.locator}</FormulaText>
@@ -94,7 +97,7 @@ export function WorkingView({ estimate, name, level = 2 }: WorkingViewProps) {
           ))}
         </ul>
       </section>
-      {(estimate.assumptions ?? []).length > 0 && (
+      {sameAs === undefined && (estimate.assumptions ?? []).length > 0 && (
         <section>
           <Heading>Taken as so</Heading>
           <ul className="list-disc pl-5">
@@ -106,7 +109,7 @@ export function WorkingView({ estimate, name, level = 2 }: WorkingViewProps) {
           </ul>
         </section>
       )}
-      {estimate.why !== undefined && (
+      {sameAs === undefined && estimate.why !== undefined && (
         <section>
           <Heading>Why this method</Heading>
           <p>

@@ -53,10 +53,15 @@ export function FurtherRow({ reading: { id, title, note, numbers }, unfolded }: 
       >
         <summary className="not-on-paper">{numbers.length === 1 ? 'Its working' : 'Their workings'}</summary>
         {open &&
-          numbers.map(({ name, estimate }) => (
+          numbers.map(({ name, estimate }, index) => (
             <div key={name} className="working-block">
               <p className="font-bold">{name}</p>
-              <WorkingView estimate={estimate} name={`${title}: ${name}`} level={4} />
+              <WorkingView
+                estimate={estimate}
+                name={`${title}: ${name}`}
+                level={4}
+                sameAs={numbers.slice(0, index).find((one) => one.estimate.method === estimate.method)?.name}
+              />
             </div>
           ))}
       </details>
