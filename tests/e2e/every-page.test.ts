@@ -129,7 +129,14 @@ describe('every page, narrow and wide, light and dark', () => {
     for (const path of paths) {
       await page.goto(server.url + path);
       await page.getByRole('heading', { level: 1 }).waitFor();
-      await page.getByText(/^Reading /).waitFor({ state: 'detached' });
+      await expect
+        .poll(() =>
+          page
+            .getByText(/^Reading /)
+            .filter({ visible: true })
+            .count(),
+        )
+        .toBe(0);
       await expectAccessible(page, path);
       const over = await page.evaluate(
         () => document.documentElement.scrollWidth - document.documentElement.clientWidth,
