@@ -6,6 +6,7 @@ import { fromStored } from '@embertally/shared/survey/stored';
 import type { Room, Storey, SurveyDocument } from '@embertally/shared/survey/survey-document';
 import { estimateRoom } from '@embertally/shared/tally/estimate-room';
 import type { RoomTally } from '@embertally/shared/tally/room-tally';
+import { USUAL_SAMPLING } from '@embertally/shared/uncertainty/usual-sampling';
 import { Figures } from './figures.ts';
 import type { ReportBook, RoomReport } from './report-book.ts';
 import type { ReportInput, ReportLimit } from './report-input.ts';
@@ -67,7 +68,9 @@ function reportRoom(
   number: number,
   limits: readonly ReportLimit[],
 ): RoomReport {
-  const tally = estimateRoom(roomInput(document, room.id, limits), { workings: true });
+  const input = roomInput(document, room.id, limits);
+  const sampled = { ...input, options: { ...input.options, ...USUAL_SAMPLING } };
+  const tally = estimateRoom(sampled, { workings: true });
   return {
     number,
     room,

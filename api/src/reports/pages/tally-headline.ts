@@ -38,7 +38,7 @@ export function writeHeadline(flow: Flow, report: ReportBook, room: RoomReport, 
     flow.y = base + 24;
     if (band?.p5.value != null && band.p95.value != null) {
       const range = `${figures.bare(band.p5.value, 'MJ/m2')} to ${figures.quantity(band.p95.value, 'MJ/m2')}`;
-      const sure = `From ${range} with 90 % probability, from how each amount was known and the spread of each heat${notes.marks(band.p5)}.`;
+      const sure = `From ${range} with 90 % probability, from how each amount was known and the spread of each heat, ${howFound(room)}${notes.marks(band.p5)}.`;
       writeText(flow, sure, { size: SIZE.table, colour: SOFT, after: 4 });
     }
   }
@@ -59,4 +59,9 @@ export function writeHeadline(flow: Flow, report: ReportBook, room: RoomReport, 
   flow.gap(6);
   drawRule(flow);
   flow.gap(14);
+}
+
+/** Which of the two bands it is. */
+function howFound({ tally: { uncertainty } }: RoomReport): string {
+  return uncertainty === undefined ? 'to first order' : `from ${uncertainty.samples} samples, seed ${uncertainty.seed}`;
 }

@@ -14,6 +14,7 @@ import { writeMadeOf } from './tally-made-of.ts';
 import { writeCautionTitles, writeMissing, writeNotes } from './tally-notes.ts';
 import { writeResponse } from './tally-response.ts';
 import { writeRoomFigures } from './tally-room.ts';
+import { writeSure } from './tally-sure.ts';
 import { writeSpread } from './tally-spread.ts';
 
 /**
@@ -41,6 +42,7 @@ export function writeTallyPages(
   writeHeadline(flow, report, room, notes);
   writeMadeOf(flow, report, room, notes);
   writeLedger(flow, report, room);
+  writeSure(flow, report, room);
   writeCurve(flow, report, room, notes);
   writeResponse(flow, report, room, notes);
   writeRoomFigures(flow, report, room, notes);
