@@ -27,6 +27,23 @@ export function partOf(material: PlaceableMaterial, mass_kg: number): EntryPart 
     heat_source: heat_source.slice(0, 500),
     mass_kg,
     moisture_pct: null,
+    ...(own == null ? {} : ofOwn(material)),
+  };
+}
+
+/** What the catalogue cannot be asked about an own material later. */
+export function ofOwn({
+  cellulosic,
+  soot_yield,
+  co_yield,
+}: Pick<PlaceableMaterial, 'cellulosic' | 'soot_yield' | 'co_yield'>): Pick<
+  EntryPart,
+  'cellulosic' | 'soot_yield' | 'co_yield'
+> {
+  return {
+    cellulosic,
+    ...(soot_yield === null ? {} : { soot_yield }),
+    ...(co_yield === null ? {} : { co_yield }),
   };
 }
 

@@ -1,4 +1,5 @@
 import type { PlaceableMaterial } from '../catalogue/placeable-material.ts';
+import { ofOwn } from './new-entry.ts';
 import type { EntryPart } from './survey-document.ts';
 
 /** The heat of an own material's version in force. */
@@ -10,12 +11,14 @@ export interface NewerHeat {
   readonly low_MJ_kg: number;
   readonly high_MJ_kg: number;
   readonly heat_source: string;
+  /** What else the version says of the material. */
+  readonly known: Pick<EntryPart, 'cellulosic' | 'soot_yield' | 'co_yield'>;
 }
 
 /** The versions in force by material; built-in materials have none. */
 export function heatsInForce(materials: readonly PlaceableMaterial[]): ReadonlyMap<string, NewerHeat> {
   return new Map(
-    materials.flatMap(({ key, own, net_heat_MJ_kg, low_MJ_kg, high_MJ_kg }) =>
+    materials.flatMap(({ key, own, net_heat_MJ_kg, low_MJ_kg, high_MJ_kg, ...material }) =>
       own === undefined || own === null
         ? []
         : [
@@ -28,6 +31,7 @@ export function heatsInForce(materials: readonly PlaceableMaterial[]): ReadonlyM
                 low_MJ_kg,
                 high_MJ_kg,
                 heat_source: own.heat_source.slice(0, 500),
+                known: ofOwn(material),
               },
             ] as const,
           ],
@@ -40,6 +44,7 @@ export function newerPart(part: EntryPart, inForce: ReadonlyMap<string, NewerHea
   if (part.material === null || part.material_version === null) return null;
   const newer = inForce.get(part.material);
   if (newer === undefined || newer.version <= part.material_version) return null;
-  const { version, net_heat_MJ_kg, low_MJ_kg, high_MJ_kg, heat_source } = newer;
-  return { ...part, material_version: version, net_heat_MJ_kg, low_MJ_kg, high_MJ_kg, heat_source };
+  const { version, net_heat_MJ_kg, low_MJ_kg, high_MJ_kg, heat_source, known } = newer;
+  const { cellulosic: _, soot_yield: _soot, co_yield: _co, ...kept } = part;
+  return { ...kept, material_version: version, net_heat_MJ_kg, low_MJ_kg, high_MJ_kg, heat_source, ...known };
 }

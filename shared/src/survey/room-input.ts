@@ -104,7 +104,6 @@ function entryInput(entry: Entry): RoomInputEntry {
 }
 
 function partInput(part: EntryPart): RoomInputPart {
-  const { material, label, mass_kg, net_heat_MJ_kg, low_MJ_kg, high_MJ_kg, heat_source, moisture_pct } = part;
-  const given = { material, label, mass_kg, net_heat_MJ_kg, low_MJ_kg, high_MJ_kg, heat_source };
+  const { material_version: _, moisture_pct, ...given } = part;
   return moisture_pct === null ? given : { ...given, water: 'dry', moisture_pct };
 }

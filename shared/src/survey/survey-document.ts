@@ -7,7 +7,6 @@ import type { SurveyDocumentV2 } from './versions/v2.ts';
 export type {
   Corner,
   Enclosure,
-  EntryPart,
   Evidence,
   Keeping,
   Lining,
@@ -19,7 +18,7 @@ export type {
   Protection,
   Storey,
 } from './versions/v1.ts';
-export type { Assumptions, Entry, Measure, Room } from './versions/v2.ts';
+export type { Assumptions, Entry, EntryPart, Measure, Room } from './versions/v2.ts';
 
 export type EntityKind = 'storey' | 'corner' | 'room' | 'opening' | 'entry';
 export const ENTITY_KINDS: readonly EntityKind[] = ['storey', 'corner', 'room', 'opening', 'entry'];

@@ -43,8 +43,8 @@ export function meanYields(heats: readonly EntryHeat[]): MeanYields | undefined 
 }
 
 function ownYields({ part }: CountedPart): typeof WOOD | undefined {
-  const { soot_yield, co_yield } = part.material ?? {};
-  return soot_yield == null || co_yield == null ? undefined : { soot: soot_yield, carbonMonoxide: co_yield };
+  const { soot, carbonMonoxide } = part;
+  return soot === null || carbonMonoxide === null ? undefined : { soot, carbonMonoxide };
 }
 
 function isWoodlike(material: Material | undefined): boolean {

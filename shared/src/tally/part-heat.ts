@@ -20,6 +20,9 @@ export interface PartHeat {
   readonly ownHeat: boolean;
   readonly combustionFactor: number;
   readonly cellulosic: boolean;
+  /** Yields with enough air, kg per kg burnt; null where not known. */
+  readonly soot: number | null;
+  readonly carbonMonoxide: number | null;
   /** Moisture was stated, so its own spread counts. */
   readonly moist: boolean;
   readonly heatDry: number;
@@ -53,6 +56,8 @@ export function partHeat(entry: RoomInputEntry, part: RoomInputPart): PartHeat {
     ownHeat: own !== null,
     combustionFactor: effective ? 1 : cellulosic ? 0.8 : 1,
     cellulosic,
+    soot: part.soot_yield ?? material?.soot_yield ?? null,
+    carbonMonoxide: part.co_yield ?? material?.co_yield ?? null,
     moist: part.moisture_pct != null,
     heatDry: dry,
   };

@@ -97,6 +97,9 @@ const part = z.strictObject({
   /** `effective`: measured as burnt (cone, furniture calorimeter), so the combustion factor is already in it. */
   heat_basis: maybe(z.enum(['complete', 'effective'])),
   cellulosic: maybe(z.boolean()),
+  /** kg per kg burnt with enough air; those of the material when nothing is said. */
+  soot_yield: maybe(amount(1)),
+  co_yield: maybe(amount(1)),
 });
 
 const entry = z.strictObject({

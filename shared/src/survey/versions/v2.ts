@@ -2,8 +2,8 @@ import { z } from 'zod/mini';
 import * as v1 from './v1.ts';
 
 /**
- * The survey document, version 2: what a person assumed for a room, photos of rooms, what is still to do there, and how
- * the mass of an entry was arrived at. FROZEN once released; `step-up.ts` brings older rows here.
+ * The survey document, version 2: what a person assumed for a room, photos of rooms, what is still to do there, how the
+ * mass of an entry was arrived at, and what an own material's key does not tell. FROZEN once released; `step-up.ts` brings older rows here.
  */
 export const SCHEMA_VERSION = 2;
 
@@ -51,7 +51,17 @@ export const room = z.extend(v1.room, {
   /** What the walk through the building has still to settle here; empty: nothing. */
   to_do: text(1000),
 });
-export const entry = z.extend(v1.entry, { measure: nullable(measure) });
+/** Of a material that is not built in: what its key alone does not tell. Absent: as the catalogue, else not known. */
+export const entryPart = z.extend(v1.entryPart, {
+  cellulosic: z.optional(z.boolean()),
+  /** kg per kg burnt with enough air. */
+  soot_yield: z.optional(z.number().check(z.minimum(0), z.maximum(1))),
+  co_yield: z.optional(z.number().check(z.minimum(0), z.maximum(1))),
+});
+export const entry = z.extend(v1.entry, {
+  parts: z.array(entryPart).check(z.minLength(1), z.maxLength(20)),
+  measure: nullable(measure),
+});
 
 export const surveyDocument = z.strictObject({
   schema_version: z.literal(SCHEMA_VERSION),
@@ -67,5 +77,6 @@ export const surveyDocument = z.strictObject({
 export type Assumptions = z.infer<typeof assumptions>;
 export type Measure = z.infer<typeof measure>;
 export type Room = z.infer<typeof room>;
+export type EntryPart = z.infer<typeof entryPart>;
 export type Entry = z.infer<typeof entry>;
 export type SurveyDocumentV2 = z.infer<typeof surveyDocument>;

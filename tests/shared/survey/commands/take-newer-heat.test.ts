@@ -2,6 +2,8 @@ import { newEntryFromMaterial } from '@embertally/shared/survey/new-entry';
 import { takeNewerHeat } from '@embertally/shared/survey/commands/take-newer-heat';
 import type { PlaceableMaterial } from '@embertally/shared/catalogue/placeable-material';
 import { searchCatalogue } from '@embertally/shared/catalogue/search-catalogue';
+import { roomInput } from '@embertally/shared/survey/room-input';
+import { estimateRoom } from '@embertally/shared/tally/estimate-room';
 import { heatsInForce } from '@embertally/shared/survey/newer-heat';
 import { applyChanges } from '@embertally/shared/survey/apply-changes';
 import { invertChanges } from '@embertally/shared/survey/invert-changes';
@@ -18,6 +20,9 @@ const canvas = (version: number, net: number, more: Partial<PlaceableMaterial> =
   net_heat_MJ_kg: net,
   low_MJ_kg: net - 1,
   high_MJ_kg: net + 1,
+  cellulosic: true,
+  soot_yield: null,
+  co_yield: null,
   radiative_fraction: 0.3,
   ignition_class: 'easy',
   source: { title: 'Report 12', locator: 'page 3', fromMemory: false },
@@ -107,4 +112,22 @@ test('own materials are found beside the built-in ones, and before them at the s
   expect(searchCatalogue('backcl', { own }).map(({ row }) => row.key)).toEqual([CANVAS]);
   expect(searchCatalogue('paper', { own })[0]?.row.key).toBe(uid('paper'));
   expect(searchCatalogue('backcl')).toEqual([]);
+});
+
+test('an own plastic burns as one: its combustion factor and yields come along, and with a newer version', () => {
+  const film = canvas(1, 43, { cellulosic: false, soot_yield: 0.06, co_yield: 0.024 });
+  const document = withEntries(
+    withRoom(groundFloor(), 'dock', box(0, 0, 6, 4)),
+    newEntryFromMaterial(film, 100, PLACE),
+  );
+  const tally = estimateRoom(roomInput(document, uid('dock'), []), { spread: false });
+  // EN 1991-1-2 E.3: 0.8 is for mainly cellulosic goods only.
+  expect(tally.load.combustionFactor.value).toBe(1);
+  // C V/(10 · 8700 y_s) with C 3 for what reflects light: hand sum from the room's volume.
+  const volume = tally.room.volume.value ?? Number.NaN;
+  expect(tally.air.massForVisibility10m?.value).toBeCloseTo((3 * volume) / (10 * 8700 * 0.06), 9);
+  const newer = heatsInForce([canvas(2, 44, { cellulosic: false, soot_yield: 0.05 })]);
+  const after = ran(document, takeNewerHeat, { entry_ids: [uid('a')], newer: [...newer.values()] });
+  expect(partOf(after, 'a')).toMatchObject({ cellulosic: false, soot_yield: 0.05, material_version: 2 });
+  expect(partOf(after, 'a')).not.toHaveProperty('co_yield');
 });
