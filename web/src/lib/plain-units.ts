@@ -3,7 +3,7 @@ export function plainUnits(sentence: string): string {
   return sentence
     .replaceAll(/\bm2\b/g, 'm²')
     .replaceAll(/\bm3\b/g, 'm³')
-    .replaceAll(/\bm-1\/2\b/g, 'm^−½')
-    .replaceAll(/\bm1\/2\b/g, 'm^½')
+    .replaceAll(/\bm-1\/2\b/g, 'm^(−½)')
+    .replaceAll(/\bm1\/2\b/g, 'm^(½)')
     .replaceAll(/\bm5\/2\b/g, 'm^(5/2)');
 }

@@ -38,7 +38,7 @@ function things({ room, contents }: RoomInput): SelectOption<string>[] {
   return [
     ...(room.openings ?? []).map(({ label, kind, state }, place) => ({
       value: `opening ${place}`,
-      label: `${label == null || label === '' ? `${kind ?? 'opening'} ${place + 1}` : label}${state === 'closed' ? ', closed' : ''}`,
+      label: `${label == null || label === '' ? `${capitalised(kind ?? 'opening')} ${place + 1}` : label}${state === 'closed' ? ', closed' : ''}`,
     })),
     { value: FURTHER, label: 'A further opening to the outside' },
     { value: 'room', label: 'The height of the room' },
@@ -46,6 +46,10 @@ function things({ room, contents }: RoomInput): SelectOption<string>[] {
       height_m == null ? [] : [{ value: `entry ${id}`, label: `How high ${label ?? id} is stored` }],
     ),
   ];
+}
+
+function capitalised(word: string): string {
+  return word.charAt(0).toUpperCase() + word.slice(1);
 }
 
 function leverOf(input: RoomInput, thing: string, varied: OpeningVaried): Lever | undefined {
@@ -61,7 +65,11 @@ export function ChangeForm({ input }: QuestionFormProps) {
   const [chosen, setChosen] = useState('');
   const [varied, setVaried] = useState<OpeningVaried>('width');
   const { answer, isStale, ask, forget } = useAsked<BothWays | null>(input);
-  const thing = options.some(({ value }) => value === chosen) ? chosen : (options[0]?.value ?? 'room');
+  const openings = input.room.openings ?? [];
+  const firstOpen = openings.findIndex(({ state }) => state !== 'closed');
+  const usual = firstOpen < 0 ? FURTHER : `opening ${firstOpen}`;
+  const thing = options.some(({ value }) => value === chosen) ? chosen : usual;
+  const isClosed = openings.some(({ state }, place) => state === 'closed' && thing === `opening ${place}`);
   const onSubmit = (event: SubmitEvent) => {
     event.preventDefault();
     ask((room) => {
@@ -73,7 +81,7 @@ export function ChangeForm({ input }: QuestionFormProps) {
     });
   };
   return (
-    <form className="grid gap-3" onSubmit={onSubmit}>
+    <form className="grid grid-cols-[minmax(0,1fr)] gap-3" onSubmit={onSubmit}>
       <SelectField
         label="What shall be another one"
         value={reading}
@@ -86,6 +94,7 @@ export function ChangeForm({ input }: QuestionFormProps) {
       <SelectField
         label="By"
         value={thing}
+        {...(isClosed && { hint: 'It is closed, so its size changes nothing until it is set open.' })}
         options={options}
         onChange={(value) => {
           setChosen(value);
@@ -141,8 +150,7 @@ interface OneWayProps {
 
 function OneWay({ answer: { estimate, before, after, readingUnit }, title, upwards }: OneWayProps) {
   const show = useQuantity();
-  if (estimate.value === null)
-    return <p className="text-soft">{`${upwards ? 'More' : 'Less'}: ${estimate.never ?? ''}`}</p>;
+  if (estimate.value === null) return <p className="text-soft">{estimate.never}</p>;
   const reads = (value: number | null) => {
     if (value === null) return null;
     const { text, unit } = show(value, readingUnit);

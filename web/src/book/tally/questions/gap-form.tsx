@@ -28,7 +28,7 @@ export function GapForm({ input }: QuestionFormProps) {
     ask((room) => enoughGap(room, burning, kept));
   };
   return (
-    <form className="grid gap-3" onSubmit={onSubmit}>
+    <form className="grid grid-cols-[minmax(0,1fr)] gap-3" onSubmit={onSubmit}>
       <SelectField
         label="Burning"
         value={burning}

@@ -75,7 +75,7 @@ export function HowManyForm({ input }: QuestionFormProps) {
   };
 
   return (
-    <form className="grid gap-3" onSubmit={onSubmit} noValidate>
+    <form className="grid grid-cols-[minmax(0,1fr)] gap-3" onSubmit={onSubmit} noValidate>
       <Combobox
         label="What is added"
         value={typed}
@@ -112,7 +112,7 @@ export function HowManyForm({ input }: QuestionFormProps) {
         }}
       />
       {limit === undefined && (
-        <div className="grid gap-3">
+        <div className="grid grid-cols-[minmax(0,1fr)] gap-3">
           <SelectField
             label="What it bounds"
             value={quantity}
