@@ -121,8 +121,15 @@ function entrySampler(entry: ModelEntry, seed: number, scratch: Scratch): AddEnt
   const mass = columnOf(seed, `mass:${entry.id}`, fillSamples(entry.mass));
   const cabinet = entry.cabinet && columnOf(seed, `cabinet:${entry.id}`, fillSamples(entry.cabinet));
   const { heat, released: free } = scratch;
+  // Most entries are of one material and in no cabinet: one pass is enough for them.
+  const [first] = terms;
+  const only = first !== undefined && terms.length === 1 && !first.inCabinet ? first : null;
   return (heats, count, released, characteristic, total) => {
     mass(scratch.mass, count);
+    if (only !== null && released === null && characteristic === null) {
+      addProduct(total, scratch.mass, heats[only.heat]!, only.mass, count);
+      return;
+    }
     cabinet?.(scratch.cabinet, count);
     heat.fill(0, 0, count);
     if (released !== null) free.fill(0, 0, count);
