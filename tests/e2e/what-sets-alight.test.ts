@@ -1,4 +1,4 @@
-import { readDocument } from '@embertally/shared/contracts/surveys';
+import { surveyDocument } from '@embertally/shared/survey/versions/v2';
 import { fromStored } from '@embertally/shared/survey/stored';
 import { randomUUID } from 'node:crypto';
 import type { Browser, Page } from 'playwright-core';
@@ -40,7 +40,7 @@ describe('what sets what alight, in a real browser on the real server', () => {
     const survey = `${server.url}/api${new URL(page.url()).pathname}`;
     const cookie = (await watched.context.cookies()).map(({ name, value }) => `${name}=${value}`).join('; ');
     const stored: unknown = await (await fetch(`${survey}/document`, { headers: { cookie } })).json();
-    const document = fromStored(readDocument.response.parse(stored));
+    const document = fromStored(surveyDocument.parse(stored));
     const storey = [...document.storeys.keys()][0] ?? '';
     const answer = await fetch(`${survey}/change-sets`, {
       method: 'POST',
