@@ -1,18 +1,13 @@
 import { lazy, Suspense, useState, type ComponentType } from 'react';
-import type { RoomInput } from '@embertally/shared/tally/room-input';
 import { Disclosure } from '../../../components/disclosure.tsx';
 import { Skeleton } from '../../../components/skeleton.tsx';
 import { useRoomInput } from '../../session/use-room-input.ts';
 import { TallySection } from '../tally-section.tsx';
+import type { QuestionFormProps } from './question-form-props.ts';
 
 const HowManyForm = lazy(() => import('./how-many-form.tsx').then((module) => ({ default: module.HowManyForm })));
 const GapForm = lazy(() => import('./gap-form.tsx').then((module) => ({ default: module.GapForm })));
 const ChangeForm = lazy(() => import('./change-form.tsx').then((module) => ({ default: module.ChangeForm })));
-
-export interface QuestionFormProps {
-  /** The same object until the room changes. */
-  readonly input: RoomInput;
-}
 
 /** Questions that run the tally backwards: what fits, what gap does, what would change a reading. */
 export function AskSection({ roomId }: { readonly roomId: string }) {

@@ -12,7 +12,7 @@ import { WarningList } from '../../../components/working/warning-list.tsx';
 import { useQuantity } from '../../../lib/use-quantity.ts';
 import { AnswerBox } from './answer-box.tsx';
 import { AnswerFigure } from './answer-figure.tsx';
-import type { QuestionFormProps } from './ask-section.tsx';
+import type { QuestionFormProps } from './question-form-props.ts';
 import { useAsked } from './use-asked.ts';
 
 interface BothWays {

@@ -4,7 +4,7 @@ import { Button } from '../../../components/button.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
 import { AnswerBox } from './answer-box.tsx';
 import { AnswerFigure } from './answer-figure.tsx';
-import type { QuestionFormProps } from './ask-section.tsx';
+import type { QuestionFormProps } from './question-form-props.ts';
 import { useAsked } from './use-asked.ts';
 
 const STANDINGS: Readonly<Record<GapAnswer['standing'], string>> = {

@@ -15,7 +15,7 @@ import { useUnits } from '../../../lib/units-context.ts';
 import { catalogueItem } from '../../plan/catalogue-item.ts';
 import { AnswerBox } from './answer-box.tsx';
 import { AnswerFigure } from './answer-figure.tsx';
-import type { QuestionFormProps } from './ask-section.tsx';
+import type { QuestionFormProps } from './question-form-props.ts';
 import { useAsked } from './use-asked.ts';
 
 interface Bound {
