@@ -39,7 +39,7 @@ describe('questions of a room', () => {
     press('Work it out');
     // (90 − 85) MJ/m² × 24 m² = 120 MJ; 85 is 94 % of 90, so the room is near already.
     expect(said()).toMatch(/more of .*: fire load density stays at or under 90\.0 MJ\/m²/);
-    expect(said()).toMatch(/at 90 % of 90 MJ\/m2 or above already/);
+    expect(said()).toMatch(/at 90 % of 90 MJ\/m² or above already/);
     press(/^How much more of .* fits: .*Show its working$/);
     expect((await screen.findByRole('dialog')).textContent).toMatch(/question\.how-many@1/);
   });

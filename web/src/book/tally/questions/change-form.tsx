@@ -10,6 +10,7 @@ import { Button } from '../../../components/button.tsx';
 import { SelectField, type SelectOption } from '../../../components/select-field.tsx';
 import { WarningList } from '../../../components/working/warning-list.tsx';
 import { useQuantity } from '../../../lib/use-quantity.ts';
+import { plainUnits } from '../../../lib/plain-units.ts';
 import { AnswerBox } from './answer-box.tsx';
 import { AnswerFigure } from './answer-figure.tsx';
 import type { QuestionFormProps } from './question-form-props.ts';
@@ -150,7 +151,7 @@ interface OneWayProps {
 
 function OneWay({ answer: { estimate, before, after, readingUnit }, title, upwards }: OneWayProps) {
   const show = useQuantity();
-  if (estimate.value === null) return <p className="text-soft">{estimate.never}</p>;
+  if (estimate.value === null) return <p className="text-soft">{plainUnits(estimate.never ?? '')}</p>;
   const reads = (value: number | null) => {
     if (value === null) return null;
     const { text, unit } = show(value, readingUnit);

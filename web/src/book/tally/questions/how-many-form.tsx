@@ -13,6 +13,7 @@ import { QuantityField } from '../../../components/quantity-field.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
 import { useUnits } from '../../../lib/units-context.ts';
 import { catalogueItem } from '../../plan/catalogue-item.ts';
+import { plainUnits } from '../../../lib/plain-units.ts';
 import { AnswerBox } from './answer-box.tsx';
 import { AnswerFigure } from './answer-figure.tsx';
 import type { QuestionFormProps } from './question-form-props.ts';
@@ -154,7 +155,7 @@ export function HowManyForm({ input }: QuestionFormProps) {
 function HowManyAnswer({ both: { bound, what, notOver, within } }: { readonly both: Both }) {
   const units = useUnits();
   const { estimate, before, after, readingUnit } = notOver;
-  if (estimate.value === null) return <p>{estimate.never}</p>;
+  if (estimate.value === null) return <p>{plainUnits(estimate.never ?? '')}</p>;
   const words = (value: number, figures: 3 | 'as entered' = 3) => {
     const { text, unit } = formatQuantity(value, readingUnit, units, { figures });
     return `${text} ${unit}`;
@@ -173,7 +174,7 @@ function HowManyAnswer({ both: { bound, what, notOver, within } }: { readonly bo
       </p>
       <p className="text-soft">
         {within.estimate.value === null ? (
-          within.estimate.never
+          plainUnits(within.estimate.never ?? '')
         ) : (
           <>
             With <AnswerFigure estimate={within.estimate} name={`How much more of ${what} keeps the room within`} /> of
