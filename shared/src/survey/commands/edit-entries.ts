@@ -1,4 +1,5 @@
 import type { Command } from '../command.ts';
+import { countedAnew } from '../counted-anew.ts';
 import { finish } from '../draft/finish.ts';
 import { rounded } from '../draft/rounded.ts';
 import { SurveyDraft } from '../draft/survey-draft.ts';
@@ -14,14 +15,15 @@ export interface EditEntriesInput {
   readonly patch: Partial<Omit<Entry, 'id' | 'room_id'>>;
 }
 
-/** Changes what is recorded of one or more entries. All of them or none. */
+/** Changes what is recorded of one or more entries, all of them or none. Peak and curve go with the count unless they are given. */
 export const editEntries: Command<EditEntriesInput> = (document, { entry_ids, patch }) => {
   const draft = new SurveyDraft(document);
   const edited: Entry[] = [];
   for (const id of entry_ids) {
     const entry = document.entries.get(id);
     if (entry === undefined) return refuse('ENTRY_GONE', 'The entry is not in the survey any more.', { ids: [id] });
-    const row = rounded({ ...entry, ...patch }, ENTRY_LENGTHS);
+    const counted = patch.count === undefined ? {} : countedAnew(entry, patch.count);
+    const row = rounded({ ...entry, ...counted, ...patch }, ENTRY_LENGTHS);
     const fault = rowRefusal('entry', row);
     if (fault !== null) return fault;
     draft.put('entry', row);

@@ -6,11 +6,35 @@ import { duplicateEntries } from '@embertally/shared/survey/commands/duplicate-e
 import { editEntries } from '@embertally/shared/survey/commands/edit-entries';
 import { moveEntries } from '@embertally/shared/survey/commands/move-entries';
 import { freePlace } from '@embertally/shared/survey/derive/free-place';
+import type { Entry } from '@embertally/shared/survey/survey-document';
 import { inSequence } from '@embertally/shared/survey/in-sequence';
 import { box, crate, done, groundFloor, ran, uid, withEntries, withRoom } from '../../../support/survey-builder.ts';
 
 const plan = withRoom(withRoom(groundFloor(), 'dock', box(0, 0, 6, 4)), 'bay', box(6, 0, 3, 4));
 const maker = { recorded_by: 'Inspector', recorded_at: '2026-03-04T05:06:07Z' };
+
+test('peak and measured curve go with the count', () => {
+  const curve: [number, number][] = [
+    [0, 0],
+    [60, 200],
+    [120, 0],
+  ];
+  const one = crate('a', 'dock', 1, 1, { count: 2, peak_kW: 300, curve });
+  const document = withEntries(withRoom(groundFloor(), 'dock', box(0, 0, 6, 4)), one);
+  const edit = (patch: Partial<Entry>) => ran(document, editEntries, { entry_ids: [uid('a')], patch });
+  expect(edit({ count: 6 }).entries.get(uid('a'))).toMatchObject({
+    count: 6,
+    peak_kW: 900,
+    curve: [
+      [0, 0],
+      [60, 600],
+      [120, 0],
+    ],
+  });
+  expect(edit({ count: 6, peak_kW: 500 }).entries.get(uid('a'))).toMatchObject({ peak_kW: 500 });
+  expect(edit({ count: 0 }).entries.get(uid('a'))).toMatchObject({ count: 0, peak_kW: 300, curve });
+  expect(edit({ label: 'x' }).entries.get(uid('a'))).toMatchObject({ count: 2, peak_kW: 300 });
+});
 
 test('contents lie in their room; outside it they are refused by name and nothing is recorded', () => {
   const refused = addEntries(plan, { entries: [crate('in', 'dock', 1, 1), crate('out', 'dock', 7, 1)] });

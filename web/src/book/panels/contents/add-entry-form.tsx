@@ -1,5 +1,6 @@
 import { type PlaceableHit, searchCatalogue } from '@embertally/shared/catalogue/search-catalogue';
 import { addEntries } from '@embertally/shared/survey/commands/add-entries';
+import { countedAnew } from '@embertally/shared/survey/counted-anew';
 import { freePlace } from '@embertally/shared/survey/derive/free-place';
 import type { Entry, EntryPart, Room } from '@embertally/shared/survey/survey-document';
 import { formatQuantity } from '@embertally/shared/units/format-quantity';
@@ -101,7 +102,7 @@ export function AddEntryForm({ room }: { readonly room: Room }) {
     const entry = {
       ...made,
       parts: withMass(made.parts, mass.value),
-      count: count.value,
+      ...countedAnew(made, count.value),
       keeping: values.keeping as Entry['keeping'],
       evidence: values.evidence as Entry['evidence'],
     };
