@@ -30,6 +30,6 @@ export function furtherOfMaterial(material: PlaceableMaterial): RoomInputEntry {
 
 function partOf(material: PlaceableMaterial | undefined, key: string, mass_kg: number): RoomInputPart {
   if (!material) return { material: key, mass_kg };
-  const { net_heat_MJ_kg, low_MJ_kg, high_MJ_kg, label } = material;
-  return { material: key, label, mass_kg, net_heat_MJ_kg, low_MJ_kg, high_MJ_kg };
+  const { net_heat_MJ_kg, low_MJ_kg, high_MJ_kg, label, cellulosic } = material;
+  return { material: key, label, mass_kg, net_heat_MJ_kg, low_MJ_kg, high_MJ_kg, cellulosic };
 }

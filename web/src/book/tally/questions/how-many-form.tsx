@@ -1,4 +1,4 @@
-import { type CatalogueHit, searchCatalogue } from '@embertally/shared/catalogue/search-catalogue';
+import { type PlaceableHit, searchCatalogue } from '@embertally/shared/catalogue/search-catalogue';
 import { limitNames } from '@embertally/shared/limits/limit-names';
 import { limitUnits } from '@embertally/shared/limits/limit-units';
 import type { LimitQuantity } from '@embertally/shared/contracts/limits';
@@ -13,6 +13,7 @@ import { QuantityField } from '../../../components/quantity-field.tsx';
 import { SelectField } from '../../../components/select-field.tsx';
 import { useUnits } from '../../../lib/units-context.ts';
 import { catalogueItem } from '../../plan/catalogue-item.ts';
+import { useBook } from '../../session/use-book.ts';
 import { plainUnits } from '../../../lib/plain-units.ts';
 import { AnswerBox } from './answer-box.tsx';
 import { AnswerFigure } from './answer-figure.tsx';
@@ -44,14 +45,15 @@ export function HowManyForm({ input }: QuestionFormProps) {
   const units = useUnits();
   const limits = input.limits ?? [];
   const [typed, setTyped] = useState('');
-  const [hit, setHit] = useState<CatalogueHit | null>(null);
+  const [hit, setHit] = useState<PlaceableHit | null>(null);
   const [chosen, setChosen] = useState('0');
   const [quantity, setQuantity] = useState<LimitQuantity>('load_per_floor_MJ_m2');
   const [bound, setBound] = useState<number | null>(null);
   const [lacking, setLacking] = useState<{ readonly what?: string; readonly bound?: string }>({});
   const { answer, isStale, ask, forget } = useAsked<Both>(input);
   const limit = limits[Number(chosen)];
-  const hits = searchCatalogue(typed, { limit: 12 });
+  const own = useBook((state) => state.ownMaterials);
+  const hits = searchCatalogue(typed, { limit: 12, own });
   const change = () => {
     setLacking({});
     forget();
