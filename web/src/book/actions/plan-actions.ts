@@ -122,6 +122,7 @@ export const FIT_ACTIONS: readonly Action[] = [
 ];
 
 const OTHER_ACTIONS: readonly Action[] = [
+  tool('split-room', 'Split a room', 'S', (state) => state.canEdit && state.document.rooms.size > 0),
   {
     id: 'duplicate',
     label: 'Duplicate',

@@ -34,6 +34,12 @@ export function RoomStrip({ room }: { readonly room: Room }) {
         onCommit={(height_m) => edit({ height_m }, `Changed the height of ${room.name}`)}
       />
       <StripVerb
+        label="Split"
+        onPress={() => {
+          session.setTool('split-room');
+        }}
+      />
+      <StripVerb
         label="Delete room"
         onPress={() => {
           deletePicked(session);

@@ -5,7 +5,7 @@ import { useLayoutEffect, useRef, useSyncExternalStore } from 'react';
 import { toView } from '../interaction/camera.ts';
 import type { PlanHost } from '../interaction/plan-host.ts';
 import { sceneOf, type Scene } from '../interaction/scene.ts';
-import type { Selected } from '../session/book-state.ts';
+import type { Selected, ToolName } from '../session/book-state.ts';
 import { useBook } from '../session/use-book.ts';
 import { deletePicked } from '../actions/delete-picked.ts';
 import { useBookSession } from '../session/use-book-session.ts';
@@ -17,6 +17,9 @@ import { RoomStrip } from './room-strip.tsx';
 import { StripVerb } from './strip-verb.tsx';
 import { WallStrip } from './wall-strip.tsx';
 
+/** While one of these is in hand a press on the plan draws, and nothing may lie in its way. */
+const DRAWING: ReadonlySet<ToolName> = new Set(['draw-room', 'measure', 'split-room']);
+
 /** A short strip of fields beside what is picked, on the plan. On a narrow screen it lies along the foot of the plan. */
 export function SelectionStrip({ host }: { readonly host: PlanHost }) {
   const session = useBookSession();
@@ -27,7 +30,7 @@ export function SelectionStrip({ host }: { readonly host: PlanHost }) {
   const canEdit = useBook((state) => state.canEdit);
   const camera = useBook((state) => state.camera);
   const view = useBook((state) => state.view);
-  const drawing = useBook((state) => state.tool === 'draw-room' || state.tool === 'measure');
+  const drawing = useBook((state) => DRAWING.has(state.tool));
   const busy = useSyncExternalStore(host.preview.subscribe, () => {
     const preview = host.preview.get();
     return preview.entries !== undefined || preview.changes !== undefined || preview.marquee !== undefined;

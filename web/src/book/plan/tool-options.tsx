@@ -10,6 +10,7 @@ const HINTS = {
   'draw-room':
     'Drag a rectangle, or press corner by corner and close on the first. Type a length while you point: 4.2, or 6 x 4. Alt lets go of snapping.',
   measure: 'Press twice, or drag. Nothing is changed.',
+  'split-room': 'Press on a wall of the room, then on another one. Presses between bend the new wall.',
 } as const;
 
 interface ToolOptionsProps {
@@ -46,6 +47,7 @@ export function ToolOptions({ focusPlan, leave }: ToolOptionsProps) {
       );
     case 'draw-room':
     case 'measure':
+    case 'split-room':
       return (
         <div className="tool-options">
           <p className="text-small text-soft">{HINTS[tool]}</p>

@@ -11,7 +11,7 @@ export type Units = 'SI' | 'US';
 /** The three pages of the Book on a narrow screen. */
 export type BookPageName = 'plan' | 'tally' | 'rooms';
 
-export type ToolName = 'select' | 'draw-room' | 'opening' | 'contents' | 'measure';
+export type ToolName = 'select' | 'draw-room' | 'opening' | 'contents' | 'measure' | 'split-room';
 
 /** Something on the plan a person can pick. A wall has no row of its own: its id is `cornerId|cornerId` in ring order. */
 export interface Selected {

@@ -4,6 +4,7 @@ import { drawRoomTool } from './draw-room-tool.ts';
 import { measureTool } from './measure-tool.ts';
 import { openingTool } from './opening-tool.ts';
 import { selectTool } from './select-tool.ts';
+import { splitRoomTool } from './split-room-tool.ts';
 import type { Tool, ToolPorts } from './tool.ts';
 
 const TOOLS: Readonly<Record<ToolName, (ports: ToolPorts) => Tool>> = {
@@ -12,6 +13,7 @@ const TOOLS: Readonly<Record<ToolName, (ports: ToolPorts) => Tool>> = {
   opening: openingTool,
   contents: contentsTool,
   measure: measureTool,
+  'split-room': splitRoomTool,
 };
 
 /** The tool of a name, fresh and idle. */
