@@ -39,7 +39,7 @@ describe('what is typed about a material', () => {
   });
 
   it.each([
-    ['nothing at all', {}, 'formula', /^Enter: chemical formula$/],
+    ['nothing at all', {}, 'formula', /^Enter the chemical formula$/],
     ['a word for a number', { formation_kJ_mol: 'many' }, 'formation_kJ_mol', /must be a number in kJ\/mol/],
     ['a number of two meanings', { formation_kJ_mol: '1,234' }, 'formation_kJ_mol', /write 1234 or 1\.234/],
     ['far out of range', { formation_kJ_mol: '1e9' }, 'formation_kJ_mol', /must be 1000000 kJ\/mol or less/],
@@ -57,7 +57,7 @@ describe('what is typed about a material', () => {
 
   it('asks only for what the answers call for', () => {
     const read = readDraft('supplier', { ...NAMED, heat_MJ: '24.6', per: 'L' }, {}, 'SI');
-    expect(read.ok ? {} : read.errors).toEqual({ density_kg_m3: 'Enter: density' });
+    expect(read.ok ? {} : read.errors).toEqual({ density_kg_m3: 'Enter the density' });
     expect(readDraft('supplier', { ...NAMED, heat_MJ: '24.6', per: 'kg' }, {}, 'SI').ok).toBe(true);
   });
 });

@@ -57,5 +57,6 @@ export function readDraft(way: MaterialWay, typed: Values, extras: DraftExtras, 
 function missing({ spec, line }: PlacedField): string {
   const verb = spec.as === 'choice' || spec.as === 'material' ? 'Choose' : 'Enter';
   const asked = spec.label.charAt(0).toLowerCase() + spec.label.slice(1);
-  return line === null ? `${verb}: ${asked}` : `${line}: ${verb.toLowerCase()} the ${asked}`;
+  const what = /^(where|how|what|who|when|the) /.test(asked) ? asked : `the ${asked}`;
+  return line === null ? `${verb} ${what}` : `${line}: ${verb.toLowerCase()} ${what}`;
 }
