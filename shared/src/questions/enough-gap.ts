@@ -1,7 +1,7 @@
 import type { Estimate } from '../methods/estimate.ts';
-import type { WorkingInput } from '../methods/working.ts';
 import { modelEstimate } from '../spread/model-estimate.ts';
 import type { Gap } from '../spread/gap-line.ts';
+import { pairInputs } from '../spread/pair-inputs.ts';
 import { spreadGaps } from '../spread/spread-gaps.ts';
 import { spreadInput } from '../spread/spread-input.ts';
 import { GAP_METHOD } from '../methods/models/spread-method.ts';
@@ -38,7 +38,7 @@ export function enoughGap(input: RoomInput, from: string, to: string): GapResult
   }
   const number = (output: keyof typeof GAP_METHOD.outputs, { metres, never }: Gap, k_f: number, text: string) =>
     modelEstimate(GAP_METHOD, output, { value: metres, ...(never !== undefined && { never }) }, () => ({
-      inputs: inputsOf(source, target, k_f),
+      inputs: pairInputs(source, target, k_f),
       steps: [{ text }],
       assumptions: [...GAP_METHOD.assumptions, ...GAP_METHOD.limits],
     }));
@@ -70,22 +70,4 @@ function whyNot(isSame: boolean, source: SceneEntry, target: SceneEntry): string
   if (target.enclosure !== 'open') return 'The second one is enclosed: radiation does not light it.';
   if (!(target.heat_MJ > 0) || !(target.peak_kW > 0)) return 'The second one has no heat to give: it does not burn.';
   return undefined;
-}
-
-function inputsOf(source: SceneEntry, target: SceneEntry, k_f: number): WorkingInput[] {
-  const input = (name: string, symbol: string, quantity: string, unit: string, value: number): WorkingInput => ({
-    name,
-    symbol,
-    quantity,
-    unit,
-    value,
-    origin: 'computed',
-  });
-  return [
-    input('Q_p', 'Q_p', 'Peak of the first entry', 'kW', source.peak_kW),
-    input('chi_r', 'χ_r', 'Share of it that radiates', '', source.radiativeFraction),
-    input('q_cr', 'q_cr', 'Critical flux of the second entry', 'kW/m2', target.ignition.critical_kW_m2),
-    input('dose', 'dose', 'Dose that lights the second entry', '(kW/m2)^n s', target.ignition.dose),
-    input('k_f', 'k_f', 'Flux factor', '', k_f),
-  ];
 }

@@ -1,5 +1,6 @@
 import type { EstimateWarning } from '../methods/estimate.ts';
 import type { WorkingInput } from '../methods/working.ts';
+import { computedInput } from '../spread/computed-input.ts';
 import { modelEstimate } from '../spread/model-estimate.ts';
 import type { SpreadEvent } from '../spread/run-spread.ts';
 import type { SpreadInput, SpreadResult } from '../spread/simulate-spread.ts';
@@ -64,20 +65,12 @@ function causeText({ cause, from }: SpreadEvent, nameOf: (id: string) => string)
 function inputsOf(entry: SpreadEntry | undefined): WorkingInput[] {
   if (!entry) return [];
   const { ignition, peak_kW, heat_MJ, radiativeFraction } = entry;
-  const input = (name: string, symbol: string, quantity: string, unit: string, value: number): WorkingInput => ({
-    name,
-    symbol,
-    quantity,
-    unit,
-    value,
-    origin: 'computed',
-  });
   return [
-    input('q_cr', 'q_cr', 'Critical flux of this entry', 'kW/m2', ignition.critical_kW_m2),
-    input('dose', 'dose', 'Dose that lights this entry', '(kW/m2)^n s', ignition.dose),
-    input('n', 'n', 'Exponent of the dose', '', ignition.exponent),
-    input('Q_p', 'Q_p', 'Peak of this entry', 'kW', peak_kW),
-    input('E_i', 'E_i', 'Heat of this entry', 'MJ', heat_MJ),
-    input('chi_r', 'χ_r', 'Share of it that radiates', '', radiativeFraction),
+    computedInput('q_cr', 'q_cr', 'Critical flux of this entry', 'kW/m2', ignition.critical_kW_m2),
+    computedInput('dose', 'dose', 'Dose that lights this entry', '(kW/m2)^n s', ignition.dose),
+    computedInput('n', 'n', 'Exponent of the dose', '', ignition.exponent),
+    computedInput('Q_p', 'Q_p', 'Peak of this entry', 'kW', peak_kW),
+    computedInput('E_i', 'E_i', 'Heat of this entry', 'MJ', heat_MJ),
+    computedInput('chi_r', 'χ_r', 'Share of it that radiates', '', radiativeFraction),
   ];
 }

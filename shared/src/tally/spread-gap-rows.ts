@@ -3,6 +3,7 @@ import type { WorkingInput } from '../methods/working.ts';
 import { modelEstimate } from '../spread/model-estimate.ts';
 import type { SpreadInput } from '../spread/simulate-spread.ts';
 import type { Gap } from '../spread/gap-line.ts';
+import { pairInputs } from '../spread/pair-inputs.ts';
 import { shortGaps } from '../spread/short-gaps.ts';
 import type { SpreadGap } from '../spread/spread-gaps.ts';
 import { GAP_METHOD } from '../methods/models/spread-method.ts';
@@ -56,21 +57,6 @@ function inputsFor({ entries }: SpreadInput): Describe {
   const byId = new Map(entries.map((entry) => [entry.id, entry]));
   return ({ from, to }, k_f) => {
     const [source, target] = [byId.get(from), byId.get(to)];
-    if (!source || !target) return [];
-    const input = (name: string, symbol: string, quantity: string, unit: string, value: number): WorkingInput => ({
-      name,
-      symbol,
-      quantity,
-      unit,
-      value,
-      origin: 'computed',
-    });
-    return [
-      input('Q_p', 'Q_p', 'Peak of the first entry', 'kW', source.peak_kW),
-      input('chi_r', 'χ_r', 'Share of it that radiates', '', source.radiativeFraction),
-      input('q_cr', 'q_cr', 'Critical flux of the second entry', 'kW/m2', target.ignition.critical_kW_m2),
-      input('dose', 'dose', 'Dose that lights the second entry', '(kW/m2)^n s', target.ignition.dose),
-      input('k_f', 'k_f', 'Flux factor', '', k_f),
-    ];
+    return source && target ? pairInputs(source, target, k_f) : [];
   };
 }

@@ -1,5 +1,6 @@
 import type { EstimateWarning } from '../methods/estimate.ts';
 import { figure } from '../methods/figure.ts';
+import { computedInput } from '../spread/computed-input.ts';
 import { modelEstimate } from '../spread/model-estimate.ts';
 import { simulateSpread, type SpreadInput, type SpreadResult } from '../spread/simulate-spread.ts';
 import { spreadInput } from '../spread/spread-input.ts';
@@ -125,22 +126,26 @@ function whyNoFlashover(fire: SpreadResult, { room }: SpreadInput): string {
 }
 
 function roomInputs({ room, entries }: SpreadInput) {
-  const input = (name: string, symbol: string, quantity: string, unit: string, value: number | string) =>
-    ({ name, symbol, quantity, unit, value, origin: 'computed' }) as const;
   return [
-    input('n', 'n', 'Entries', '', entries.length),
-    input(
+    computedInput('n', 'n', 'Entries', '', entries.length),
+    computedInput(
       'placed',
       'n_p',
       'Entries with a place on the plan',
       '',
       entries.filter(({ place }) => place !== null).length,
     ),
-    input('F0', 'F_0', 'A√H of what is open', 'm5/2', room.factorBefore),
-    input('F1', 'F_1', 'A√H with broken glass', 'm5/2', room.factorAfter),
-    input('A_T', 'A_T', 'Lining area', 'm2', room.liningArea_m2),
-    input('Q_fo', 'Q_fo', 'Lowest flashover criterion that applies', 'kW', room.flashover_kW ?? 'none'),
-    input('E_O2', 'E_O2', 'Heat that the air of the closed room can feed', 'MJ', room.oxygenLimitedHeat_MJ ?? 'none'),
+    computedInput('F0', 'F_0', 'A√H of what is open', 'm5/2', room.factorBefore),
+    computedInput('F1', 'F_1', 'A√H with broken glass', 'm5/2', room.factorAfter),
+    computedInput('A_T', 'A_T', 'Lining area', 'm2', room.liningArea_m2),
+    computedInput('Q_fo', 'Q_fo', 'Lowest flashover criterion that applies', 'kW', room.flashover_kW ?? 'none'),
+    computedInput(
+      'E_O2',
+      'E_O2',
+      'Heat that the air of the closed room can feed',
+      'MJ',
+      room.oxygenLimitedHeat_MJ ?? 'none',
+    ),
   ];
 }
 
