@@ -1,6 +1,7 @@
 import tailwindcss from '@tailwindcss/vite';
 import react from '@vitejs/plugin-react';
 import { defineConfig } from 'vite';
+import { laterChunk } from './later-chunk.ts';
 import { shareWorkerChunks } from './share-worker-chunks.ts';
 
 /** Where the API answers while the client is served by Vite; in production one process serves both. */
@@ -31,6 +32,10 @@ export default defineConfig({
               test: /web\/src\/(components|lib)\/(?!chart\/|working\/|combobox|confirm-dialog|dialog|menu|tabs|load-scale|quantity-field|room-summaries)|web\/src\/features\/(session|sites)|shared\/src\/(contracts\/(contract|problem|sessions|sites)|policy)/,
               minShareCount: 2,
             },
+            // Mutations are used by lazy parts only; in a file of their own they would import the parts and be imported by them.
+            { name: 'query', test: /node_modules\/@tanstack\// },
+            // A group normally takes along all its modules import, which here would be the Book itself.
+            { name: laterChunk(), debugName: 'later', includeDependenciesRecursively: false },
           ],
         },
       },
