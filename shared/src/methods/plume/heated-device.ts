@@ -1,4 +1,4 @@
-import { jetUnderCeiling, type CeilingJet } from './jet-under-ceiling.ts';
+import { jetRise, jetVelocity } from './jet-under-ceiling.ts';
 
 /** Error of one step that is let pass, K. */
 const TOLERANCE_K = 2e-4;
@@ -47,30 +47,35 @@ export function heatDevice(t: readonly number[], Q: readonly number[], device: D
     if (to - from < JUMP_S) continue;
     const slope = (Q[i]! - Q[i - 1]!) / (to - from);
     const rateAt = (time: number): number => Q[i - 1]! + slope * (time - from);
-    const jetAt = (time: number): CeilingJet =>
-      jetUnderCeiling(device.factor * Math.max(0, rateAt(time)), device.height, device.radius);
-    const after = (time: number, length: number, start: number): number => {
-      const before = jetAt(time).rise;
-      const end = jetAt(time + length).rise;
-      const x = (Math.sqrt(jetAt(time + length / 2).velocity) / device.rti) * length;
+    const strengthAt = (time: number): number => device.factor * Math.max(0, rateAt(time));
+    const gasAt = (time: number): number => jetRise(strengthAt(time), device.height, device.radius);
+    /** The device after a stretch in which the gas goes evenly from one rise to another. */
+    const after = (time: number, length: number, start: number, before: number, end: number): number => {
+      const velocity = jetVelocity(strengthAt(time + length / 2), device.height, device.radius);
+      const x = (Math.sqrt(velocity) / device.rti) * length;
       if (x < STILL) return start + x * ((before + end) / 2 - start);
       return end + ((end - before) / x) * Math.expm1(-x) + (start - before) * Math.exp(-x);
     };
+    let gas = gasAt(from);
     for (let time = from; time < to;) {
       const length = Math.min(step, to - time);
-      const whole = after(time, length, rise);
-      const halves = after(time + length / 2, length / 2, after(time, length / 2, rise));
+      const half = length / 2;
+      const [gasHalf, gasEnd] = [gasAt(time + half), gasAt(time + length)];
+      const whole = after(time, length, rise, gas, gasEnd);
+      const halves = after(time + half, half, after(time, half, rise, gas, gasHalf), gasHalf, gasEnd);
       const error = Math.abs(halves - whole) / 3;
       const fits = error <= TOLERANCE_K || length <= shortest;
       if (fits) {
         const next = halves + (halves - whole) / 3;
         if (next >= device.needed) {
-          const reached = time + crossing((tau) => after(time, tau, rise) >= device.needed, length);
+          const isReached = (tau: number): boolean => after(time, tau, rise, gas, gasAt(time + tau)) >= device.needed;
+          const reached = time + crossing(isReached, length);
           return { time: reached, rate: rateAt(reached), hottest: device.needed };
         }
         rise = next;
         hottest = Math.max(hottest, rise);
         time = to - time - length <= shortest / 1000 ? to : time + length;
+        gas = gasEnd;
       }
       const change = error > 0 ? 0.9 * Math.cbrt(TOLERANCE_K / error) : 4;
       step = Math.max(shortest, length * Math.min(4, Math.max(0.2, change)));

@@ -15,12 +15,21 @@ export interface CeilingJet {
  * @param radius from the fire's axis, m, 0 and up; close in, it does not matter
  */
 export function jetUnderCeiling(rate: number, height: number, radius: number): CeilingJet {
-  const near = radius / height;
-  const rise =
-    near <= 0.18 ? (16.9 * rate ** (2 / 3)) / height ** (5 / 3) : (5.38 * (rate / radius) ** (2 / 3)) / height;
-  const velocity =
-    near <= 0.15 ? 0.96 * Math.cbrt(rate / height) : (0.195 * Math.cbrt(rate) * Math.sqrt(height)) / radius ** (5 / 6);
-  return { rise, velocity };
+  return { rise: jetRise(rate, height, radius), velocity: jetVelocity(rate, height, radius) };
+}
+
+/** The rise alone, K; for who steps along a curve. */
+export function jetRise(rate: number, height: number, radius: number): number {
+  return radius / height <= 0.18
+    ? (16.9 * rate ** (2 / 3)) / height ** (5 / 3)
+    : (5.38 * (rate / radius) ** (2 / 3)) / height;
+}
+
+/** The velocity alone, m/s. */
+export function jetVelocity(rate: number, height: number, radius: number): number {
+  return radius / height <= 0.15
+    ? 0.96 * Math.cbrt(rate / height)
+    : (0.195 * Math.cbrt(rate) * Math.sqrt(height)) / radius ** (5 / 6);
 }
 
 /** Rate at which the gas at a place has risen by `rise` K, kW: the relation above solved for the rate. */
