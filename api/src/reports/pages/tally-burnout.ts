@@ -15,11 +15,15 @@ const HEIGHT = 160;
 /** The burn-out as kept and with the design load: temperatures against the standard curve, equivalent time, rating. */
 export function writeBurnout(flow: Flow, report: ReportBook, { room, tally }: RoomReport, notes: RoomNotes): void {
   const { figures } = report;
-  const { asKept, design } = tally.burnout;
+  const { asKept, design, beforeGlass } = tally.burnout;
   if (asKept === undefined && design === undefined) return;
   writeHeading(flow, 'If it burns out', 80);
-  const row = (name: string, of: (one: BurnoutCase) => Estimate | undefined): TableRow[] => {
-    const [kept, designed] = [asKept && of(asKept), design && of(design)];
+  const row = (
+    name: string,
+    of: (one: BurnoutCase) => Estimate | undefined,
+    cases: Pick<typeof tally.burnout, 'asKept' | 'design'> = tally.burnout,
+  ): TableRow[] => {
+    const [kept, designed] = [cases.asKept && of(cases.asKept), cases.design && of(cases.design)];
     if (kept === undefined && designed === undefined) return [];
     const cell = (estimate: Estimate | undefined) => `${figures.estimate(estimate)}${notes.marks(estimate)}`;
     return [{ cells: [name, cell(kept), cell(designed)] }];
@@ -32,6 +36,8 @@ export function writeBurnout(flow: Flow, report: ReportBook, { room, tally }: Ro
     ...row('Highest gas temperature', (one) => one.parametric?.peak),
     ...row('Time of the highest temperature', (one) => one.parametric?.timeOfPeak),
     ...row('Equivalent time of exposure', (one) => one.equivalentTime),
+    ...row('Highest gas temperature, before any glass breaks', (one) => one.parametric?.peak, beforeGlass ?? {}),
+    ...row('Equivalent time, before any glass breaks', (one) => one.equivalentTime, beforeGlass ?? {}),
   ];
   if (room.rating_min !== null) {
     const against = `Against the rated ${figures.quantity(room.rating_min, 'min')}`;
@@ -44,6 +50,12 @@ export function writeBurnout(flow: Flow, report: ReportBook, { room, tally }: Ro
   ];
   writeTable(flow, columns, rows);
   flow.gap(10);
+  const { hydrocarbon } = tally.burnout;
+  if (hydrocarbon !== undefined) {
+    const { temperature, after_min } = hydrocarbon;
+    const text = `Liquids and plastics hold more than a fifth of the heat. By the hydrocarbon curve: ${figures.estimate(temperature)}${notes.marks(temperature)} after ${figures.quantity(after_min, 'min')}.`;
+    writeText(flow, text, { after: 6 });
+  }
   const series = curves(report, asKept, design);
   if (series.length > 0) {
     flow.need(HEIGHT + 8);
