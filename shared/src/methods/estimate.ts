@@ -191,6 +191,9 @@ function shown(value: number | string | readonly number[]): number | string {
 function listText(values: readonly number[]): string {
   const SHOWN = 12;
   if (values.length === 0) return 'none';
-  const first = values.slice(0, SHOWN).map(figure).join('; ');
+  const first = values
+    .slice(0, SHOWN)
+    .map((value) => figure(value))
+    .join('; ');
   return values.length <= SHOWN ? first : `${first}; … ${values.length - SHOWN} more`;
 }

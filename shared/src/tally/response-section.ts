@@ -137,7 +137,7 @@ function heated(path: string, fire: Fire, head: Head, at: Where, context: TallyC
   return run.of(
     'time',
     time === null
-      ? `The device warms by ${figure(hottest)} K at most; it responds at ${figure(head.activation_C - T_a)} K.`
+      ? `The device warms by ${figure(hottest, 3)} K at most; it responds at ${figure(head.activation_C - T_a, 3)} K.`
       : undefined,
   );
 }
@@ -156,7 +156,7 @@ function smoked(fire: Fire, r: number, context: TallyContext): Estimate | undefi
   return run.of(
     'time',
     time === null
-      ? `It takes ${figure(rate)} kW to warm the gas there by 13 K; the fire peaks at ${figure(peak)} kW.`
+      ? `It takes ${figure(rate, 3)} kW to warm the gas there by 13 K; the fire peaks at ${figure(peak, 3)} kW.`
       : undefined,
   );
 }
@@ -181,7 +181,7 @@ function distanceWarning({ r, stated }: Pick<Where, 'r' | 'stated'>): EstimateWa
   return [
     {
       code: 'DISTANCE_ASSUMED',
-      text: `The device is taken to be ${figure(r)} m from the fire along the ceiling, the farthest place of a usual grid in this room.`,
+      text: `The device is taken to be ${figure(Number(r.toPrecision(3)))} m from the fire along the ceiling, the farthest place of a usual grid in this room.`,
     },
   ];
 }

@@ -113,6 +113,12 @@ describe('detectors', () => {
     expect(response.smokeDetector).toBeUndefined();
   });
 
+  it('are said to be as far away as half the diagonal of a room of 10 × 10 m, √50 m', () => {
+    const { response } = tally({ side: [10, 10], height_m: 3, protection: { detection: 'smoke' } });
+    const said = response.detector?.warnings.find(({ code }) => code === 'DISTANCE_ASSUMED');
+    expect(said?.text).toContain('taken to be 7.07 m from the fire');
+  });
+
   it('of heat: 65 °C and RTI 50, said to be assumed (independent: the same equation in steps of 1 ms)', () => {
     const { response } = tally({ height_m: 3, protection: { detection: 'heat' } });
     expect(Math.abs((response.detector?.value ?? 0) - heatDetectorByHand())).toBeLessThan(0.5);
