@@ -19,12 +19,12 @@ export function FigureList({ rows }: { readonly rows: readonly FigureListRow[] }
       <dl className="text-small">
         {present.map((row) => (
           <div key={row.path} className="flex items-baseline justify-between gap-4 border-b border-rule py-1">
-            <dt>{row.label}</dt>
+            <dt className="min-w-[40%]">{row.label}</dt>
             <dd className="text-right">
-              {row.estimate.value === null && row.estimate.never !== undefined && (
-                <span className="mr-2 text-soft">{row.estimate.never}</span>
-              )}
               <Figure path={row.path} estimate={row.estimate} />
+              {row.estimate.value === null && row.estimate.never !== undefined && (
+                <span className="block text-soft">{row.estimate.never}</span>
+              )}
               {row.remark !== undefined && <span className="ml-2 text-soft">{row.remark}</span>}
             </dd>
           </div>

@@ -17,7 +17,7 @@ interface WhatTheRoomDoesProps {
 const REGIMES: Readonly<Record<RoomTally['room']['regime'], string>> = {
   compartment: '',
   large: 'This room is too large to fill with one hot layer: flashover and the parametric curve are not covered.',
-  closed: 'Without an opening there is no flow of air to reckon with: flashover and burn-out are not covered.',
+  closed: 'The openings feed too little air for a flashover, even with the glass gone: the burn-out is not covered.',
 };
 
 /** What such a fire would do to the room: hot layer, flashover, burn-out, exposure against its rating. */

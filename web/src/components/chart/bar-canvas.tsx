@@ -9,7 +9,9 @@ Chart.register(BarController, BarElement, CategoryScale, LinearScale);
 
 const FONT = '"Atkinson Hyperlegible", sans-serif';
 const ROW_PX = 26;
-const LONGEST_LABEL = 24;
+/** Where a label needs two lines. */
+const TALL_ROW_PX = 36;
+const LONGEST_LINE = 20;
 /** Room for "100 %" behind the longest bar, px. */
 const FIGURE_PX = 48;
 
@@ -19,8 +21,15 @@ interface BarCanvasProps {
   readonly onReady: (picture: () => string | null) => void;
 }
 
-const shortened = (label: string): string =>
-  label.length > LONGEST_LABEL ? `${label.slice(0, LONGEST_LABEL - 1).trimEnd()}…` : label;
+const shortened = (line: string): string =>
+  line.length > LONGEST_LINE ? `${line.slice(0, LONGEST_LINE - 1).trimEnd()}…` : line;
+
+/** A long label stands on two lines, so that what tells it from the next is not cut off. */
+function linesOf(label: string): string | string[] {
+  if (label.length <= LONGEST_LINE) return label;
+  const space = label.lastIndexOf(' ', LONGEST_LINE);
+  return space <= 0 ? shortened(label) : [label.slice(0, space), shortened(label.slice(space + 1))];
+}
 const figure = (value: number): string => value.toLocaleString('en-GB', { maximumSignificantDigits: 2 });
 
 function optionsOf(chart: BarChart, colours: ChartColours): ChartOptions<'bar'> {
@@ -71,7 +80,7 @@ export function BarCanvas({ chart, onReady }: BarCanvasProps) {
   const plugins = useMemo(() => [figurePlugin(() => current.current)], []);
   const data = useMemo(
     () => ({
-      labels: chart.bars.map(({ label }) => shortened(label)),
+      labels: chart.bars.map(({ label }) => linesOf(label)),
       datasets: [
         {
           data: chart.bars.map(({ value }) => value),
@@ -84,6 +93,8 @@ export function BarCanvas({ chart, onReady }: BarCanvasProps) {
   );
   const options = useMemo(() => optionsOf(chart, colours), [chart, colours]);
 
+  const row_px = chart.bars.some(({ label }) => label.length > LONGEST_LINE) ? TALL_ROW_PX : ROW_PX;
+
   useLayoutEffect(() => {
     current.current = { chart, colours };
   }, [chart, colours]);
@@ -92,7 +103,7 @@ export function BarCanvas({ chart, onReady }: BarCanvasProps) {
   }, [onReady]);
 
   return (
-    <div className="relative w-full" style={{ height: `${chart.bars.length * ROW_PX + 12}px` }}>
+    <div className="relative w-full" style={{ height: `${chart.bars.length * row_px + 12}px` }}>
       <BarPicture
         ref={(made) => {
           instance.current = made ?? null;

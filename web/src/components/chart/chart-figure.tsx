@@ -12,7 +12,8 @@ import './chart.css';
 const CurveCanvas = lazy(() => import('./curve-canvas.tsx').then((module) => ({ default: module.CurveCanvas })));
 
 const STEPS = 200;
-const figure = (value: number): string => value.toLocaleString('en-GB', { maximumSignificantDigits: 3 });
+const figure = (value: number): string =>
+  value.toLocaleString('en-GB', { maximumSignificantDigits: 3 }).replaceAll(',', '\u202f');
 
 interface ChartFigureProps {
   readonly chart: CurveChart;

@@ -7,6 +7,9 @@ import {
   LineController,
   LineElement,
   PointElement,
+  type Scale,
+  type Tick,
+  Ticks,
 } from 'chart.js';
 import { useEffect, useLayoutEffect, useMemo, useRef } from 'react';
 import { Line } from 'react-chartjs-2';
@@ -52,7 +55,16 @@ function optionsOf(chart: CurveChart, colours: ChartColours): ChartOptions<'line
     title: { display: true, text: title, color: colours.tones.soft, font: { family: FONT, size: 13 }, padding: 2 },
     grid: { display: false },
     border: { color: colours.tones.soft },
-    ticks: { color: colours.tones.soft, font: { family: FONT, size: 12 }, maxTicksLimit: 6, maxRotation: 0 },
+    ticks: {
+      color: colours.tones.soft,
+      font: { family: FONT, size: 12 },
+      maxTicksLimit: 6,
+      maxRotation: 0,
+      // Thousands stand apart as in the tables.
+      callback(this: Scale, value: string | number, index: number, ticks: Tick[]) {
+        return Ticks.formatters.numeric.call(this, Number(value), index, ticks).replaceAll(',', '\u202f');
+      },
+    },
   });
   return {
     animation: false,

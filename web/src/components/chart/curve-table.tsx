@@ -2,7 +2,7 @@ import type { CurveChart } from './curve-chart.ts';
 import { curveRows } from './curve-rows.ts';
 
 const figure = (value: number | null): string =>
-  value === null ? '–' : value.toLocaleString('en-GB', { maximumSignificantDigits: 3 });
+  value === null ? '–' : value.toLocaleString('en-GB', { maximumSignificantDigits: 3 }).replaceAll(',', '\u202f');
 
 /** The same numbers as the chart, as a table. */
 export function CurveTable({ chart }: { readonly chart: CurveChart }) {

@@ -22,7 +22,7 @@ const COLUMNS: readonly Column<MethodRow>[] = [
     key: 'relation',
     header: 'Relation',
     cell: (row) => (
-      <span className="[overflow-wrap:anywhere]">
+      <span data-text="long" className="[overflow-wrap:anywhere]">
         <FormulaText>{plainUnits(row.equation)}</FormulaText>
       </span>
     ),
@@ -31,7 +31,7 @@ const COLUMNS: readonly Column<MethodRow>[] = [
     key: 'range',
     header: 'Made for',
     cell: (row) => (
-      <span className="text-small">
+      <span data-text="long" className="text-small">
         {row.ranges.length === 0 ? (
           'named cases only'
         ) : (
@@ -44,7 +44,7 @@ const COLUMNS: readonly Column<MethodRow>[] = [
     key: 'source',
     header: 'Source',
     cell: (row) => (
-      <ul className="grid gap-1 text-small">
+      <ul data-text="long" className="grid gap-1 text-small">
         {row.sources.map(({ text, fromMemory }) => (
           <li key={text}>
             <FormulaText>{text}</FormulaText>

@@ -21,7 +21,7 @@ export function RowsFields({ material, section }: RowsFieldsProps) {
     <div id={ties.id} tabIndex={-1} role="group" aria-label={section.title} className="grid gap-4">
       {ties.error === undefined ? null : <p className="field-error">{ties.error}</p>}
       {Array.from({ length: count }, (_, index) => (
-        <fieldset key={index} className="border-t border-rule pt-3">
+        <fieldset key={index} className="border-rule pt-3 not-first:border-t">
           <legend className="float-left w-full font-bold">
             {rows.noun} {index + 1}
           </legend>
