@@ -64,7 +64,7 @@ export function QuantityField(props: QuantityFieldProps) {
   };
 
   return (
-    <FieldFrame {...frame} label={`${label} (${symbol})`} error={typing?.message ?? error}>
+    <FieldFrame {...frame} label={symbol === '' ? label : `${label} (${symbol})`} error={typing?.message ?? error}>
       {(ties) => (
         <>
           <div className="field-box max-w-40" data-compact={compact ? 'yes' : undefined}>

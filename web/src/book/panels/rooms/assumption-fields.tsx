@@ -62,7 +62,7 @@ export function AssumptionFields({ room, run }: AssumptionFieldsProps) {
       />
       <CommandQuantity
         label="Rate per burning area"
-        hint="Emptied: as tables have it for the use, or from the contents."
+        hint="Left empty: as tables have it for the use, or from the contents."
         unit="kW/m2"
         value={current.plateau_kW_m2}
         optional
@@ -72,7 +72,7 @@ export function AssumptionFields({ room, run }: AssumptionFieldsProps) {
       />
       <CommandQuantity
         label="Area that burns at once"
-        hint="Emptied: the floor, or the contents of a fire that stays local."
+        hint="Left empty: the floor, or the contents of a fire that stays local."
         unit="m2"
         value={current.fire_area_m2}
         optional
@@ -110,8 +110,8 @@ export function AssumptionFields({ room, run }: AssumptionFieldsProps) {
         />
       )}
       <CommandQuantity
-        label="Share that burns (m)"
-        hint="Emptied: 0.8 for wood, paper and cotton, 1 for the rest."
+        label="Combustion factor m"
+        hint="Left empty: 0.8 for wood, paper and cotton, 1 for the rest."
         unit=""
         value={current.combustion_factor}
         optional
@@ -139,7 +139,7 @@ export function AssumptionFields({ room, run }: AssumptionFieldsProps) {
       />
       <CommandQuantity
         label="Heated for, at flashover"
-        hint="Emptied: 600 s."
+        hint="Left empty: 600 s."
         unit="s"
         value={current.exposure_s}
         optional
@@ -149,7 +149,7 @@ export function AssumptionFields({ room, run }: AssumptionFieldsProps) {
       />
       <CommandQuantity
         label="Air temperature before"
-        hint="Emptied: 20 °C."
+        hint="Left empty: 20 °C."
         unit="°C"
         value={current.ambient_C}
         optional

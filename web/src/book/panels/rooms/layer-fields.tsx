@@ -65,6 +65,7 @@ export function LayerFields({ surface, layers, run }: LayerFieldsProps) {
             {layers.length > 1 && (
               <Button
                 look="quiet"
+                className="justify-self-start"
                 onClick={() => {
                   run(layers.filter((_, at) => at !== index));
                 }}
