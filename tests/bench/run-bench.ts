@@ -2,8 +2,10 @@ import { writeFileSync } from 'node:fs';
 import type { BenchRow } from './bench-row.ts';
 import { benchApi } from './bench-api.ts';
 import { benchBundle } from './bench-bundle.ts';
+import { benchCalorimeter } from './bench-calorimeter.ts';
 import { benchEstimateRoom } from './bench-estimate-room.ts';
 import { benchMonteCarlo } from './bench-monte-carlo.ts';
+import { benchHitTest } from './bench-hit-test.ts';
 import { benchReport } from './bench-report.ts';
 import { benchSpread } from './bench-spread.ts';
 import { benchStart } from './bench-start.ts';
@@ -12,6 +14,8 @@ import { benchStart } from './bench-start.ts';
 const benches: readonly (() => Promise<readonly BenchRow[]>)[] = [
   benchEstimateRoom,
   benchSpread,
+  benchCalorimeter,
+  benchHitTest,
   benchMonteCarlo,
   benchBundle,
   benchApi,

@@ -66,17 +66,3 @@ test('corners count only when asked for, and then before all else', () => {
 test('outside everything there is nothing', () => {
   expect(at(20, 20)).toEqual([]);
 });
-
-test('5,000 entries answer in 5 ms at the median', () => {
-  const { scene: one } = scene();
-  const entries = Array.from({ length: 5000 }, (_, index) =>
-    crate(`e${index}`, 'dock', (index % 100) * 1.2, Math.floor(index / 100) * 1.2, { rotation_deg: index % 90 }),
-  );
-  const large = { ...one, entries };
-  const times = Array.from({ length: 9 }, (_, run) => {
-    const from = performance.now();
-    hitTest(large, { x_m: 30 + run, y_m: 20 }, { margin: 0.14 });
-    return performance.now() - from;
-  }).sort((a, b) => a - b);
-  expect(times[4]).toBeLessThan(5);
-});
